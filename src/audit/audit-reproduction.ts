@@ -1,0 +1,112 @@
+import type { Claim } from '../claim/claim.ts'
+import { yearsOfObliquity } from '../inference/declination-dates.ts'
+import { crossingYears } from '../inference/implied-dates.ts'
+import { isUnstated } from '../quantity/unstated.ts'
+import { OBLIQUITY_MODELS, type ObliquityModelName } from '../sky/obliquity-models.ts'
+import type { Reproduction } from './audit.ts'
+import { middle, nearestYear } from './dated-label.ts'
+import { YEARS_BEYOND_WINDOW } from './defaults.ts'
+import { computableStretch, type SightlineInputs, sightOf } from './sightline-inputs.ts'
+
+const STEP = 20
+
+/** The models of the period check: the claimant's, then the two of today; all of them where theirs is not known. */
+export function modelsToTry({ formula }: Claim): ObliquityModelName[] {
+  if (!isUnstated(formula) && 'model' in formula) {
+    return [...new Set<ObliquityModelName>([formula.model, 'vondrak2011', 'laskar2004'])]
+  }
+  return Object.keys(OBLIQUITY_MODELS) as ObliquityModelName[]
+}
+
+/**
+ * Does the last step reproduce: the date by the claimant's formula and by today's, first from the declination that the
+ * source prints, then from each line as recomputed here.
+ */
+export function auditReproduction(
+  claim: Claim,
+  lines: readonly SightlineInputs[],
+  window: { from: number; to: number },
+): Reproduction[] {
+  const near = middle(claim.assertedDate)
+  const span = { from: window.from - YEARS_BEYOND_WINDOW, to: window.to + YEARS_BEYOND_WINDOW }
+  const printed = claim.claimed.declinationDeg
+  const first = lines[0]!
+  const routes: Route[] = lines.map((line) => ({
+    from: 'sightline',
+    sightline: line.name,
+    datesBy: (model) => {
+      const { from, to } = computableStretch(model, span.from, span.to)
+      return crossingYears(sightOf({ ...line, model }), from, to, STEP)
+    },
+  }))
+  if (printed !== null) {
+    routes.unshift({
+      from: 'claimed declination',
+      sightline: first.name,
+      datesBy: (model) => datesOfDeclination(printed.value, first, model, span),
+    })
+  }
+  return routes.flatMap((route) => [...lackingRow(claim, route), ...rowsOf(route, modelsToTry(claim), near)])
+}
+
+interface Route {
+  from: Reproduction['from']
+  sightline: string
+  datesBy: (model: ObliquityModelName) => number[]
+}
+
+function rowsOf(
+  { from, sightline, datesBy }: Route,
+  models: readonly ObliquityModelName[],
+  near: number,
+): Reproduction[] {
+  const reference = nearestYear(datesBy('vondrak2011'), near)
+  return models.map((model) => {
+    const { label, range } = OBLIQUITY_MODELS[model]
+    const year = model === 'vondrak2011' ? reference : nearestYear(datesBy(model), near)
+    const comparable = year !== null && reference !== null && model !== 'vondrak2011'
+    return {
+      model,
+      label,
+      from,
+      sightline,
+      year,
+      difference_years: year === null ? null : year - near,
+      within_model_range: year === null ? null : range.from <= year && year <= range.to,
+      model_range: range.basis,
+      model_error_years: comparable ? year - reference : null,
+      reason: year === null ? 'no year in reach has that declination' : null,
+    }
+  })
+}
+
+/** A table that this program does not have is named, and its step left untested. */
+function lackingRow({ formula }: Claim, { from, sightline }: Route): Reproduction[] {
+  if (isUnstated(formula) || !('lacking' in formula)) return []
+  return [
+    {
+      model: formula.lacking,
+      label: formula.lacking,
+      from,
+      sightline,
+      year: null,
+      difference_years: null,
+      within_model_range: null,
+      model_range: 'not known here',
+      model_error_years: null,
+      reason: 'this program does not have that table, so the step could not be tested',
+    },
+  ]
+}
+
+/** A declination on the other side of the equator than the event's has no date at all. */
+function datesOfDeclination(
+  declination: number,
+  { event }: SightlineInputs,
+  model: ObliquityModelName,
+  span: { from: number; to: number },
+): number[] {
+  const size = event === 'june solstice' ? declination : -declination
+  const { from, to } = computableStretch(model, span.from, span.to)
+  return yearsOfObliquity(size, OBLIQUITY_MODELS[model].obliquityDeg, from, to)
+}

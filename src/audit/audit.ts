@@ -1,0 +1,331 @@
+/**
+ * The audit of one claim: one plain, frozen object that serialises to JSON as it is. Keys are snake_case,
+ * a unit stands at the end of the key that needs one, years are astronomical (0 is 1 BCE) and unrounded.
+ * Every number a report shows is in here; a renderer computes nothing.
+ */
+export interface Audit {
+  /** Version of the program. */
+  datestone: string
+  /** Day the audit was made, ISO 8601, from the clock that was handed in. */
+  made_on: string
+  /** Base name of the claim file. */
+  file: string
+  input_sha256: string
+  /** The claim file's content, echoed as plain values. */
+  claim: Readonly<Record<string, unknown>>
+  statement: string
+  source: string | null
+  structure: { name: string; latitude_deg: number; longitude_deg: number | null; elevation_m: number }
+  asserted: DatedLabel
+  /** The independent dates, in the order of the file. */
+  other_dates: readonly DatedLabel[]
+  /** What the claim gives the builders: 0 is `exact`; null where it does not say. */
+  assumed_precision_arcmin: number | null
+  /** The plausible build tolerances; `stated` is false where the default of this program stands in. */
+  plausible: { low_arcmin: number; high_arcmin: number; stated: boolean }
+  window: Window
+  /** Which of the four kinds of result this is; the report chooses its words by it. */
+  outcome: Outcome
+  /** The finding that stands on page one: paragraphs, together at most 150 words. */
+  summary: readonly string[]
+  findings: readonly Finding[]
+  assumptions: readonly Assumption[]
+  sightlines: readonly SightlineAudit[]
+  tracks: readonly Track[]
+  implied: readonly Implied[]
+  checks: readonly Check[]
+  reproduction: readonly Reproduction[]
+  /** Of all lines jointly, or of the only one. */
+  sweep: Sweep
+  /** The same sweep's bits and sets over a second window, since both belong to their window. */
+  second_window: SecondWindow
+  limits: readonly Limit[]
+  budget: readonly BudgetRow[]
+  /** The budget's sum by two routes; null where no date fits. */
+  budget_check: BudgetCheck | null
+  alternatives: readonly Alternative[]
+  /** Not computed by this version. */
+  chance: null
+  today: readonly Today[]
+  warnings: readonly string[]
+  /** Keys of the works this audit rests on; the report prints them. */
+  references: readonly string[]
+}
+
+/**
+ * - `premise`: the asserted date beats the independent ones only below some tolerance inside or under the
+ *   plausible range: what carries the date is the premise.
+ * - `carried`: it does so over the whole plausible range.
+ * - `missed`: dates fit the line, but the asserted one is not among them.
+ * - `none`: no date in reach fits the line.
+ * - `open`: the asserted date fits, and there is no other date to hold it against: none is given, or all given
+ *   ones overlap it.
+ */
+export type Outcome = 'premise' | 'carried' | 'missed' | 'none' | 'open'
+
+export interface DatedLabel {
+  label: string
+  /** As written in the claim file. */
+  text: string
+  /** As the report prints it. */
+  printed: string
+  from: number
+  to: number
+}
+
+export interface Window {
+  from: number
+  to: number
+  printed: string
+  stated: boolean
+}
+
+export interface Finding {
+  question: string
+  answer: string
+  because: string
+}
+
+/** Something the file leaves out and the engine filled in. */
+export interface Assumption {
+  /** A short name such as `horizon of midsummer`. */
+  what: string
+  /** What the file says: nothing, or `unknown`. */
+  said: 'omitted' | 'unknown'
+  /** What was used, in words. */
+  used: string
+  /** Why this value, and whose it is. */
+  basis: string
+  /** Change of the implied date for the stated change of the assumption; null where it cannot be told. */
+  effect_years: number | null
+  /** What that change is, in words, or why there is no figure. */
+  effect_of: string
+}
+
+export interface Value {
+  value: number
+  sd: number
+}
+
+export interface SightlineAudit {
+  name: string
+  /** The event in words, such as `June solstice sunrise`. */
+  event: string
+  /** The target in words, such as `June solstice sunrise, upper limb on the horizon`. */
+  target: string
+  azimuth_deg: Value
+  /** Apparent altitude of the horizon. */
+  altitude_deg: Value
+  refraction_arcmin: Value
+  /** Semidiameter of the Sun at the middle of the asserted date. */
+  semidiameter_arcmin: Value
+  /** True altitude of the body's centre, geocentric. */
+  centre_altitude_deg: Value
+  /** Geocentric, of the body's centre; sd leaves the build tolerance out. */
+  declination_deg: Value
+  /** The pressure, temperature and humidity the refraction was computed for; null where it was given. */
+  air: { pressure_hpa: number; temperature_c: number; humidity: number; lapse_k_per_km: number } | null
+  /** Distance from backsight to foresight, or null where the line is a bare azimuth. */
+  length_m: number | null
+  /** Azimuth the target would have at the middle of the asserted date, or null where it has none. */
+  azimuth_at_asserted_deg: number | null
+  /** The line less that azimuth, arcminutes along the horizon. */
+  offset_at_asserted_arcmin: number | null
+  /** One standard deviation of that offset, the build tolerance left out. */
+  offset_at_asserted_sd_arcmin: number | null
+  /** Movement of the target along the horizon at the asserted date. */
+  drift: Drift | null
+  /** Days about the event for which the rising or setting stays within 1′ of its extreme azimuth at this latitude. */
+  dwell_days: number | null
+  /** This line's own sweep; null where the claim has one line only. */
+  sweep: Sweep | null
+}
+
+export interface Drift {
+  /** Positive to the right, as one faces the horizon. */
+  arcmin_per_century: number
+  cm_per_century: number
+  /** Sun's widths along the horizon in 1,000 years. */
+  sun_widths_per_millennium: number
+  years_per_arcmin: number
+}
+
+/** What the figures draw: where the target stood. `azimuth_deg` is null in years in which it has none. */
+export interface Track {
+  sightline: string
+  model: string
+  years: readonly number[]
+  azimuth_deg: readonly (number | null)[]
+  /** One standard deviation of the comparison at τ = 0 in each year, arcminutes; null likewise. */
+  sd_arcmin: readonly (number | null)[]
+  /** The measured band: the line's azimuth and its sd. */
+  line_deg: Value
+}
+
+export interface Implied {
+  sightline: string
+  model: string
+  /** Every date in the window and within 10,000 years outside it, ascending. */
+  dates: readonly ImpliedDate[]
+  /** Where no date in the window fits, or none at all: the year in which the target came nearest. */
+  nearest_approach: NearestApproach | null
+}
+
+export interface ImpliedDate {
+  year: number
+  /** The 95 % interval at τ = 0 on this branch; null where it merges with the neighbouring one. */
+  low95: number | null
+  high95: number | null
+  in_window: boolean
+  /** After the year in which the audit was made. */
+  future: boolean
+}
+
+export interface NearestApproach {
+  year: number
+  /** The line less the target's azimuth there, arcminutes; null where the target never reaches the altitude. */
+  offset_arcmin: number | null
+  /** One standard deviation of that offset, the build tolerance left out. */
+  sd_arcmin: number | null
+  sun_widths: number | null
+}
+
+/** One step of the claimant's arithmetic, redone with the printed results of the steps before it. */
+export interface Check {
+  step: string
+  /** As the source prints it. */
+  printed: string
+  printed_value: number
+  ours: number
+  /** As the report prints it. */
+  ours_printed: string
+  /** Ours less theirs, in the unit `unit`. */
+  difference: number
+  difference_printed: string
+  unit: 'arcsec' | 'arcmin' | 'years'
+  /** `rounding`: within half of the last printed digit, and one unit of rounding in the inputs. */
+  verdict: 'reproduces' | 'within uncertainty' | 'differs'
+}
+
+export interface Reproduction {
+  model: string
+  /** As the report prints it, such as `Newcomb 1895`. */
+  label: string
+  /** From the declination the source prints, or from the sightline as recomputed here. */
+  from: 'claimed declination' | 'sightline'
+  sightline: string
+  /** The root nearest the middle of the asserted date. */
+  year: number | null
+  difference_years: number | null
+  within_model_range: boolean | null
+  /** The range the model's authors state, in words. */
+  model_range: string
+  /** Error of the model against the default one at that year, years of date; null where there is none. */
+  model_error_years: number | null
+  /** Where `year` is null: why (not testable, or no root). */
+  reason: string | null
+}
+
+export interface Sweep {
+  window: Window
+  /** Where `tolerance_cm` is measured: the line's length, or 100 m where it is not known or lines differ. */
+  marker: { distance_m: number; measured: boolean }
+  /** Ascending tolerances; those the tables print are marked. */
+  steps: readonly SweepStep[]
+  /** Years of the window in which the target does not reach the altitude at all, as pairs. */
+  no_target: readonly (readonly [number, number])[]
+}
+
+export interface SweepStep {
+  tolerance_arcmin: number
+  /** The same tolerance as a distance at the marker, or at 100 m where the line's length is not known. */
+  tolerance_cm: number
+  tolerance_sun_widths: number
+  in_table: boolean
+  /** Smallest sets of dates that hold 68 % and 95 %. */
+  sets68: readonly (readonly [number, number])[]
+  sets95: readonly (readonly [number, number])[]
+  /** The 95 % set ends at the window's edge, which cuts it. */
+  open_low: boolean
+  open_high: boolean
+  /** Kullback-Leibler divergence from prior to posterior. */
+  bits: number
+  ratios: readonly Ratio[]
+}
+
+/** Averages of the weight over the asserted date and over one independent date. */
+export interface Ratio {
+  against: string
+  /** Null where it overflows or no weight is left on either side. */
+  value: number | null
+  ln: number | null
+  /** In the words of Kass & Raftery 1995, and for which of the two. */
+  words: string
+}
+
+export interface SecondWindow {
+  window: Window
+  half_bit_arcmin: number | null
+  steps: readonly { tolerance_arcmin: number; bits: number; sets95: readonly (readonly [number, number])[] }[]
+}
+
+export interface Limit {
+  /** Label of the independent date; null where the claim names none. */
+  against: string | null
+  ratio_3_arcmin: number | null
+  other_date_in_95_arcmin: number | null
+  half_bit_arcmin: number | null
+  /** The same three as distances at the marker (`tolerance_cm` of the sweep), centimetres. */
+  ratio_3_cm: number | null
+  other_date_in_95_cm: number | null
+  half_bit_cm: number | null
+  /** Why a limit is null. */
+  ratio_3_reason: string | null
+  other_date_in_95_reason: string | null
+  half_bit_reason: string | null
+}
+
+export interface BudgetRow {
+  source: string
+  /** Standard deviation in years of date at the implied date nearest the asserted one. */
+  sd: number
+  /** Share of the variance, 0 to 1. */
+  share: number
+}
+
+/** The linear budget (JCGM 100) held against draws of the same errors (JCGM 101). */
+export interface BudgetCheck {
+  /** The implied date that both are about. */
+  year: number
+  linear_sd: number
+  sampled_sd: number
+  /** Share of the draws for which no date fits the line at all. */
+  no_date_share: number
+  /** Whether the two agree to a tenth, with every draw having a date: the track is straight there. */
+  agree: boolean
+}
+
+/** The claim with one open choice made otherwise. */
+export interface Alternative {
+  sightline: string
+  /** Such as `part of the disc`. */
+  choice: string
+  /** Such as `centre`. */
+  value: string
+  /** The claim's own choice, or the default that stands in for it. */
+  is_claims: boolean
+  years: readonly number[]
+  /** Of `years`, the one nearest the asserted date's middle. */
+  nearest_year: number | null
+}
+
+/** Where the target stands on the day the audit was made. */
+export interface Today {
+  sightline: string
+  year: number
+  azimuth_deg: number | null
+  /** The line less that azimuth. */
+  offset_arcmin: number | null
+  sun_widths: number | null
+  offset_cm: number | null
+}

@@ -1,0 +1,25 @@
+/**
+ * What stands in for the things a claim leaves out. Every one that is used is listed in the report with its effect.
+ * Standard deviations unless said otherwise; all of them are this program's own choices.
+ */
+export const DEFAULTS = {
+  /** Dates thought possible: 20,001 BCE to 2026 CE. */
+  window: { from: -20_000, to: 2026 },
+  plausible: { lowArcmin: 10, highArcmin: 60 },
+  /** Half-width given to a level horizon that nobody measured. */
+  unknownHorizonSdDeg: 0.5,
+  horizonSdDeg: 2 / 60,
+  azimuthSdDeg: 2 / 60,
+  pointSdM: 0.05,
+  /** By how north was found; the compass figure is the best a compass does. */
+  northSdDeg: { compass: 0.5, gps: 1 / 60, sun: 1 / 60, plan: 2 },
+  disc: 'upper limb',
+  elevationM: 0,
+  humidity: 0,
+} as const
+
+/** Years beyond the window in which dates are still looked for, and named as outside it. */
+export const YEARS_BEYOND_WINDOW = 10_000
+
+/** A target within so many standard deviations of the line fits it: 95 % of a normal distribution. */
+export const FITS_WITHIN_SD = 1.96

@@ -1,0 +1,140 @@
+import type { Claim } from '../claim/claim.ts'
+import { isUnstated } from '../quantity/unstated.ts'
+import { listAssumptions } from './assumptions.ts'
+import type { Audit, SightlineAudit, Sweep } from './audit.ts'
+import { auditAlternatives } from './audit-alternatives.ts'
+import { auditBudget, auditBudgetCheck } from './audit-budget.ts'
+import { auditChecks } from './audit-checks.ts'
+import { auditImplied } from './audit-implied.ts'
+import { auditLimits } from './audit-limits.ts'
+import { auditReproduction, modelsToTry } from './audit-reproduction.ts'
+import { auditSightline } from './audit-sightline.ts'
+import { auditSweep, groundOf, sweepStep } from './audit-sweep.ts'
+import { auditToday } from './audit-today.ts'
+import { auditTracks } from './audit-tracks.ts'
+import { nearestYear } from './dated-label.ts'
+import { deepFreeze } from './deep-freeze.ts'
+import { DEFAULTS, YEARS_BEYOND_WINDOW } from './defaults.ts'
+import { outcomeOf } from './outcome.ts'
+import { referencesOf } from './references.ts'
+import { auditSecondWindow } from './second-window.ts'
+import { type SettledClaim, settleClaim, yardstickOf } from './settle-claim.ts'
+import { statedOr } from './settle-sightline.ts'
+import { listWarnings } from './warnings.ts'
+import { writeFindings } from './write-findings.ts'
+import { writeSummary } from './write-summary.ts'
+
+/** What an audit needs besides the claim: where it came from, and the clock. */
+export interface AuditContext {
+  /** Version of the program. */
+  version: string
+  /** Base name of the claim file. */
+  file: string
+  /** SHA-256 of the claim file's bytes, hexadecimal. */
+  sha256: string
+  now: Date
+  /** Warnings of the reader of the claim file. */
+  readingWarnings: readonly string[]
+}
+
+/** Audits a claim: settles its gaps, looks for its dates, sweeps over build tolerances and words the findings. */
+export function makeAudit(claim: Claim, context: AuditContext): Audit {
+  const settled = settleClaim(claim)
+  const { lines, sights, dates, year, plausible, yardstick, wantedArcmin } = settled
+  const { asserted, others, window } = dates
+  const present = context.now.getUTCFullYear()
+  const models = modelsToTry(claim)
+  const ground = groundOf(sights, dates)
+  const sweep = auditSweep(ground, dates, yardstick, wantedArcmin)
+  const limits = auditLimits(ground, dates, yardstick.marker)
+  const sightlines = lines.map((line) => auditSightline(line, year, ownSweep(line, settled)))
+  const implied = lines.flatMap((line) => models.map((model) => auditImplied(line, model, window, present)))
+  const ours = implied.filter(({ model }) => model === 'vondrak2011')
+  const checks = auditChecks(claim.claimed, lines[0]!, sightlines[0]!, models[0]!, year)
+  const reproduction = auditReproduction(claim, lines, window)
+  const outcome = outcomeOf({
+    sights,
+    asserted,
+    window,
+    implied: ours,
+    limits,
+    plausibleHighArcmin: plausible.high_arcmin,
+  })
+  const facts = { outcome, asserted, other_dates: others, plausible, window, sightlines, sweep, limits }
+  const offset = largestOffset(sightlines)
+  const atOffset = offset === null ? null : sweepStep(ground, dates, yardstick, offset)
+  return deepFreeze({
+    datestone: context.version,
+    made_on: context.now.toISOString().slice(0, 10),
+    file: context.file,
+    input_sha256: context.sha256,
+    claim: claim.echo,
+    statement: claim.statement,
+    source: claim.source,
+    structure: structureOf(claim),
+    assumed_precision_arcmin: isUnstated(claim.assumedPrecisionArcmin) ? null : claim.assumedPrecisionArcmin,
+    ...facts,
+    summary: writeSummary({ ...facts, implied: ours, atOffset }),
+    findings: writeFindings({ ...facts, implied: ours, checks, reproduction }),
+    assumptions: listAssumptions(claim, lines, window),
+    tracks: lines.flatMap((line) => tracksOf(line, window)),
+    implied,
+    checks,
+    reproduction,
+    second_window: auditSecondWindow(sights, dates, wantedArcmin),
+    ...budgetOf(settled, ours[0]!.dates),
+    alternatives: lines.flatMap((line) => auditAlternatives(line, window, year)),
+    chance: null,
+    today: lines.map((line) => auditToday(line, present)),
+    warnings: listWarnings(claim, settled, context.readingWarnings),
+    references: referencesOf(claim, models),
+  })
+}
+
+function structureOf({ structure }: Claim): Audit['structure'] {
+  return {
+    name: structure.name,
+    latitude_deg: structure.latitudeDeg,
+    longitude_deg: structure.longitudeDeg,
+    elevation_m: statedOr(structure.elevationM, DEFAULTS.elevationM),
+  }
+}
+
+/** Each of several lines has a sweep of its own besides the joint one. */
+function ownSweep(
+  line: SettledClaim['lines'][number],
+  { lines, sights, dates, year, wantedArcmin }: SettledClaim,
+): Sweep | null {
+  if (lines.length === 1) return null
+  const ground = groundOf([sights[lines.indexOf(line)]!], dates)
+  return auditSweep(ground, dates, yardstickOf(line, year, line.lengthM), wantedArcmin)
+}
+
+function tracksOf(line: SettledClaim['lines'][number], window: { from: number; to: number }) {
+  const from = window.from - YEARS_BEYOND_WINDOW
+  const to = window.to + YEARS_BEYOND_WINDOW
+  return auditTracks(line, ['vondrak2011', 'laskar2004'], from, to)
+}
+
+/** At the implied date nearest the asserted one of the first line; empty where no date fits. */
+function budgetOf(
+  { lines, year, dates: { window } }: SettledClaim,
+  dates: readonly { year: number }[],
+): Pick<Audit, 'budget' | 'budget_check'> {
+  const line = lines[0]!
+  const nearest = nearestYear(
+    dates.map((date) => date.year),
+    year,
+  )
+  if (nearest === null) return { budget: [], budget_check: null }
+  const budget = auditBudget(line, nearest)
+  const span = { from: window.from - YEARS_BEYOND_WINDOW, to: window.to + YEARS_BEYOND_WINDOW }
+  return { budget, budget_check: auditBudgetCheck(line, nearest, budget, span) }
+}
+
+/** Of all lines, how far the target stood from the line at the asserted date; null where one was not to be seen. */
+function largestOffset(sightlines: readonly SightlineAudit[]): number | null {
+  const offsets = sightlines.map((line) => line.offset_at_asserted_arcmin)
+  if (offsets.some((offset) => offset === null)) return null
+  return Math.max(...offsets.map((offset) => Math.abs(offset!)))
+}
