@@ -1,0 +1,77 @@
+import type { AngleKind } from './angle-kind.ts'
+import { misread, trimmedStretch } from './misread.ts'
+import type { MisreadCode } from './misread-codes.ts'
+import { quoted } from './quoted.ts'
+import type { Reading } from './reading.ts'
+
+interface Symptom {
+  pattern: RegExp
+  code: MisreadCode
+  /** What is wrong; follows the quoted text. */
+  complaint: string
+  /** The text as it should be, from the pattern's groups; null where that cannot be guessed. */
+  repair: ((groups: readonly string[], kind: AngleKind) => string) | null
+}
+
+const SYMPTOMS: readonly Symptom[] = [
+  {
+    pattern: /±|\+\s*\/\s*-|\+-|\bwithin\b/i,
+    code: 'unexpected-tolerance',
+    complaint: 'states an uncertainty, which has no place here',
+    repair: null,
+  },
+  {
+    pattern: /^([-–+]?\d+),(\d[^,]*)$/,
+    code: 'decimal-comma',
+    complaint: 'has a comma inside a number',
+    repair: ([whole, fraction]) => `${whole}.${fraction}`,
+  },
+  {
+    pattern: /^([-–+]?(?:\d+(?:\.\d+)?|\.\d+))$/,
+    code: 'unit-missing',
+    complaint: 'is a number without a unit',
+    repair: ([number], { usualUnit }) => `${number}${usualUnit}`,
+  },
+  {
+    pattern: /^([-–+]?\d+)[ :](\d+(?:\.\d+)?)$/,
+    code: 'unit-missing',
+    complaint: 'does not say its units',
+    repair: ([degrees, minutes]) => `${degrees}°${minutes}′`,
+  },
+  {
+    pattern: /^([-–+]?\d+):(\d+):(\d+(?:\.\d+)?)$/,
+    code: 'unit-missing',
+    complaint: 'does not say its units',
+    repair: ([degrees, minutes, seconds]) => `${degrees}°${minutes}′${seconds}″`,
+  },
+  {
+    pattern: /^([-–+]?\d+) ?° ?(\d+(?:\.\d+)?)$/,
+    code: 'unit-missing',
+    complaint: 'lacks the unit of its last part',
+    repair: ([degrees, minutes]) => `${degrees}°${minutes}′`,
+  },
+  {
+    pattern: /^([-–+]?(?:\d+ ?° ?)?\d+) ?′ ?(\d+(?:\.\d+)?)$/,
+    code: 'unit-missing',
+    complaint: 'lacks the unit of its last part',
+    repair: ([before, seconds]) => `${before}′${seconds}″`,
+  },
+]
+
+/** Says why a text is no angle, and where possible what was meant. `plain` is the text in plain characters. */
+export function diagnoseAngle(text: string, plain: string, kind: AngleKind): Reading<never> {
+  const value = plain.trim()
+  const expected = `${kind.name} such as ${kind.example}`
+  for (const { pattern, code, complaint, repair } of SYMPTOMS) {
+    const match = pattern.exec(value)
+    if (match === null) continue
+    const suggestion = repair?.(match.slice(1), kind).replace(/^[-–]/, '−') ?? null
+    return misread(code, `${quoted(text.trim())} ${complaint}`, trimmedStretch(text), {
+      expected,
+      suggestion,
+    })
+  }
+  return misread('not-readable', `${quoted(text.trim())} is not ${kind.name}`, trimmedStretch(text), {
+    expected,
+  })
+}

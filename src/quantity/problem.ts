@@ -1,0 +1,21 @@
+/**
+ * Something wrong with a text that was read, at its place. `error`: what was read cannot be used.
+ * `warning`: doubtful, but used; it is shown in the report as well.
+ */
+export interface Problem {
+  severity: 'error' | 'warning'
+  /** A stable kebab-case name of the kind of problem, such as `tolerance-without-unit`. */
+  code: string
+  /** What is wrong, in one sentence, with the offending value in backticks. */
+  message: string
+  /** What was expected instead, or null. */
+  expected: string | null
+  /** What to write in the place of exactly the marked stretch, or null where it cannot be guessed; `a or b` where two are likely. */
+  suggestion: string | null
+  /** Path of the field, such as `sightlines.midsummer.horizon`, or null outside any field. */
+  path: string | null
+  /** Offset of the first character in the text, in UTF-16 units, from 0. */
+  offset: number
+  /** Length of the marked stretch, in UTF-16 units; at least 1. */
+  length: number
+}
