@@ -1,0 +1,90 @@
+import { isScalar, type Node, type Scalar } from 'yaml'
+import type { Advice, Stretch } from '../../quantity/misread.ts'
+import type { Problem } from '../../quantity/problem.ts'
+import type { ProblemCode } from '../problem-codes.ts'
+
+/** A value of the file with what is needed to point at it. */
+export interface Field {
+  /** The key or name it stands under. */
+  name: string
+  /** Such as `sightlines.midsummer.horizon`; empty for the file itself. */
+  path: string
+  keyAt: Stretch
+  /** Null where nothing follows the key. */
+  node: Node | null
+}
+
+/** The text being read, and where its problems go. */
+export interface Context {
+  text: string
+  /** The line of an offset, from 1. */
+  lineOf: (offset: number) => number
+  report: (problem: Problem) => void
+}
+
+/** Reports an error about a field; `at` is its value unless given. */
+export function reportError(
+  context: Context,
+  field: Field,
+  code: ProblemCode,
+  message: string,
+  advice: Advice & { at?: Stretch } = {},
+): void {
+  context.report(problemOf('error', field, code, message, advice))
+}
+
+/** Reports something doubtful about a field that is used nevertheless. */
+export function reportWarning(
+  context: Context,
+  field: Field,
+  code: ProblemCode,
+  message: string,
+  advice: Advice & { at?: Stretch } = {},
+): void {
+  context.report(problemOf('warning', field, code, message, advice))
+}
+
+/** The place of a field's value, or of its key where it has none. */
+export function valueStretch({ node, keyAt }: Field): Stretch {
+  const [start, end] = node?.range ?? [0, 0]
+  return end > start ? { offset: start, length: end - start } : keyAt
+}
+
+/**
+ * The place of a stretch of a value's text in the file; the whole value where the file writes the text
+ * in another form (folded lines, escapes).
+ */
+export function stretchInValue(field: Field, source: string, value: string, at: Stretch): Stretch {
+  if (!isScalar(field.node)) return valueStretch(field)
+  const start = (field.node.range?.[0] ?? 0) + (isQuoted(field.node) ? 1 : 0)
+  return source.startsWith(value, start) && at.length <= value.length
+    ? { offset: start + at.offset, length: at.length }
+    : valueStretch(field)
+}
+
+/** Tells a key that nothing follows, or null. */
+export function isEmpty({ node }: Field): boolean {
+  return node === null || (isScalar(node) && node.value === null)
+}
+
+/** The field of an entry of a list. */
+export function entryField(list: Field, index: number, node: Node | null): Field {
+  const name = `${list.name}[${index}]`
+  const keyAt = node?.range == null ? list.keyAt : { offset: node.range[0], length: 1 }
+  return { name, path: `${list.path}[${index}]`, keyAt, node }
+}
+
+function isQuoted({ type }: Scalar): boolean {
+  return type === 'QUOTE_DOUBLE' || type === 'QUOTE_SINGLE'
+}
+
+function problemOf(
+  severity: Problem['severity'],
+  field: Field,
+  code: ProblemCode,
+  message: string,
+  { expected = null, suggestion = null, at = valueStretch(field) }: Advice & { at?: Stretch },
+): Problem {
+  const path = field.path === '' ? null : field.path
+  return { severity, code, message, expected, suggestion, path, ...at }
+}

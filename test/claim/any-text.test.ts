@@ -1,0 +1,141 @@
+import fc from 'fast-check'
+import { describe, expect, test } from 'vitest'
+import { formatProblem } from '../../src/claim/format-problem.ts'
+import { newClaim } from '../../src/claim/new-claim.ts'
+import { PROBLEM_CODES } from '../../src/claim/problem-codes.ts'
+import { readClaim } from '../../src/claim/read-claim.ts'
+import { THORNMERE } from './thornmere.ts'
+
+const seed = 20_260_102
+
+/** What has to hold of any text whatever. */
+function expectSound(text: string): void {
+  const { claim, problems } = readClaim(text)
+  expect(claim === null).toBe(problems.some(({ severity }) => severity === 'error'))
+  let last = 0
+  for (const problem of problems) {
+    expect(Object.hasOwn(PROBLEM_CODES, problem.code), problem.code).toBe(true)
+    expect(problem.offset).toBeGreaterThanOrEqual(last)
+    expect(problem.length).toBeGreaterThanOrEqual(1)
+    expect(problem.offset + problem.length).toBeLessThanOrEqual(Math.max(1, text.length))
+    expect(formatProblem(problem, text, 'file')).toContain('^')
+    last = problem.offset
+  }
+  if (claim !== null) expect(numbersIn(claim).every(Number.isFinite)).toBe(true)
+}
+
+function numbersIn(value: unknown): number[] {
+  if (typeof value === 'number') return [value]
+  if (value instanceof Map) return [...value.values()].flatMap(numbersIn)
+  return value === null || typeof value !== 'object' ? [] : Object.values(value).flatMap(numbersIn)
+}
+
+describe('no text makes it throw, and each problem is marked inside the text', () => {
+  test('any characters', () => {
+    const unit = fc.constantFrom('grapheme' as const, 'binary' as const)
+    const texts = unit.chain((kind) => fc.string({ unit: kind, maxLength: 80 }))
+    fc.assert(fc.property(texts, expectSound), { seed, numRuns: 500 })
+  })
+
+  test('pieces of YAML', () => {
+    const pieces = [
+      'claim',
+      'structure',
+      'points',
+      'a',
+      '1',
+      ': ',
+      ':',
+      '- ',
+      '\n',
+      '\n  ',
+      '\t',
+      '{',
+      '}',
+      '[',
+      ']',
+      ',',
+      '"',
+      "'",
+      '|',
+      '>',
+      '#',
+      ' #',
+      '&a',
+      '*a',
+      '!t',
+      '%YAML',
+      '---',
+      '...',
+      '? ',
+      '<<',
+      '~',
+      '\r\n',
+      '\u0000',
+      '\ufffd',
+      '°',
+    ]
+    const texts = fc.array(fc.constantFrom(...pieces), { maxLength: 25 }).map((parts) => parts.join(''))
+    fc.assert(fc.property(texts, expectSound), { seed, numRuns: 1000 })
+  })
+
+  test('a sound claim with a stretch cut out, doubled or replaced', () => {
+    const slips = fc.record({
+      base: fc.constantFrom(THORNMERE, newClaim().replace(/^( *)#(?=[^ \n])/gm, '$1')),
+      at: fc.double({ min: 0, max: 1, noNaN: true }),
+      length: fc.integer({ min: 0, max: 60 }),
+      put: fc.oneof(
+        fc.constantFrom(
+          '',
+          ' ',
+          '\n',
+          ':',
+          ': ',
+          '"',
+          "'",
+          '{',
+          '}',
+          '-',
+          '#',
+          ' #',
+          '[',
+          '\t',
+          '1',
+          '′',
+          '±',
+        ),
+        fc.string({ maxLength: 5 }),
+      ),
+    })
+    const changed = slips.map(({ base, at, length, put }) => {
+      const start = Math.floor(at * base.length)
+      return base.slice(0, start) + put + base.slice(start + length)
+    })
+    fc.assert(fc.property(changed, expectSound), { seed, numRuns: 400 })
+  })
+})
+
+test('any value in the place of a quantity is either read or refused at its key', () => {
+  const lines = THORNMERE.split('\n').flatMap((line, index) =>
+    /^ {0,2}[a-z_]+: \S/.test(line) ? [index] : [],
+  )
+  const value = fc.oneof(
+    fc.string({ unit: 'grapheme', maxLength: 30 }),
+    fc.double().map(String),
+    fc.integer().map(String),
+  )
+  fc.assert(
+    fc.property(fc.constantFrom(...lines), value, (index, text) => {
+      const all = THORNMERE.split('\n')
+      all[index] = all[index]!.replace(/: .*/, () => `: ${JSON.stringify(text)}`)
+      const changed = all.join('\n')
+      expectSound(changed)
+      const start = all.slice(0, index).join('\n').length
+      for (const { offset } of readClaim(changed).problems.filter(
+        ({ code }) => code !== 'date-outside-window',
+      ))
+        expect(offset).toBeGreaterThanOrEqual(start)
+    }),
+    { seed, numRuns: 400 },
+  )
+})

@@ -1,0 +1,47 @@
+import { expect, test } from 'vitest'
+import { CLAIM_SCHEMA, type Schema } from '../../src/claim/claim-schema.ts'
+import { KEYS, type KeyTable } from '../../src/claim/keys.ts'
+
+function propertiesOf(schema: Schema): Readonly<Record<string, Schema>> {
+  return schema.properties as Readonly<Record<string, Schema>>
+}
+
+const file = propertiesOf(CLAIM_SCHEMA)
+const sightline = file.sightlines!.additionalProperties as Schema
+
+/** Each mapping of the schema with the keys the reader takes in its place. */
+const MAPPINGS: readonly [string, Schema, KeyTable][] = [
+  ['the file', CLAIM_SCHEMA, KEYS.file],
+  ['structure', file.structure!, KEYS.structure],
+  ['north', (file.north!.anyOf as Schema[])[1]!, KEYS.north],
+  ['a point', file.points!.additionalProperties as Schema, KEYS.point],
+  ['a sightline', sightline, KEYS.sightline],
+  ['the target', file.target!, KEYS.target],
+  ['the target of a sightline', propertiesOf(sightline).target!, KEYS.target],
+  ['an independent date', file.other_dates!.items as Schema, KEYS.otherDate],
+  ['atmosphere', file.atmosphere!, KEYS.atmosphere],
+  ['claimed', file.claimed!, KEYS.claimed],
+]
+
+test.each(MAPPINGS)('%s has the keys that are read, and the same are required', (_, schema, table) => {
+  const keys = Object.entries(table)
+  const accepted = keys.filter(([, use]) => use !== 'later').map(([key]) => key)
+  const required = keys.filter(([, use]) => use === 'required').map(([key]) => key)
+  expect(Object.keys(propertiesOf(schema)).toSorted()).toEqual(accepted.toSorted())
+  expect((schema.required as string[]).toSorted()).toEqual(required.toSorted())
+  expect(schema.additionalProperties).toBe(false)
+})
+
+test('the mappings above are all there are', () => {
+  expect(new Set(MAPPINGS.map(([, , table]) => table))).toEqual(new Set<KeyTable>(Object.values(KEYS)))
+})
+
+test('every key is explained', () => {
+  for (const [, schema] of MAPPINGS)
+    for (const property of Object.values(propertiesOf(schema))) expect(property.description).toMatch(/\.$/)
+})
+
+test('it is JSON and names its dialect', () => {
+  expect(JSON.parse(JSON.stringify(CLAIM_SCHEMA))).toEqual(CLAIM_SCHEMA)
+  expect(CLAIM_SCHEMA.$schema).toBe('https://json-schema.org/draft/2020-12/schema')
+})

@@ -1,0 +1,42 @@
+import { expect, test } from 'vitest'
+import { KEYS } from '../../src/claim/keys.ts'
+import { newClaim } from '../../src/claim/new-claim.ts'
+import { readClaim } from '../../src/claim/read-claim.ts'
+
+/** The template with every optional key in use, as its first lines tell people to do it. */
+const FULL = newClaim().replace(/^( *)#(?=[^ \n])/gm, '$1')
+
+test('the claim file to fill in is sound as it stands', () => {
+  const { claim, problems } = readClaim(newClaim())
+  expect(problems).toEqual([])
+  expect(claim?.structure.name).toBe('Oskendale round house')
+})
+
+test('with every optional key in use it is sound too, but for the air that a refraction replaces', () => {
+  const { claim, problems } = readClaim(FULL)
+  expect(problems.map(({ path }) => path)).toEqual([
+    'atmosphere.temperature',
+    'atmosphere.pressure',
+    'atmosphere.humidity',
+    'atmosphere.lapse',
+  ])
+  expect(new Set(problems.map(({ code }) => code))).toEqual(new Set(['unused-key']))
+  expect(claim?.points.size).toBe(3)
+  expect(claim?.sightlines).toHaveLength(2)
+})
+
+test('it shows every key that is read', () => {
+  const shown = new Set([...FULL.matchAll(/(?:^ *(?:- )?|[{,] *)([a-z_]+):/gm)].map(([, key]) => key))
+  const read = Object.values(KEYS)
+    .flatMap((table) => Object.entries(table))
+    .filter(([, use]) => use === 'required' || use === 'optional')
+    .map(([key]) => key)
+  expect(read.filter((key) => !shown.has(key))).toEqual([])
+})
+
+test('no line is longer than 110 columns, and none holds a tab', () => {
+  for (const line of newClaim().split('\n')) {
+    expect([...line].length).toBeLessThanOrEqual(110)
+    expect(line).not.toContain('\t')
+  }
+})
