@@ -1,0 +1,33 @@
+import type { Element } from 'hast'
+import type { PhrasingContent } from 'mdast'
+import type { Audit } from '../../audit/audit.ts'
+import { premiseCaption } from '../captions/premise.ts'
+import { trackCaption } from '../captions/track.ts'
+import { premiseFigure } from '../figures/premise-figure.ts'
+import { trackFigure } from '../figures/track-figure.ts'
+import { fileNames } from './file-names.ts'
+
+/** A figure before it has its number. */
+export interface CaptionedDrawing {
+  /** Names its file; letters a to z, digits, hyphens. */
+  name: string
+  drawing: Element
+  alt: string
+  caption: PhrasingContent[]
+}
+
+/** What `::figure{of="…"}` may name; some give one figure for each sightline. To add one, as with parts.ts. */
+export const FIGURES: Readonly<Record<string, (audit: Audit) => CaptionedDrawing[]>> = {
+  premise: (audit) => [{ name: 'premise', ...premiseFigure(audit), caption: premiseCaption(audit) }],
+  track: (audit) => {
+    const names = fileNames(
+      'track',
+      audit.sightlines.map((line) => line.name),
+    )
+    return audit.sightlines.map((line, index) => ({
+      name: names[index]!,
+      ...trackFigure(audit, line.name),
+      caption: trackCaption(audit, line),
+    }))
+  },
+}

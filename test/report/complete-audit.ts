@@ -1,0 +1,198 @@
+import type { Audit, Outcome, Reproduction, SightlineAudit, SweepStep } from '../../src/audit/audit.ts'
+import { carriedAudit, missedAudit, noneAudit, partsAudit, premiseAudit } from './figures/cases.ts'
+import { trackOf } from './figures/make-audit.ts'
+
+const CASES: Readonly<Record<Outcome, () => Audit>> = {
+  premise: premiseAudit,
+  carried: carriedAudit,
+  missed: missedAudit,
+  none: noneAudit,
+  open: partsAudit,
+}
+
+export const OUTCOMES = Object.keys(CASES) as Outcome[]
+
+/**
+ * An audit with something in each of its fields, made by hand: its figures are shapes to be printed, not results.
+ * `changes` replaces whole fields.
+ */
+export function completeAudit(outcome: Outcome = 'premise', changes: Partial<Audit> = {}): Audit {
+  const audit = CASES[outcome]()
+  return {
+    ...audit,
+    source: 'Thornmere visitor leaflet, third printing, page 4',
+    claim: { notes: 'Seen by *N. N.* in a dry summer.' },
+    summary: ['First paragraph of the finding.', 'Second paragraph of the finding.'],
+    findings: [{ question: 'What fits?', answer: 'About 9600 BCE.', because: 'The curve is flat.' }],
+    assumptions: [
+      {
+        what: 'altitude of the horizon',
+        said: 'unknown',
+        used: 'level, 0° ± 30′',
+        basis: 'our choice',
+        effect_years: -1041.3,
+        effect_of: 'a horizon 30′ higher or lower',
+      },
+      {
+        what: 'humidity',
+        said: 'omitted',
+        used: 'dry air',
+        basis: 'our choice',
+        effect_years: 0.2,
+        effect_of: 'air saturated with water',
+      },
+      {
+        what: 'dates thought possible',
+        said: 'omitted',
+        used: '20,001 BCE to 2026 CE',
+        basis: 'our choice',
+        effect_years: null,
+        effect_of: 'moves no date that fits',
+      },
+    ],
+    sightlines: audit.sightlines.map(withDrift),
+    implied: audit.implied.map((implied) => ({
+      ...implied,
+      nearest_approach: implied.nearest_approach && { ...implied.nearest_approach, sd_arcmin: 2.5 },
+    })),
+    checks: [
+      {
+        step: 'declination',
+        printed: '24°12′',
+        printed_value: 24.2,
+        ours: 24.195,
+        ours_printed: '24°11′42″',
+        difference: -18,
+        difference_printed: '−18″',
+        unit: 'arcsec',
+        verdict: 'reproduces',
+      },
+    ],
+    reproduction: [
+      reproduced({ label: 'Newcomb 1895', year: -9001.4, difference_years: 597.6, model_error_years: -98.2 }),
+      reproduced({ label: 'Vondrák 2011', year: -9600, difference_years: 0.2, within_model_range: true }),
+      reproduced({ label: 'Stockwell 1873', reason: 'this program does not have that table' }),
+    ],
+    sweep: { ...audit.sweep, steps: audit.sweep.steps.map((step, index) => tabled(step, index, audit)) },
+    second_window: {
+      window: { from: -12_000, to: 2026, printed: '12,001 BCE to 2026 CE', stated: false },
+      half_bit_arcmin: 12,
+      steps: [{ tolerance_arcmin: 0, bits: 1.12, sets95: [[-12_000, -4000]] }],
+    },
+    budget: [
+      { source: 'altitude of the horizon', sd: 668, share: 0.998 },
+      { source: 'nutation', sd: 0.3, share: 0.002 },
+    ],
+    alternatives: [
+      alternative('upper limb on the horizon', [-9600, 13_900], -9600),
+      alternative('centre on the horizon', [], null),
+    ],
+    today: [
+      {
+        sightline: 'midsummer',
+        year: 2026.4,
+        azimuth_deg: 59,
+        offset_arcmin: -65,
+        sun_widths: 2.1,
+        offset_cm: 190,
+      },
+    ],
+    warnings: ['The formula is used outside its range.'],
+    references: ['vondrak2011', 'laskar2004', 'newcomb1895'],
+    ...changes,
+  }
+}
+
+/** The same claim with a second line, bare of length and with a target that never reaches it. */
+export function severalLinesAudit(outcome: Outcome = 'premise'): Audit {
+  const audit = completeAudit(outcome)
+  const [first] = audit.sightlines
+  const second: SightlineAudit = {
+    ...first!,
+    name: 'midwinter',
+    event: 'December solstice sunset',
+    length_m: null,
+    air: null,
+    drift: null,
+    dwell_days: null,
+    azimuth_at_asserted_deg: null,
+    offset_at_asserted_arcmin: null,
+  }
+  const line = { value: 57.9077, sd: 1 / 60 }
+  return {
+    ...audit,
+    sightlines: [first!, second],
+    tracks: [...audit.tracks, { ...trackOf('vondrak2011', line, 0), sightline: 'midwinter' }],
+    implied: [
+      ...audit.implied,
+      {
+        sightline: 'midwinter',
+        model: 'vondrak2011',
+        dates: [],
+        nearest_approach: { year: -7440, offset_arcmin: null, sd_arcmin: null, sun_widths: null },
+      },
+    ],
+    today: [
+      ...audit.today,
+      { ...audit.today[0]!, sightline: 'midwinter', azimuth_deg: null, offset_arcmin: null },
+    ],
+    reproduction: [
+      ...audit.reproduction,
+      { ...audit.reproduction[0]!, sightline: 'midwinter', from: 'claimed declination' },
+    ],
+  }
+}
+
+function withDrift(line: SightlineAudit): SightlineAudit {
+  return {
+    ...line,
+    air: { pressure_hpa: 938.7, temperature_c: 10.8, humidity: 0.5, lapse_k_per_km: 6.5 },
+    offset_at_asserted_arcmin: -1.8,
+    offset_at_asserted_sd_arcmin: 2.5,
+    drift: {
+      arcmin_per_century: -0.41,
+      cm_per_century: -1.2,
+      sun_widths_per_millennium: 0.14,
+      years_per_arcmin: 24,
+    },
+  }
+}
+
+/** Every tenth step is printed; the ratios run from overflow through a figure to nothing left. */
+function tabled(step: SweepStep, index: number, audit: Audit): SweepStep {
+  const shown = [
+    { value: null, ln: 1167, words: 'very strong, for the asserted date' },
+    { value: 293, ln: 5.68, words: 'very strong, for the asserted date' },
+    { value: 0.35, ln: -1.05, words: 'barely worth a mention, for the other' },
+    { value: null, ln: null, words: 'neither date fits at all' },
+  ]
+  const ratios = audit.other_dates.map(({ label }) => ({ against: label, ...shown[(index / 10) % 4]! }))
+  return { ...step, in_table: index % 10 === 0, ratios: index % 10 === 0 ? ratios : [] }
+}
+
+function reproduced(row: Partial<Reproduction> & { label: string }): Reproduction {
+  return {
+    model: row.label,
+    from: 'sightline',
+    sightline: 'midsummer',
+    year: null,
+    difference_years: null,
+    within_model_range: row.year === undefined ? null : false,
+    model_range: 'within 10,000 years of 2000, as its author states',
+    model_error_years: null,
+    reason: null,
+    ...row,
+  }
+}
+
+function alternative(value: string, years: number[], nearest: number | null) {
+  const is_claims = value.startsWith('upper')
+  return {
+    sightline: 'midsummer',
+    choice: 'part of the disc',
+    value,
+    is_claims,
+    years,
+    nearest_year: nearest,
+  }
+}
