@@ -10,10 +10,10 @@ export function auditBudget(inputs: SightlineInputs, year: number): BudgetRow[] 
   const { perDegree } = refractionAtHorizon(inputs)
   return dateBudget(sightOf(inputs), year, [
     { source: 'direction of the line', of: 'azimuth', sdDeg: inputs.azimuthSdDeg },
-    { source: "the plan's north", of: 'azimuth', sdDeg: inputs.northSdDeg },
+    { source: 'the plan’s north', of: 'azimuth', sdDeg: inputs.northSdDeg },
     { source: 'altitude of the horizon', of: 'altitude', sdDeg: inputs.horizonSdDeg * (1 - perDegree / 60) },
     { source: 'refraction of the day', of: 'altitude', sdDeg: inputs.refractionSdArcmin / 60 },
-    { source: "the Sun's size", of: 'altitude', sdDeg: sunSemidiameter(year, inputs.event).sdArcmin / 60 },
+    { source: 'the Sun’s size', of: 'altitude', sdDeg: sunSemidiameter(year, inputs.event).sdArcmin / 60 },
     { source: 'model of the obliquity', of: 'declination', sdDeg: modelSpreadSdDeg(year) },
     { source: 'nutation', of: 'declination', sdDeg: NUTATION_SD_DEG },
   ]).filter((row) => row.sd > 0)

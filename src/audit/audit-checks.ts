@@ -42,7 +42,7 @@ export function auditChecks(
       0,
     ),
     ...angle(
-      "true altitude of the Sun's centre",
+      'true altitude of the Sun’s centre',
       claimed.altitudeDeg,
       recomputed,
       line.centre_altitude_deg.sd,

@@ -63,8 +63,10 @@ function rowsOf(
   const reference = nearestYear(datesBy('vondrak2011'), near)
   return models.map((model) => {
     const { label, range } = OBLIQUITY_MODELS[model]
-    const year = model === 'vondrak2011' ? reference : nearestYear(datesBy(model), near)
-    const comparable = year !== null && reference !== null && model !== 'vondrak2011'
+    const dates = datesBy(model)
+    const year = nearestYear(dates, near)
+    // On the same branch as the reference, which need not be the one nearest the asserted date.
+    const sameBranch = reference === null || model === 'vondrak2011' ? null : nearestYear(dates, reference)
     return {
       model,
       label,
@@ -74,7 +76,7 @@ function rowsOf(
       difference_years: year === null ? null : year - near,
       within_model_range: year === null ? null : range.from <= year && year <= range.to,
       model_range: range.basis,
-      model_error_years: comparable ? year - reference : null,
+      model_error_years: sameBranch === null ? null : sameBranch - reference!,
       reason: year === null ? 'no year in reach has that declination' : null,
     }
   })

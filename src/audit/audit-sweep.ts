@@ -1,3 +1,4 @@
+import { isReached } from '../inference/comparison.ts'
 import type { Sight } from '../inference/sight.ts'
 import type { Interval } from '../inference/smallest-set.ts'
 import { prepareSweep, type SweepGround, sweepPoint } from '../inference/sweep.ts'
@@ -86,7 +87,7 @@ function unreachedYears({ window }: SweepGround): Interval[] {
   let open = false
   window.comparisons.forEach((comparisons, i) => {
     const year = window.years[i]!
-    const missing = comparisons.some((comparison) => comparison === null)
+    const missing = !comparisons.every(isReached)
     if (missing && open) runs.at(-1)![1] = year
     else if (missing) runs.push([year, year])
     open = missing

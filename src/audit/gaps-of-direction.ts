@@ -60,10 +60,10 @@ function northGap(
   if (north === 'omitted') {
     return [
       {
-        what: "the plan's north",
+        what: 'the plan’s north',
         said: 'omitted',
         used: 'true north, without error',
-        basis: "the claim's own premise: it says nothing of how north was found",
+        basis: 'the claim’s own premise: it says nothing of how north was found',
         change: { words: `${words(compass)}, the best a compass does`, of: turned(compass) },
       },
     ]
@@ -71,7 +71,7 @@ function northGap(
   if (north !== 'unknown' && !isUnstated(north.uncertaintyDeg)) return []
   return [
     {
-      what: "uncertainty of the plan's north",
+      what: 'uncertainty of the plan’s north',
       said: north === 'unknown' ? 'unknown' : (north.uncertaintyDeg as Unstated),
       used: `± ${formatArcmin(sd * 60)}`,
       basis:

@@ -45,7 +45,7 @@ function horizonGaps({ horizonDeg: horizon }: Sightline, inputs: SightlineInputs
   if (!isUnstated(horizon.sd)) return []
   return [
     {
-      what: `uncertainty of the horizon's altitude${of}`,
+      what: `uncertainty of the horizon’s altitude${of}`,
       said: horizon.sd,
       used: `± ${sd}`,
       basis: 'a careful reading with a theodolite or clinometer of a clear skyline; our choice',
@@ -61,7 +61,7 @@ function discGap({ target }: Sightline, inputs: SightlineInputs, of: string): Ga
   const others = PARTS.filter(({ part }) => part !== inputs.disc.part)
   return [
     {
-      what: `part of the Sun's disc on the horizon${of}`,
+      what: `part of the Sun’s disc on the horizon${of}`,
       said: target.disc,
       used: inputs.disc.part,
       basis: 'the first or last gleam, the moment easiest to see; our choice',

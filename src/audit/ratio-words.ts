@@ -6,6 +6,9 @@ const STEPS = [
   { from: 1, words: 'barely worth a mention' },
 ]
 
+/** A factor that prints as 1.0. */
+const EVEN = Math.log(1.05)
+
 /**
  * A Bayes factor in words, and which of the two dates it is for.
  *
@@ -13,7 +16,7 @@ const STEPS = [
  */
 export function ratioWords(ln: number | null, against: string): string {
   if (ln === null) return 'neither date fits at all'
-  if (Math.abs(ln) < 0.005) return 'even'
+  if (Math.abs(ln) < EVEN) return 'even'
   const size = Math.abs(ln)
   const step = STEPS.find(({ from }) => size >= Math.log(from)) ?? STEPS.at(-1)!
   return `${step.words}, for ${ln > 0 ? 'the asserted date' : against}`

@@ -18,7 +18,6 @@ export function listWarnings(
   const { dates, lines } = settled
   return [
     ...readingWarnings,
-    ...[dates.asserted, ...dates.others].flatMap((date) => outside(date, dates.window)),
     ...beyondOrbit(dates.asserted),
     ...beyondFormula(claim, dates.asserted),
     ...lines.flatMap(refractionParts),
@@ -28,16 +27,6 @@ export function listWarnings(
 
 const SEVERAL =
   'Several lines are read together: they share the errors of north and of the obliquity, but each is taken to have been built with an error of its own.'
-
-function outside(
-  { label, printed, from, to }: DatedLabel,
-  window: { from: number; to: number; printed: string },
-) {
-  if (window.from <= from && to <= window.to) return []
-  return [
-    `The ${label === 'asserted date' ? label : `date “${label}”`}, ${printed}, does not lie in the window, ${window.printed}.`,
-  ]
-}
 
 function beyondOrbit({ printed, from, to }: DatedLabel) {
   if (ORBIT_SPAN.from <= from && to <= ORBIT_SPAN.to) return []

@@ -20,14 +20,19 @@ export function discWords(disc: Disc): string {
   return `${disc.part} on the horizon`
 }
 
-/** `12′ (35 cm at 100 m, 0.4 Sun’s widths)`: one angle in the three measures that readers picture. */
+/** `12′ (35 cm at 100 m, 0.38 of the Sun’s width)`: one angle in the three measures that readers picture. */
 export function inThreeMeasures(arcmin: number, cm: number, distanceM: number, sunWidths: number): string {
   const place = `${formatCm(cm)} at ${formatNumber(distanceM, 3)} m`
-  return `${formatArcmin(arcmin)} (${place}, ${formatNumber(sunWidths, 2)} of the Sun’s width)`
+  return `${formatArcmin(arcmin)} (${place}, ${widthsInWords(sunWidths)})`
 }
 
 /** `a`, `a and b`, `a, b and c`. */
 export function listed(items: readonly string[]): string {
   if (items.length < 2) return items.join('')
   return `${items.slice(0, -1).join(', ')} and ${items.at(-1)}`
+}
+
+function widthsInWords(sunWidths: number): string {
+  const figure = formatNumber(sunWidths, 2)
+  return sunWidths < 1.05 ? `${figure} of the Sun’s width` : `${figure} times the Sun’s width`
 }

@@ -7,6 +7,7 @@ import { listed } from './words.ts'
 
 type Facts = Pick<
   Audit,
+  | 'outcome'
   | 'asserted'
   | 'checks'
   | 'implied'
@@ -87,7 +88,7 @@ function dates({ implied }: Facts): Finding {
   }
 }
 
-function exactness({ other_dates, asserted }: Facts, limit: Limit): Finding {
+function exactness({ other_dates, asserted, outcome }: Facts, limit: Limit): Finding {
   const half =
     limit.half_bit_arcmin === null
       ? ''
@@ -111,7 +112,10 @@ function exactness({ other_dates, asserted }: Facts, limit: Limit): Finding {
   return {
     question: `How exactly must they have built for ${asserted.printed} to lead over ${other} by 3 to 1?`,
     answer: `${lead.charAt(0).toUpperCase()}${lead.slice(1)}${inSet}${half}`,
-    because: 'A line built less exactly could have come out as it did at either date.',
+    because:
+      outcome === 'none' || outcome === 'missed'
+        ? 'This compares misses: the line as measured fits not the asserted date, and may fit neither.'
+        : 'A line built less exactly could have come out as it did at either date.',
   }
 }
 

@@ -53,7 +53,7 @@ function marks(facts: SummaryFacts): string {
   }
   const near = implied[0]!.nearest_approach
   const year = near === null ? '' : ` in ${aboutYear(near.year)}`
-  return `Built exactly, the line marks the ${event} of no year of the window, but the survey's own error reaches it${year}, where the Sun's path turns and dates are hard to tell apart.`
+  return `Built exactly, the line marks the ${event} of no year of the window, but the survey’s own error reaches it${year}, where the Sun’s path turns and dates are hard to tell apart.`
 }
 
 function premise(facts: SummaryFacts): string {

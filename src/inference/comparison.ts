@@ -21,6 +21,8 @@ export interface Straight {
 
 export interface Curved {
   kind: 'curved'
+  /** Whether the target reaches the altitude as it is, and not only by some of its likely errors. */
+  reached: boolean
   variance: number
   /** Ascending runs of altitude: probability of each, and the offsets at its two ends, degrees. */
   pieces: readonly { probability: number; fromDeg: number; toDeg: number }[]
@@ -31,6 +33,11 @@ const BEND_ALLOWED = 0.1
 /** The run of altitudes that is integrated over, in standard deviations, and its number of pieces. */
 const REACH_SD = 4
 const PIECES = 64
+
+/** Whether the target reaches the altitude as it is. */
+export function isReached(comparison: Comparison | null): boolean {
+  return comparison !== null && (comparison.kind === 'straight' || comparison.reached)
+}
 
 /** Null where the target does not reach the altitude, by any of its likely errors either. */
 export function compare(sight: Sight, year: number): Comparison | null {
@@ -47,7 +54,12 @@ export function compare(sight: Sight, year: number): Comparison | null {
     const pieces = piecesOver(sight, declination, altitude, reach)
     return pieces.length === 0
       ? null
-      : { kind: 'curved', variance: direction + sight.northSdDeg ** 2, pieces }
+      : {
+          kind: 'curved',
+          reached: crossing !== null,
+          variance: direction + sight.northSdDeg ** 2,
+          pieces,
+        }
   }
   return {
     kind: 'straight',

@@ -12,7 +12,7 @@ export interface SampledDate {
 }
 
 const DRAWS = 2000
-const STEP = 20
+const STEP = 40
 /** Any number does; fixed so that the same claim gives the same audit. */
 const SEED = 20
 

@@ -7,14 +7,37 @@ export type Interval = readonly [from: number, to: number]
  * straight between its nodes, is above the threshold that leaves just that share.
  */
 export function smallestSet(posterior: Posterior, share: number): Interval[] {
+  return intervalsAbove(posterior, thresholdOf(posterior, share))
+}
+
+/** Closeness of the mass to the share at which the search for the threshold ends. */
+const MASS_PRECISION = 1e-9
+
+/** By the Illinois variant of the false position (Dowell & Jarratt 1971): the mass falls as the threshold rises. */
+function thresholdOf(posterior: Posterior, share: number): number {
   let low = 0
   let high = posterior.density.reduce((a, b) => Math.max(a, b), 0)
-  for (let i = 0; i < 40; i++) {
-    const threshold = (low + high) / 2
-    if (massAbove(posterior, threshold) > share) low = threshold
-    else high = threshold
+  let excessLow = massAbove(posterior, low) - share
+  let excessHigh = -share
+  let side = 0
+  for (let i = 0; i < 60; i++) {
+    const threshold = low + ((high - low) * excessLow) / (excessLow - excessHigh)
+    const excess = massAbove(posterior, threshold) - share
+    if (Math.abs(excess) < MASS_PRECISION) return threshold
+    if (excess > 0) {
+      low = threshold
+      excessLow = excess
+      // Twice on one side: lean towards the other, or that end would never move.
+      if (side === 1) excessHigh /= 2
+      side = 1
+    } else {
+      high = threshold
+      excessHigh = excess
+      if (side === -1) excessLow /= 2
+      side = -1
+    }
   }
-  return intervalsAbove(posterior, low)
+  return low
 }
 
 /** Whether a set holds a whole stretch of dates in one of its intervals. */

@@ -1,5 +1,6 @@
 import { OBLIQUITY_MODELS, type ObliquityModelName } from './obliquity-models.ts'
 import { hemisphere, type SolsticeEvent } from './sun.ts'
+import { tabulatedObliquityDeg } from './tabulated-obliquity.ts'
 
 /** Amplitude of the main term of nutation in obliquity, degrees: 9.2″ over 18.6 years (IAU 2000A). */
 const NUTATION_AMPLITUDE_DEG = 9.2 / 3600
@@ -13,7 +14,7 @@ export function solsticeDeclinationDeg(
   event: SolsticeEvent,
   model: ObliquityModelName,
 ): number {
-  return hemisphere(event) * OBLIQUITY_MODELS[model].obliquityDeg(year)
+  return hemisphere(event) * tabulatedObliquityDeg(model, year)
 }
 
 /**
@@ -22,7 +23,7 @@ export function solsticeDeclinationDeg(
  * Where Laskar's table ends, its last distance is used.
  */
 export function modelSpreadSdDeg(year: number): number {
-  const { vondrak2011, laskar2004 } = OBLIQUITY_MODELS
-  const held = Math.min(Math.max(year, laskar2004.computable.from), laskar2004.computable.to)
-  return Math.abs(vondrak2011.obliquityDeg(held) - laskar2004.obliquityDeg(held)) / 2
+  const { from, to } = OBLIQUITY_MODELS.laskar2004.computable
+  const held = Math.min(Math.max(year, from), to)
+  return Math.abs(tabulatedObliquityDeg('vondrak2011', held) - tabulatedObliquityDeg('laskar2004', held)) / 2
 }
