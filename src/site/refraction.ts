@@ -5,6 +5,8 @@ import type { Air } from './air.ts'
 const EARTH_RADIUS_M = 6_378_120
 const TROPOPAUSE_M = 11_000
 const TOP_M = 80_000
+/** Below the lowest ground the index goes on at the gradient it has there: no ray that anybody sees comes so low. */
+const LOWEST_M = -500
 
 /** Molar gas constant per kmol, molar masses of dry air and of water vapour (H&S 1985). */
 const GAS_CONSTANT = 8314.32
@@ -104,12 +106,14 @@ function atmosphere(air: Air, latitudeDeg: number): { troposphere: Index; strato
   const dry = (refractivity * (air.pressureHpa + dryPart)) / temperature
   const wet = (refractivity * dryPart + 11.2684e-6 * vapour) / temperature
   const startRadius = EARTH_RADIUS_M + air.heightM
+  const lowest = EARTH_RADIUS_M + LOWEST_M
   const troposphere: Index = (radius) => {
-    const ratio = 1 - (lapse * (radius - startRadius)) / temperature
+    const ratio = 1 - (lapse * (Math.max(radius, lowest) - startRadius)) / temperature
     const dryTerm = dry * ratio ** (exponent - 1)
     const wetTerm = wet * ratio ** (VAPOUR_EXPONENT - 1)
-    const slope = ((exponent - 1) * dryTerm - (VAPOUR_EXPONENT - 1) * wetTerm) / ratio
-    return [1 + dryTerm - wetTerm, (-lapse / temperature) * slope]
+    const steepness = ((exponent - 1) * dryTerm - (VAPOUR_EXPONENT - 1) * wetTerm) / ratio
+    const slope = (-lapse / temperature) * steepness
+    return [1 + dryTerm - wetTerm + slope * Math.min(0, radius - lowest), slope]
   }
   const tropopause = EARTH_RADIUS_M + TROPOPAUSE_M
   const excess = troposphere(tropopause)[0] - 1

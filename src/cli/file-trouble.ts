@@ -1,0 +1,17 @@
+/** What the commonest system errors mean to a person. */
+const MEANINGS: Readonly<Record<string, string>> = {
+  ENOENT: 'there is no such file or folder',
+  EISDIR: 'it is a folder',
+  ENOTDIR: 'a part of its path is not a folder',
+  EACCES: 'permission is denied',
+  EPERM: 'it is not permitted',
+  EROFS: 'the disk is read-only',
+  ENOSPC: 'the disk is full',
+  EEXIST: 'it exists already, and is left alone',
+}
+
+/** One line for stderr about a file that could not be read or written. */
+export function fileTrouble(error: unknown, deed: 'read' | 'write', path: string): string {
+  const { code, message } = error as NodeJS.ErrnoException
+  return `datestone: cannot ${deed} ${path}: ${(code && MEANINGS[code]) ?? message}\n`
+}

@@ -1,0 +1,223 @@
+import { chmod, mkdir, readFile, symlink, writeFile } from 'node:fs/promises'
+import { join } from 'node:path'
+import { fileURLToPath } from 'node:url'
+import { describe, expect, test } from 'vitest'
+import { claimText } from '../audit/audit-of.ts'
+import { filesIn, newFolder, run } from './run.ts'
+
+const SAMPLE = fileURLToPath(new URL('../../samples/thornmere.yaml', import.meta.url))
+
+async function claimIn(folder: string, text = claimText(), name = 'court.yaml'): Promise<string> {
+  const path = join(folder, name)
+  await writeFile(path, text)
+  return path
+}
+
+describe('the command line', () => {
+  test('--help shows an example and the exit statuses', async () => {
+    const { status, stdout, stderr } = await run('--help')
+    expect(status).toBe(0)
+    expect(stdout).toMatch(/datestone audit court\.yaml --as pdf,md,json --out audits/)
+    expect(stdout).toMatch(/Exit status: 0 done/)
+    expect(stderr).toBe('')
+  })
+
+  test.each([
+    [[], /say what to do/],
+    [['audti', 'a.yaml'], /no command `audti`; did you mean `audit`\?/],
+    [['audit'], /needs a claim file/],
+    [['check'], /needs a claim file/],
+    [['new'], /takes one file/],
+    [['audit', 'a.yaml', '--az', 'pdf'], /no option `--az`; did you mean `--as`\?/],
+    [['audit', 'a.yaml', '--as', 'pdf,docx'], /`docx` is not a format; write pdf, md or json/],
+    [['check', 'a.yaml', '--out', 'x'], /`--out` goes with `audit`/],
+    [['audit', 'a/x.yaml', 'b/x.yaml', '--out', 'o'], /would overwrite/],
+  ])('%j is refused with status 2', async (argv, message) => {
+    const { status, stdout, stderr } = await run(...(argv as string[]))
+    expect(status).toBe(2)
+    expect(stdout).toBe('')
+    expect(stderr).toMatch(message)
+  })
+})
+
+describe('audit', () => {
+  test('writes PDF and Markdown with its figures beside the claim file, and tells their paths', async () => {
+    const folder = await newFolder()
+    const path = await claimIn(folder)
+    const { status, stdout, stderr } = await run('audit', path)
+    expect(stderr).toBe('')
+    expect(status).toBe(0)
+    expect(stdout.trim().split('\n')).toEqual([
+      join(folder, 'court.audit.pdf'),
+      join(folder, 'court.audit.md'),
+    ])
+    expect(await filesIn(folder)).toEqual([
+      'court.audit-premise.svg',
+      'court.audit-track.svg',
+      'court.audit.md',
+      'court.audit.pdf',
+      'court.yaml',
+    ])
+    const markdown = await readFile(join(folder, 'court.audit.md'), 'utf8')
+    expect(markdown).toContain('](court.audit-premise.svg)')
+    expect((await readFile(join(folder, 'court.audit.pdf'))).subarray(0, 5).toString()).toBe('%PDF-')
+  })
+
+  test('--as json --out writes that alone, into a folder it makes', async () => {
+    const folder = await newFolder()
+    const out = join(folder, 'a', 'b')
+    const { status } = await run('audit', SAMPLE, '--as', 'json', '--out', out)
+    expect(status).toBe(0)
+    expect(await filesIn(out)).toEqual(['thornmere.audit.json'])
+    const audit = JSON.parse(await readFile(join(out, 'thornmere.audit.json'), 'utf8'))
+    expect(audit.file).toBe('thornmere.yaml')
+    expect(audit.input_sha256).toMatch(/^[0-9a-f]{64}$/)
+  })
+
+  test('the same file gives the same bytes', async () => {
+    const folder = await newFolder()
+    const path = await claimIn(folder)
+    const formats = ['--as', 'pdf,md,json', '--out']
+    await run('audit', path, ...formats, join(folder, 'one'))
+    await run('audit', path, ...formats, join(folder, 'two'))
+    const names = await filesIn(join(folder, 'one'))
+    expect(names.length).toBeGreaterThan(3)
+    for (const name of names) {
+      expect(
+        (await readFile(join(folder, 'one', name))).equals(await readFile(join(folder, 'two', name))),
+        name,
+      ).toBe(true)
+    }
+  })
+
+  test('a claim with errors writes nothing, and tells each at its line', async () => {
+    const folder = await newFolder()
+    const path = await claimIn(
+      folder,
+      claimText({ asserted_date: '-9600', sightlines: '{one: {azimuth: 50° ± 1}}' }),
+    )
+    const { status, stdout, stderr } = await run('audit', path, '--as', 'pdf,md,json')
+    expect(status).toBe(1)
+    expect(stdout).toBe('')
+    expect(stderr).toContain(`${path}:3:`)
+    expect(stderr).toContain(`${path}:5:16: error: `)
+    expect(await filesIn(folder)).toEqual(['court.yaml'])
+  })
+
+  test('of two claims the sound one is audited, and the status is that of the other', async () => {
+    const folder = await newFolder()
+    const sound = await claimIn(folder)
+    const broken = await claimIn(folder, 'claim: alone\n', 'broken.yaml')
+    const { status, stdout } = await run('audit', broken, sound, '--as', 'json')
+    expect(status).toBe(1)
+    expect(stdout).toBe(`${join(folder, 'court.audit.json')}\n`)
+  })
+
+  test('a file that is not there is status 3', async () => {
+    const { status, stderr } = await run('audit', join(await newFolder(), 'none.yaml'))
+    expect(status).toBe(3)
+    expect(stderr).toMatch(/cannot read .*none\.yaml: there is no such file/)
+  })
+
+  test('a place that cannot be written is status 3, and leaves nothing behind', async () => {
+    const folder = await newFolder()
+    const path = await claimIn(folder)
+    // A folder stands where the PDF belongs, so the renaming fails after all was written.
+    await mkdir(join(folder, 'out', 'court.audit.md'), { recursive: true })
+    const { status, stderr } = await run('audit', path, '--out', join(folder, 'out'), '--as', 'md')
+    expect(status).toBe(3)
+    expect(stderr).toMatch(/cannot write/)
+    expect((await filesIn(join(folder, 'out'))).filter((name) => name.endsWith('.part'))).toEqual([])
+  })
+
+  test('an own template is used; one with errors is told at its line, and nothing is written', async () => {
+    const folder = await newFolder()
+    const path = await claimIn(folder)
+    const template = join(folder, 'short.md')
+    await writeFile(template, '# Short\n\n::part{of="finding"}\n')
+    expect((await run('audit', path, '--as', 'md', '--template', template)).status).toBe(0)
+    expect(await readFile(join(folder, 'court.audit.md'), 'utf8')).toMatch(/^# Short\n/)
+    await writeFile(template, '# Short\n\n::part{of="findnig"}\n')
+    const { status, stderr } = await run(
+      'audit',
+      path,
+      '--as',
+      'md',
+      '--template',
+      template,
+      '--out',
+      join(folder, 'o'),
+    )
+    expect(status).toBe(1)
+    expect(stderr).toContain(`${template}:3:`)
+    expect(stderr).toMatch(/finding/)
+    expect(await filesIn(folder)).not.toContain('o')
+  })
+
+  test('a template that is not there is status 3', async () => {
+    const { status, stderr } = await run('audit', SAMPLE, '--template', 'nowhere.md')
+    expect(status).toBe(3)
+    expect(stderr).toMatch(/cannot read nowhere\.md/)
+  })
+
+  test('bytes that are not UTF-8 are an error with a place', async () => {
+    const folder = await newFolder()
+    const path = join(folder, 'latin.yaml')
+    await writeFile(path, Buffer.from([...Buffer.from('claim: caf'), 0xe9, 0x0a]))
+    const { status, stderr } = await run('check', path)
+    expect(status).toBe(1)
+    expect(stderr).toContain(`${path}:1:11: error: `)
+  })
+
+  test('a byte order mark does no harm', async () => {
+    const folder = await newFolder()
+    expect((await run('check', await claimIn(folder, `\uFEFF${claimText()}`))).status).toBe(0)
+  })
+
+  test('warnings of the claim file go to stderr and into the audit', async () => {
+    const folder = await newFolder()
+    const path = await claimIn(folder, claimText({ asserted_date: '3200 BP' }))
+    const { status, stderr } = await run('audit', path, '--as', 'json')
+    expect(status).toBe(0)
+    expect(stderr).toMatch(/warning: .*BP/)
+    const audit = JSON.parse(await readFile(join(folder, 'court.audit.json'), 'utf8'))
+    expect(audit.warnings.join()).toMatch(/BP/)
+  })
+
+  test('works through a linked folder', async () => {
+    const folder = await newFolder()
+    await mkdir(join(folder, 'real'))
+    await symlink(join(folder, 'real'), join(folder, 'linked'))
+    const path = await claimIn(join(folder, 'linked'))
+    expect((await run('audit', path, '--as', 'json')).status).toBe(0)
+    await chmod(path, 0o644)
+  })
+})
+
+describe('check', () => {
+  test('says so where there is nothing wrong', async () => {
+    const { status, stdout, stderr } = await run('check', SAMPLE)
+    expect({ status, stdout, stderr }).toEqual({ status: 0, stdout: `${SAMPLE}: no errors\n`, stderr: '' })
+  })
+})
+
+describe('new', () => {
+  test('writes a claim file that passes the check, and never over another', async () => {
+    const folder = await newFolder()
+    const path = join(folder, 'mine.yaml')
+    expect((await run('new', path)).status).toBe(0)
+    expect((await run('check', path)).status).toBe(0)
+    await writeFile(path, 'my own words')
+    const again = await run('new', path)
+    expect(again.status).toBe(3)
+    expect(again.stderr).toMatch(/exists already, and is left alone/)
+    expect(await readFile(path, 'utf8')).toBe('my own words')
+  })
+})
+
+describe('the samples', () => {
+  test.each(['thornmere', 'averholt', 'corvane', 'ostrel'])('%s has no problems', async (name) => {
+    const { status, stderr } = await run('check', SAMPLE.replace('thornmere', name))
+    expect({ status, stderr }).toEqual({ status: 0, stderr: '' })
+  })
+})

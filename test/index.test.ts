@@ -1,0 +1,16 @@
+import { expect, test } from 'vitest'
+import * as library from '../src/index.ts'
+
+test('the library exports these and no others', () => {
+  expect(Object.keys(library).sort()).toEqual([
+    'figuresOf',
+    'formatProblem',
+    'makeAudit',
+    'newClaim',
+    'readClaim',
+    'renderTemplate',
+    'runCli',
+    'writeMarkdown',
+    'writePdf',
+  ])
+})
