@@ -87,7 +87,7 @@ function carried(facts: SummaryFacts): string {
   const ends = Math.min(...rivals.map(leadsUpTo))
   const until = Number.isFinite(ends)
     ? `It would cease to at ${threeMeasures(facts, ends)}.`
-    : 'It would at every tolerance up to 5°.'
+    : 'It still would at 5°, the largest tolerance looked at.'
   const at = stepAt(sweep.steps, plausible.high_arcmin)
   return [
     `At all plausible tolerances, ${plausibleWords(plausible)} it favours ${asserted.printed} over ${listed(rivals.map(({ against }) => labelled(others.find(({ label }) => label === against)!)))} by 3 to 1 or more.`,

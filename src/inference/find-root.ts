@@ -5,7 +5,7 @@
 export function findRoot(f: (x: number) => number, from: number, to: number, tolerance: number): number {
   let low = from
   let high = to
-  const rising = f(low) < 0
+  const rising = f(low) < 0 || f(high) > 0
   while (high - low > tolerance) {
     const middle = (low + high) / 2
     if (f(middle) < 0 === rising) low = middle
