@@ -28,6 +28,19 @@ export function perihelionDeg(year: number): number {
   return perihelia(year)
 }
 
+/** Years in which the last tabulated ellipse passes into a circle, of which nothing is known but its size. */
+const TAPER_YEARS = 1000
+
+/** Which share of what is not tabulated a year has: 0 within the table, 1 from 1,000 years beyond it on. */
+export function shareBeyondTable(year: number): number {
+  return Math.min(1, Math.abs(year - heldInTable(year)) / TAPER_YEARS)
+}
+
+/** The year itself within the table, else the table's nearest end. */
+export function heldInTable(year: number): number {
+  return Math.min(Math.max(year, ORBIT_SPAN.from), ORBIT_SPAN.to)
+}
+
 /** The perihelion's longitude grows by some 17° a millennium: add a turn wherever the table falls back. */
 function unwrapped(): [number, number][] {
   let turns = 0

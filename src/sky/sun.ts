@@ -1,5 +1,5 @@
 import { DEG } from '../quantity/degrees.ts'
-import { eccentricity, ORBIT_SPAN, perihelionDeg } from './orbit.ts'
+import { eccentricity, heldInTable, ORBIT_SPAN, perihelionDeg, shareBeyondTable } from './orbit.ts'
 
 /** Semidiameter of the Sun at 1 au, arcminutes: 959.63″ (Auwers 1891, the almanacs' value). */
 export const SEMIDIAMETER_AT_1_AU_ARCMIN = 959.63 / 60
@@ -8,12 +8,18 @@ export const SEMIDIAMETER_AT_1_AU_ARCMIN = 959.63 / 60
 export const SUN_PARALLAX_ARCSEC = 8.794
 
 /** Where no orbit is tabulated: the mean of the semidiameter at the solstices, and how far it strays. */
-const SEMIDIAMETER_BEYOND_TABLE = { arcmin: 15.99, sdArcmin: 0.27 }
+export const SEMIDIAMETER_BEYOND_TABLE = { arcmin: 15.99, sdArcmin: 0.27 }
 
 export type SolsticeEvent = 'june solstice' | 'december solstice'
 
+/**
+ * Days of 86,400 s in which the Sun goes once round from equinox to equinox, in 2000. At other epochs the year
+ * differs by a minute or two, which is 2″ of longitude in half a year.
+ */
+export const TROPICAL_YEAR_DAYS = 365.2422
+
 /** True longitude of the Sun at a solstice, degrees. */
-function longitudeDeg(event: SolsticeEvent): number {
+export function solsticeLongitudeDeg(event: SolsticeEvent): number {
   return event === 'june solstice' ? 90 : 270
 }
 
@@ -34,11 +40,26 @@ export function sunDistanceAu(year: number, longitude: number): number {
 
 /**
  * Semidiameter of the Sun at a solstice, arcminutes, with its standard deviation: zero within the span of the
- * orbit's table, 0.27′ about the mean of 15.99′ beyond it.
+ * orbit's table; beyond it the last value passes in 1,000 years into the mean, 15.99′ ± 0.27′.
  */
 export function sunSemidiameter(year: number, event: SolsticeEvent): { arcmin: number; sdArcmin: number } {
-  if (year < ORBIT_SPAN.from || year > ORBIT_SPAN.to) return SEMIDIAMETER_BEYOND_TABLE
-  return { arcmin: SEMIDIAMETER_AT_1_AU_ARCMIN / sunDistanceAu(year, longitudeDeg(event)), sdArcmin: 0 }
+  return sunSemidiameterAt(year, solsticeLongitudeDeg(event))
+}
+
+/** The same on any day: at a true longitude in degrees. */
+export function sunSemidiameterAt(year: number, longitude: number): { arcmin: number; sdArcmin: number } {
+  const tabulated = SEMIDIAMETER_AT_1_AU_ARCMIN / sunDistanceAu(heldInTable(year), longitude)
+  // A jump where the table ends would be read as a crossing: the last value passes into the mean instead.
+  const share = shareBeyondTable(year)
+  return {
+    arcmin: (1 - share) * tabulated + share * SEMIDIAMETER_BEYOND_TABLE.arcmin,
+    sdArcmin: share * SEMIDIAMETER_BEYOND_TABLE.sdArcmin,
+  }
+}
+
+/** Whether the table of the orbit answers for a Julian epoch. */
+export function isOrbitTabulated(year: number): boolean {
+  return year >= ORBIT_SPAN.from && year <= ORBIT_SPAN.to
 }
 
 /**
@@ -56,13 +77,17 @@ export function solsticeDwellDays(
 ): number {
   const ratio = Math.sin((obliquityDeg - marginDeg) * DEG) / Math.sin(obliquityDeg * DEG)
   const strayDeg = Math.acos(Math.max(-1, ratio)) / DEG
-  return (2 * strayDeg) / sunSpeedDegPerDay(year, event)
+  return (2 * strayDeg) / sunSpeedDegPerDay(year, solsticeLongitudeDeg(event))
 }
 
-/** Motion of the Sun in true longitude, degrees a day. */
-function sunSpeedDegPerDay(year: number, event: SolsticeEvent): number {
-  const mean = 360 / 365.2422
-  if (year < ORBIT_SPAN.from || year > ORBIT_SPAN.to) return mean
+/**
+ * Motion of the Sun in true longitude when it stands at one, degrees a day (Kepler's second law).
+ *
+ * @param year Julian epoch; beyond the orbit's table the mean speed is used.
+ */
+export function sunSpeedDegPerDay(year: number, longitude: number): number {
+  const mean = 360 / TROPICAL_YEAR_DAYS
+  if (!isOrbitTabulated(year)) return mean
   const e = eccentricity(year)
-  return (mean * Math.sqrt(1 - e * e)) / sunDistanceAu(year, longitudeDeg(event)) ** 2
+  return (mean * Math.sqrt(1 - e * e)) / sunDistanceAu(year, longitude) ** 2
 }

@@ -54,10 +54,26 @@ describe('the semidiameter of the Sun', () => {
     expectWithin(sunSemidiameter(2026, 'december solstice').arcmin, 16 + 16 / 60, 0.02, 'arcmin')
   })
 
-  test.each(EVENTS)('beyond the table is 15.99′ ± 0.27′ (%s)', (event) => {
-    for (const year of [-28_001, -30_000, 12_001])
+  test.each(EVENTS)('from 1,000 years beyond the table is 15.99′ ± 0.27′ (%s)', (event) => {
+    for (const year of [-29_000, -29_001, -100_000, 13_000, 20_000])
       expect(sunSemidiameter(year, event)).toEqual({ arcmin: 15.99, sdArcmin: 0.27 })
     for (const year of [-28_000, 12_000]) expect(sunSemidiameter(year, event).sdArcmin).toBe(0)
+  })
+
+  // A jump where the table ends would be read as a crossing of a line that lies between its two sides.
+  test.each(EVENTS)('passes from the table into that mean without a jump (%s)', (event) => {
+    for (const [end, outwards] of [
+      [-28_000, -1],
+      [12_000, 1],
+    ] as const) {
+      const at = (years: number) => sunSemidiameter(end + outwards * years, event)
+      expectWithin(at(1e-6).arcmin, at(0).arcmin, 1e-6, 'arcmin', 'at the end of the table')
+      expectWithin(at(1e-6).sdArcmin, 0, 1e-6, 'arcmin', 'at the end of the table')
+      expectWithin(at(1000 - 1e-6).arcmin, 15.99, 1e-6, 'arcmin', '1,000 years beyond')
+      expectWithin(at(1000 - 1e-6).sdArcmin, 0.27, 1e-6, 'arcmin', '1,000 years beyond')
+      expectWithin(at(500).arcmin, (at(0).arcmin + 15.99) / 2, 1e-9, 'arcmin', 'halfway')
+      expectWithin(at(500).sdArcmin, 0.135, 1e-9, 'arcmin', 'halfway')
+    }
   })
 
   test('has strayed from 15.99′ by 0.27′ at times, and by less in the mean of the table', () => {
