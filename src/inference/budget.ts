@@ -1,13 +1,5 @@
-import { horizonCrossing } from '../site/horizontal.ts'
 import { driftDegPerYear } from './implied-dates.ts'
-import type { Sight } from './sight.ts'
-
-/** One source of error: a standard deviation in degrees, of the line, of the altitude or of the declination. */
-export interface ErrorSource {
-  source: string
-  of: 'azimuth' | 'altitude' | 'declination'
-  sdDeg: number
-}
+import type { Branch, Sight } from './sight.ts'
 
 export interface BudgetShare {
   source: string
@@ -18,25 +10,25 @@ export interface BudgetShare {
 }
 
 /**
- * The linear budget of a date (JCGM 100:2008, section 5): each source times its sensitivity, over the movement of the
- * target. Largest first; empty where the target is level or not reached, where no linear budget exists.
+ * The linear budget of a date (JCGM 100:2008, section 5): the effect of each source of error on the direction, over
+ * the movement of the target. Largest first; empty where the target is level or not to be seen, where no linear
+ * budget exists.
  */
-export function dateBudget(sight: Sight, year: number, sources: readonly ErrorSource[]): BudgetShare[] {
-  const crossing = horizonCrossing(
-    sight.declinationDeg(year),
-    sight.altitudeDeg(year),
-    sight.latitudeDeg,
-    sight.at,
-  )
-  const drift = driftDegPerYear(sight, year)
-  if (crossing === null || drift === null || drift === 0) return []
-  const sensitivity = { azimuth: 1, altitude: crossing.perAltitude, declination: crossing.perDeclination }
-  const rows = sources.map(({ source, of, sdDeg }) => ({
-    source,
-    sd: Math.abs((sensitivity[of] * sdDeg) / drift),
-  }))
+export function dateBudget(sight: Sight, branch: Branch, year: number): BudgetShare[] {
+  const prediction = branch.predict(year)
+  const drift = driftDegPerYear(sight, branch, year)
+  if (prediction === null || drift === null || drift === 0) return []
+  const sources = [
+    {
+      source: sight.measures === 'azimuth' ? 'direction of the line' : 'altitude measured',
+      effectDeg: sight.measuredSdDeg,
+    },
+    { source: 'the plan’s north', effectDeg: sight.northSdDeg },
+    ...prediction.errors,
+  ]
+  const rows = sources
+    .map(({ source, effectDeg }) => ({ source, sd: Math.abs(effectDeg / drift) }))
+    .filter(({ sd }) => sd > 0)
   const variance = rows.reduce((sum, row) => sum + row.sd ** 2, 0)
-  return rows
-    .map((row) => ({ ...row, share: variance === 0 ? 0 : row.sd ** 2 / variance }))
-    .sort((a, b) => b.sd - a.sd)
+  return rows.map((row) => ({ ...row, share: row.sd ** 2 / variance })).sort((a, b) => b.sd - a.sd)
 }

@@ -7,7 +7,8 @@ export interface DateSample {
   years: Float64Array
   /** Trapezoid weights, years. */
   cells: Float64Array
-  comparisons: readonly (readonly (Comparison | null)[])[]
+  /** For each date, each line and each branch of its target. */
+  comparisons: readonly (readonly (readonly (Comparison | null)[])[])[]
 }
 
 /** Samples `[from, to]` at steps of at most `step` years; one date alone where both are equal. */
@@ -23,7 +24,9 @@ export function sampleDates(sights: readonly Sight[], from: number, to: number, 
     cells[0] = width / 2
     cells[intervals] = width / 2
   }
-  const comparisons = Array.from(years, (year) => sights.map((sight) => compare(sight, year)))
+  const comparisons = Array.from(years, (year) =>
+    sights.map((sight) => sight.branches.map((branch) => compare(sight, branch, year))),
+  )
   return { years, cells, comparisons }
 }
 

@@ -2,7 +2,7 @@ import { offsetDeg, offsetSdDeg } from './comparison.ts'
 import { sampleDates } from './date-sample.ts'
 import { findRoot } from './find-root.ts'
 import { posterior } from './posterior.ts'
-import type { Sight } from './sight.ts'
+import type { Branch, Sight } from './sight.ts'
 import { smallestSet } from './smallest-set.ts'
 
 export interface ImpliedDate {
@@ -18,36 +18,58 @@ export interface NearestApproach {
 }
 
 /** Step of the search, years: no target of the Sun turns round and back within it. */
-const STEP = 10
+const STEP = 20
 const YEAR_PRECISION = 1e-4
 /** Two azimuths further apart than this in one step are a jump across north, not a crossing. */
 const JUMP_DEG = 90
 
-/** Every year of a stretch in which the target stands on the line, ascending. */
+/** Every year of a stretch in which a target stands on the line, ascending, over all its branches. */
 export function impliedDates(sight: Sight, from: number, to: number): ImpliedDate[] {
-  const track = sampleTrack(sight, from, to, STEP)
+  return sight.branches
+    .flatMap((branch) => datesOfBranch(sight, branch, from, to))
+    .sort((a, b) => a.year - b.year)
+}
+
+function datesOfBranch(sight: Sight, branch: Branch, from: number, to: number): ImpliedDate[] {
+  const track = sampleTrack(sight, branch, from, to, STEP)
   const turns = turningYears(track, from, to)
-  return crossings(sight, track).map((year) => {
+  return crossings(sight, branch, track).map((year) => {
     const low = turns.findLast((turn) => turn < year) ?? from
     const high = turns.find((turn) => turn > year) ?? to
-    return { year, interval95: intervalOnBranch(sight, year, low, high) }
+    return { year, interval95: intervalOnBranch(sight, branch, year, low, high) }
   })
 }
 
 /** The years alone, looked for in steps of `step` years. */
 export function crossingYears(sight: Sight, from: number, to: number, step: number): number[] {
-  return crossings(sight, sampleTrack(sight, from, to, step))
+  return sight.branches
+    .flatMap((branch) => crossings(sight, branch, sampleTrack(sight, branch, from, to, step)))
+    .sort((a, b) => a - b)
 }
 
-/** The year of a stretch in which the target came nearest to the line. */
+/** The year of a stretch in which a target came nearest to the line. */
 export function nearestApproach(sight: Sight, from: number, to: number): NearestApproach {
-  const reached = sampleTrack(sight, from, to, STEP).filter((point) => point.offset !== null)
+  const reached = sight.branches
+    .flatMap((branch) => sampleTrack(sight, branch, from, to, STEP))
+    .filter((point) => point.offset !== null)
   const nearest = reached.reduce<TrackPoint | null>(
     (best, point) => (best === null || Math.abs(point.offset!) < Math.abs(best.offset!) ? point : best),
     null,
   )
   if (nearest !== null) return { year: nearest.year, offsetDeg: nearest.offset }
-  return { year: (from + to) / 2, offsetDeg: null }
+  return { year: leastShortfall(sight, from, to), offsetDeg: null }
+}
+
+/** Where a target is never to be seen: the year in which it missed its altitude by least. */
+function leastShortfall(sight: Sight, from: number, to: number): number {
+  let best = { year: (from + to) / 2, shortfall: Infinity }
+  for (let year = from; year <= to; year += STEP) {
+    for (const branch of sight.branches) {
+      const shortfall = branch.shortfallDeg?.(year) ?? Infinity
+      if (shortfall < best.shortfall) best = { year, shortfall }
+    }
+  }
+  return best.year
 }
 
 interface TrackPoint {
@@ -55,34 +77,36 @@ interface TrackPoint {
   offset: number | null
 }
 
-function sampleTrack(sight: Sight, from: number, to: number, step: number): TrackPoint[] {
+function sampleTrack(sight: Sight, branch: Branch, from: number, to: number, step: number): TrackPoint[] {
   const steps = Math.max(1, Math.ceil((to - from) / step))
-  const points = Array.from({ length: steps + 1 }, (_, i) => pointOf(sight, from + ((to - from) * i) / steps))
+  const points = Array.from({ length: steps + 1 }, (_, i) =>
+    pointOf(sight, branch, from + ((to - from) * i) / steps),
+  )
   // Close to north or south the azimuth turns fast just before the target ceases to reach the altitude.
   return points.flatMap((point, i) => {
     const before = points[i - 1]
-    const edge = before === undefined ? null : edgeOfReach(sight, before, point)
+    const edge = before === undefined ? null : edgeOfReach(sight, branch, before, point)
     return edge === null ? [point] : [edge, point]
   })
 }
 
-function pointOf(sight: Sight, year: number): TrackPoint {
-  return { year, offset: offsetDeg(sight, year) }
+function pointOf(sight: Sight, branch: Branch, year: number): TrackPoint {
+  return { year, offset: offsetDeg(sight, branch, year) }
 }
 
 /** The outermost reached year between a reached and an unreached one; null where both are alike. */
-function edgeOfReach(sight: Sight, before: TrackPoint, after: TrackPoint): TrackPoint | null {
+function edgeOfReach(sight: Sight, branch: Branch, before: TrackPoint, after: TrackPoint): TrackPoint | null {
   if ((before.offset === null) === (after.offset === null)) return null
   let [reached, missed] = before.offset === null ? [after, before] : [before, after]
   while (Math.abs(reached.year - missed.year) > YEAR_PRECISION) {
-    const middle = pointOf(sight, (reached.year + missed.year) / 2)
+    const middle = pointOf(sight, branch, (reached.year + missed.year) / 2)
     if (middle.offset === null) missed = middle
     else reached = middle
   }
   return reached
 }
 
-function crossings(sight: Sight, track: readonly TrackPoint[]): number[] {
+function crossings(sight: Sight, branch: Branch, track: readonly TrackPoint[]): number[] {
   const years: number[] = []
   for (let i = 1; i < track.length; i++) {
     const before = track[i - 1]!
@@ -92,7 +116,9 @@ function crossings(sight: Sight, track: readonly TrackPoint[]): number[] {
     const crosses = before.offset * after.offset < 0 && Math.abs(before.offset - after.offset) < JUMP_DEG
     // Between two reached years the target is reached: the altitude it needs changes smoothly.
     if (crosses)
-      years.push(findRoot((year) => offsetDeg(sight, year) ?? 0, before.year, after.year, YEAR_PRECISION))
+      years.push(
+        findRoot((year) => offsetDeg(sight, branch, year) ?? 0, before.year, after.year, YEAR_PRECISION),
+      )
   }
   const last = track.at(-1)!
   if (last.offset === 0) years.push(last.year)
@@ -113,14 +139,15 @@ function turningYears(track: readonly TrackPoint[], from: number, to: number): n
 
 function intervalOnBranch(
   sight: Sight,
+  branch: Branch,
   year: number,
   low: number,
   high: number,
 ): readonly [number, number] | null {
-  const sdYears = dateSdYears(sight, year) ?? high - low
+  const sdYears = dateSdYears(sight, branch, year) ?? high - low
   const from = Math.max(low, year - 8 * sdYears)
   const to = Math.min(high, year + 8 * sdYears)
-  const density = posterior(sampleDates([sight], from, to, (to - from) / 800), 0)
+  const density = posterior(sampleDates([{ ...sight, branches: [branch] }], from, to, (to - from) / 800), 0)
   const [interval, ...others] = density === null ? [] : smallestSet(density, 0.95)
   if (interval === undefined || others.length > 0) return null
   const runsIntoTurn = interval[0] <= low || interval[1] >= high
@@ -128,15 +155,15 @@ function intervalOnBranch(
 }
 
 /** Standard deviation of a date at τ = 0 on the straight part of the track, years; null where the track is level. */
-export function dateSdYears(sight: Sight, year: number): number | null {
-  const rate = driftDegPerYear(sight, year)
-  const sd = offsetSdDeg(sight, year)
+export function dateSdYears(sight: Sight, branch: Branch, year: number): number | null {
+  const rate = driftDegPerYear(sight, branch, year)
+  const sd = offsetSdDeg(sight, branch, year)
   return rate === null || sd === null || rate === 0 ? null : sd / Math.abs(rate)
 }
 
 /** Movement of the target's azimuth, degrees a year, over the century about a year; null where it is not reached. */
-export function driftDegPerYear(sight: Sight, year: number): number | null {
-  const before = offsetDeg(sight, year - 50)
-  const after = offsetDeg(sight, year + 50)
+export function driftDegPerYear(sight: Sight, branch: Branch, year: number): number | null {
+  const before = offsetDeg(sight, branch, year - 50)
+  const after = offsetDeg(sight, branch, year + 50)
   return before === null || after === null ? null : (before - after) / 100
 }

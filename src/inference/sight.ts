@@ -1,24 +1,53 @@
 /**
- * One sightline and its target as the inference sees them. Angles in degrees; a year is a Julian epoch.
- * Standard deviations leave the build tolerance out.
+ * One line of a claim and the target it is held against, as the inference sees them. Angles in degrees; a year is a
+ * Julian epoch. Standard deviations leave the build tolerance out.
  */
 export interface Sight {
   name: string
-  latitudeDeg: number
-  at: 'rising' | 'setting'
-  /** Azimuth of the line as built, from true north. */
-  azimuthDeg: number
-  /** Of the direction, this line's alone. */
-  azimuthSdDeg: number
+  /** What the line gives: its azimuth from true north, or an apparent altitude on the meridian. */
+  measures: 'azimuth' | 'altitude'
+  measuredDeg: number
+  /** Names the pair of points it runs between, in either direction: such lines share their build error. */
+  axis: string | null
+  /** Of the measurement, this line's alone. */
+  measuredSdDeg: number
   /** Of the plan's north, an error this line shares with the others of its plan; 0 for a measured azimuth. */
   northSdDeg: number
-  /** Geocentric true altitude of the target's centre when it stands on the line's horizon. */
-  altitudeDeg: (year: number) => number
-  /** Horizon and refraction together. */
-  altitudeSdDeg: (year: number) => number
-  declinationDeg: (year: number) => number
-  /** Of the declination's size: model and nutation, an error shared by every target of the Sun. */
-  declinationSdDeg: (year: number) => number
-  /** Which way a larger obliquity moves the declination. */
-  declinationSign: 1 | -1
+  /** The directions its target may have in one year, all as likely: a date counts as the mean over them. */
+  branches: readonly Branch[]
+}
+
+/** One course of a target through the years. */
+export interface Branch {
+  /** The direction an exact line would have had in a year; null where the target is not to be seen so. */
+  predict: (year: number) => Prediction | null
+  /**
+   * Near the meridian direction does not answer errors in proportion: then the directions over the run of likely
+   * errors. Null where the prediction's errors say enough; empty where the target is out of their reach too.
+   */
+  curve?: (year: number) => readonly CurvePiece[] | null
+  /** By how much the target misses the altitude it is to be seen at, degrees; null where that cannot be told. */
+  shortfallDeg?: (year: number) => number | null
+}
+
+export interface Prediction {
+  directionDeg: number
+  errors: readonly PredictionError[]
+}
+
+/** A source of error of the target's direction. */
+export interface PredictionError {
+  source: string
+  /** What one standard deviation of it does to the direction, degrees, with its sign. */
+  effectDeg: number
+  /** Whether every target whose place rests on the obliquity shares it. */
+  shared: boolean
+}
+
+/** A run of likely errors, in their standard deviations, and the directions at its two ends, straight in between. */
+export interface CurvePiece {
+  fromSd: number
+  toSd: number
+  fromDeg: number
+  toDeg: number
 }

@@ -1,5 +1,5 @@
 import { type DateSample, lnAverageWeight, sampleDates } from './date-sample.ts'
-import { dateSdYears, impliedDates } from './implied-dates.ts'
+import { crossingYears, dateSdYears } from './implied-dates.ts'
 import { bits, posterior } from './posterior.ts'
 import type { Sight } from './sight.ts'
 import { holds, type Interval, smallestSet } from './smallest-set.ts'
@@ -29,8 +29,8 @@ export interface SweepPoint {
 
 /** Coarsest and finest step of the grid of dates, years, and the steps in one standard deviation at τ = 0. */
 const COARSEST = 10
-const FINEST = 0.5
-const STEPS_PER_SD = 6
+const FINEST = 1
+const STEPS_PER_SD = 4
 
 /** Holds the lines against their targets over the window and over each date that the claim names. */
 export function prepareSweep(
@@ -49,10 +49,14 @@ export function prepareSweep(
   }
 }
 
-/** Fine enough to draw the narrowest peak: a sixth of the date's standard deviation at τ = 0. */
+/** Fine enough to draw the narrowest peak: a quarter of the date's standard deviation at τ = 0. */
 function gridStep(sights: readonly Sight[], window: Stretch): number {
   const widths = sights.flatMap((sight) =>
-    impliedDates(sight, window.from, window.to).map(({ year }) => dateSdYears(sight, year) ?? Infinity),
+    sight.branches.flatMap((branch) =>
+      crossingYears({ ...sight, branches: [branch] }, window.from, window.to, COARSEST).map(
+        (year) => dateSdYears(sight, branch, year) ?? Infinity,
+      ),
+    ),
   )
   const narrowest = Math.min(...widths) / Math.sqrt(sights.length)
   const span = (window.to - window.from) / 400

@@ -58,7 +58,7 @@ describe('the average weight', () => {
   })
 
   test('is −∞ where no target is to be seen', () => {
-    const sample = { years: Float64Array.of(0), cells: Float64Array.of(1), comparisons: [[null]] }
+    const sample = { years: Float64Array.of(0), cells: Float64Array.of(1), comparisons: [[[null]]] }
     expect(lnAverageWeight(sample, 0.1)).toBe(-Infinity)
     expect([...lnWeights(sample, 0.1)]).toEqual([-Infinity])
   })

@@ -1,8 +1,8 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { dateBudget } from '../../src/inference/budget.ts'
-import { compare, offsetDeg, offsetSdDeg } from '../../src/inference/comparison.ts'
-import { deviation } from '../../src/inference/fit.ts'
+import { compare, nearestOffset, offsetDeg, offsetSdDeg } from '../../src/inference/comparison.ts'
+import { bestFit } from '../../src/inference/fit.ts'
 import {
   dateSdYears,
   driftDegPerYear,
@@ -11,9 +11,9 @@ import {
 } from '../../src/inference/implied-dates.ts'
 import { halfBitLimit, otherIn95Limit, ratio3Limit } from '../../src/inference/limits.ts'
 import { sampleDate } from '../../src/inference/sampled-date.ts'
-import type { Sight } from '../../src/inference/sight.ts'
 import { prepareSweep, sweepPoint } from '../../src/inference/sweep.ts'
 import { solsticeDeclinationDeg } from '../../src/sky/solstice-declination.ts'
+import { exactBranch, horizonSight } from './sights.ts'
 
 const WINDOW = { from: -12_000, to: 2026 }
 const ASSERTED = { from: -9700, to: -9500 }
@@ -40,19 +40,24 @@ const sights = fc
     declinationSd: fc.constantFrom(0, 0.002, 0.03),
     at: fc.constantFrom('rising' as const, 'setting' as const),
     june: fc.boolean(),
+    isTwofold: fc.boolean(),
+    axis: fc.constantFrom(null, 'a\nb'),
   })
-  .map(
-    ({ altitude, altitudeSd, declinationSd, june, ...rest }): Sight => ({
-      name: 'extreme',
+  .map(({ altitude, altitudeSd, declinationSd, june, isTwofold, axis, ...rest }) => {
+    const sight = horizonSight({
       ...rest,
+      axis,
       altitudeDeg: () => altitude,
       altitudeSdDeg: () => altitudeSd,
       declinationSdDeg: () => declinationSd,
       declinationSign: june ? 1 : -1,
       declinationDeg: (year) =>
         solsticeDeclinationDeg(year, june ? 'june solstice' : 'december solstice', 'vondrak2011'),
-    }),
-  )
+    })
+    // A second branch that is not to be seen before the year 0.
+    const other = exactBranch((year) => (year < 0 ? null : 60 + year / 1000))
+    return isTwofold ? { ...sight, branches: [...sight.branches, other] } : sight
+  })
 
 /** Every number in a result, however deep. */
 function numbersIn(value: unknown): number[] {
@@ -92,20 +97,17 @@ describe('no sight, however extreme, gives a result that is not a number', () =>
         expectNumbers('dates', dates)
         expectNumbers('nearest approach', nearestApproach(sight, WINDOW.from, WINDOW.to))
         for (const year of [ASSERTED.from, 0, ...dates.map((date) => date.year)]) {
-          expectNumbers('comparison', compare(sight, year))
-          expectNumbers('offset', [offsetDeg(sight, year), offsetSdDeg(sight, year)])
-          expectNumbers('drift', [driftDegPerYear(sight, year), dateSdYears(sight, year)])
-          expectNumbers(
-            'budget',
-            dateBudget(sight, year, [
-              { source: 'line', of: 'azimuth', sdDeg: sight.azimuthSdDeg },
-              { source: 'air', of: 'altitude', sdDeg: sight.altitudeSdDeg(year) },
-              { source: 'model', of: 'declination', sdDeg: sight.declinationSdDeg(year) },
-            ]),
-          )
+          expectNumbers('nearest', nearestOffset(sight, year))
+          for (const branch of sight.branches) {
+            expectNumbers('comparison', compare(sight, branch, year))
+            expectNumbers('offset', [offsetDeg(sight, branch, year), offsetSdDeg(sight, branch, year)])
+            expectNumbers('drift', [driftDegPerYear(sight, branch, year), dateSdYears(sight, branch, year)])
+            expectNumbers('budget', dateBudget(sight, branch, year))
+          }
         }
-        expectNumbers('deviation', [deviation(sight, ASSERTED), deviation(sight, { from: 0, to: 0 })])
-        expectNumbers('draws', sampleDate(sight, ASSERTED.from, -10_000, -8000))
+        expectNumbers('fit', [bestFit([sight], ASSERTED), bestFit([sight, sight], { from: 0, to: 0 })])
+        for (const branch of sight.branches)
+          expectNumbers('draws', sampleDate(sight, branch, ASSERTED.from, -10_000, -8000))
       }),
       { seed: 8, numRuns: 25 },
     )

@@ -1,16 +1,28 @@
 import { describe, expect, test } from 'vitest'
-import { targetAzimuthDeg } from '../../src/inference/comparison.ts'
 import {
   crossingYears,
-  dateSdYears,
-  driftDegPerYear,
+  dateSdYears as dateSdOf,
+  driftDegPerYear as driftOf,
   impliedDates,
   nearestApproach,
 } from '../../src/inference/implied-dates.ts'
 import type { Sight } from '../../src/inference/sight.ts'
 import { declinationDeg } from '../../src/site/horizontal.ts'
 import { expectWithin } from '../published/expect-within.ts'
-import { artificialSight, WORKED } from './sights.ts'
+import {
+  artificialLine,
+  artificialSight,
+  branchedSight,
+  directionDeg,
+  exactBranch,
+  type HorizonLine,
+  horizonSight,
+  onlyBranch,
+  WORKED,
+} from './sights.ts'
+
+const dateSdYears = (sight: Sight, year: number) => dateSdOf(sight, onlyBranch(sight), year)
+const driftDegPerYear = (sight: Sight, year: number) => driftOf(sight, onlyBranch(sight), year)
 
 /** 60° in the year 0, and on by 0.001° a year. */
 const straightTrack = (year: number) => 60 + year / 1000
@@ -34,7 +46,7 @@ describe('the dates of a line', () => {
   test('are found once where they fall on a step of the search, and at the ends of the stretch', () => {
     const sight = artificialSight(straightTrack)
     // The very number that the year 0 gives, so that its offset is nothing at all.
-    const exact = { ...sight, azimuthDeg: targetAzimuthDeg(sight, 0)! }
+    const exact = { ...sight, measuredDeg: directionDeg(sight, 0)! }
     const years = (from: number, to: number) => crossingYears(exact, from, to, 10)
     expect(years(-1000, 1000)).toEqual([0])
     expect(years(0, 1000)).toEqual([0])
@@ -62,10 +74,43 @@ describe('the dates of a line', () => {
   })
 })
 
+describe('the dates of a line with several branches', () => {
+  const branches = [
+    exactBranch(straightTrack),
+    exactBranch((year) => 60.5 - year / 500),
+    exactBranch(() => null),
+  ]
+
+  test('are those of all of them, ascending, each with the interval of its own branch', () => {
+    // 60.1° at 100 on the one, 200 on the other; 0.01° are 10 years on the one and 5 on the other.
+    const dates = impliedDates(
+      branchedSight(branches, { measuredDeg: 60.1, measuredSdDeg: 0.01 }),
+      -1000,
+      1000,
+    )
+    expect(dates).toHaveLength(2)
+    for (const [i, [year, sd]] of [
+      [100, 10],
+      [200, 5],
+    ].entries()) {
+      expectWithin(dates[i]!.year, year!, 1e-3, 'years')
+      expectWithin(dates[i]!.interval95![0], year! - 1.96 * sd!, 0.02 * sd!, 'years', `from ${year}`)
+      expectWithin(dates[i]!.interval95![1], year! + 1.96 * sd!, 0.02 * sd!, 'years', `to ${year}`)
+    }
+    expect(crossingYears(branchedSight(branches, { measuredDeg: 60.1 }), -1000, 1000, 10)).toHaveLength(2)
+  })
+
+  test('have the nearest approach of the branch that comes nearest', () => {
+    const { year, offsetDeg } = nearestApproach(branchedSight(branches, { measuredDeg: 66 }), -1000, 1000)
+    expect(year).toBe(-1000)
+    expectWithin(offsetDeg!, 66 - 62.5, 1e-9, 'degrees')
+  })
+})
+
 describe('where the target is not always to be seen', () => {
   /** A body at latitude 66°, moving north until it no longer sets through −0.3°. */
-  const moving: Sight = {
-    ...artificialSight(straightTrack),
+  const moving: HorizonLine = {
+    ...artificialLine(straightTrack),
     latitudeDeg: 66,
     altitudeDeg: () => -0.3,
     declinationDeg: (year) => 23.5 + 1.3e-4 * year,
@@ -76,25 +121,36 @@ describe('where the target is not always to be seen', () => {
   // that year is the last step of the search before the body stays up.
   test.each([20, 5, 1, 0.3, 0.05])('a line %s° from north has its date', (azimuthDeg) => {
     const declination = declinationDeg(azimuthDeg, -0.3, 66)
-    const years = crossingYears({ ...moving, azimuthDeg }, -40_000, 4000, 10)
+    const years = crossingYears(horizonSight({ ...moving, azimuthDeg }), -40_000, 4000, 10)
     expect(years).toHaveLength(1)
     expectWithin(years[0]!, (declination - 23.5) / 1.3e-4, 1e-3, 'years')
   })
 
   test('nothing is found in the years without it', () => {
     for (const azimuthDeg of [5, 180, 359.9])
-      expect(crossingYears({ ...moving, azimuthDeg }, lastYear + 1, 8000, 10)).toEqual([])
+      expect(crossingYears(horizonSight({ ...moving, azimuthDeg }), lastYear + 1, 8000, 10)).toEqual([])
   })
 
   test('the nearest approach is in the last year that has it, or nowhere', () => {
-    const nearest = nearestApproach({ ...moving, azimuthDeg: 359 }, -3000, 4000)
+    const nearest = nearestApproach(horizonSight({ ...moving, azimuthDeg: 359 }), -3000, 4000)
     expectWithin(nearest.year, lastYear, 0.01, 'years')
     // A hundredth of a second of arc from the meridian at the most: the body turns north fast there.
     expectWithin(nearest.offsetDeg!, -1, 0.01, 'degrees')
-    expect(nearestApproach({ ...moving, azimuthDeg: 359 }, 2000, 4000)).toEqual({
-      year: 3000,
-      offsetDeg: null,
+  })
+
+  // The body goes on north: the sooner after its last year, the less it misses the altitude.
+  test('where it is never to be seen the nearest approach is in the year that misses its altitude by least', () => {
+    const sight = horizonSight({ ...moving, azimuthDeg: 359 })
+    expect(nearestApproach(sight, 2000, 4000)).toEqual({ year: 2000, offsetDeg: null })
+    const back = horizonSight({
+      ...moving,
+      azimuthDeg: 359,
+      declinationDeg: (year) => 24 + Math.abs(year - 2570) / 1e4,
     })
+    // Looked for in steps of 20 years.
+    const { year, offsetDeg } = nearestApproach(back, 2000, 4000)
+    expectWithin(year, 2570, 10, 'years')
+    expect(offsetDeg).toBeNull()
   })
 })
 

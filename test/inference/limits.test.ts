@@ -48,7 +48,7 @@ describe('ratio3Limit', () => {
 
   test('against a date without a target is always, of a date without one never', () => {
     const usual = ground(0.001, 0.01, 0, at(1000))
-    const unseen = { years: Float64Array.of(0), cells: Float64Array.of(1), comparisons: [[null]] }
+    const unseen = { years: Float64Array.of(0), cells: Float64Array.of(1), comparisons: [[[null]]] }
     expect(ratio3Limit({ ...usual, others: [unseen] }, 0)).toEqual({ reason: 'always' })
     expect(ratio3Limit({ ...usual, asserted: unseen }, 0)).toEqual({ reason: 'never' })
     expect(ratio3Limit({ ...usual, asserted: unseen, others: [unseen] }, 0)).toEqual({ reason: 'never' })

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest'
 import { bits, posterior } from '../../src/inference/posterior.ts'
 import { expectWithin } from '../published/expect-within.ts'
-import { straightSample } from './sights.ts'
+import { straightAt, straightSample } from './sights.ts'
 
 describe('posterior', () => {
   // Uniform prior, offset of y/1000 degrees and s = 0.1°: normal about the year 0 with a standard deviation of 100.
@@ -30,10 +30,7 @@ describe('posterior', () => {
     const surer = straightSample(0, 1, 1, () => 0, 0.01)
     const sample = {
       ...surer,
-      comparisons: [
-        surer.comparisons[0]!,
-        [{ kind: 'straight', offsetDeg: 0, variance: 0.04, shared: [0, 0] }] as const,
-      ],
+      comparisons: [surer.comparisons[0]!, [[straightAt(0, 0.04)]]],
     }
     const { density } = posterior(sample, 0)!
     expectWithin(density[0]! / density[1]!, 2, 1e-12, '')
@@ -42,11 +39,11 @@ describe('posterior', () => {
   test('is nothing where no date has a target, and leaves such dates out', () => {
     const years = Float64Array.of(0, 1, 2)
     const cells = Float64Array.of(0.5, 1, 0.5)
-    expect(posterior({ years, cells, comparisons: [[null], [null], [null]] }, 0.1)).toBeNull()
-    const seen = { kind: 'straight', offsetDeg: 0.1, variance: 0.01, shared: [0, 0] } as const
-    expect([...posterior({ years, cells, comparisons: [[null], [seen], [null]] }, 0.1)!.density]).toEqual([
-      0, 1, 0,
-    ])
+    expect(posterior({ years, cells, comparisons: [[[null]], [[null]], [[null]]] }, 0.1)).toBeNull()
+    const seen = straightAt(0.1, 0.01)
+    expect([
+      ...posterior({ years, cells, comparisons: [[[null]], [[seen]], [[null]]] }, 0.1)!.density,
+    ]).toEqual([0, 1, 0])
   })
 
   test('keeps its shape where every date is far beyond the reach of a number', () => {

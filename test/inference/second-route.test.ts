@@ -1,12 +1,11 @@
 import { describe, expect, test } from 'vitest'
 import { posterior } from '../../src/inference/posterior.ts'
-import type { Sight } from '../../src/inference/sight.ts'
 import type { Interval } from '../../src/inference/smallest-set.ts'
 import { prepareSweep, sweepPoint } from '../../src/inference/sweep.ts'
 import { DEG } from '../../src/quantity/degrees.ts'
 import { expectWithin } from '../published/expect-within.ts'
 import { seededRandom } from './seeded-random.ts'
-import { WORKED } from './sights.ts'
+import { WORKED, WORKED_LINE } from './sights.ts'
 
 /**
  * The second route to the sets of the sweep (method notes of this project, section 8): dates are drawn from the prior,
@@ -26,7 +25,7 @@ interface Drawn {
 const STEP = 10
 const TRACK = Array.from({ length: (WINDOW.to - WINDOW.from) / STEP + 2 }, (_, i) => {
   const year = WINDOW.from + i * STEP
-  return [WORKED.declinationDeg(year), WORKED.altitudeDeg(year)] as const
+  return [WORKED_LINE.declinationDeg(year), WORKED_LINE.altitudeDeg(year)] as const
 })
 
 /** The direction that a date would have, degrees, when horizon and refraction together are off by an error. */
@@ -36,7 +35,7 @@ function azimuthDeg(year: number, altitudeErrorDeg: number): number {
   const share = place - Math.floor(place)
   const declination = (before[0] + share * (after[0] - before[0])) * DEG
   const altitude = (before[1] + share * (after[1] - before[1]) + altitudeErrorDeg) * DEG
-  const latitude = WORKED.latitudeDeg * DEG
+  const latitude = WORKED_LINE.latitudeDeg * DEG
   const cosine =
     (Math.sin(declination) - Math.sin(latitude) * Math.sin(altitude)) /
     (Math.cos(latitude) * Math.cos(altitude))
@@ -49,9 +48,10 @@ function keepNear(toleranceArcmin: number): Drawn[] {
   const kept: Drawn[] = []
   for (let i = 0; i < DRAWS; i++) {
     const year = WINDOW.from + (WINDOW.to - WINDOW.from) * uniform()
-    const built = azimuthDeg(year, WORKED.altitudeSdDeg(year) * normal()) + (toleranceArcmin / 60) * normal()
-    const measured = built + WORKED.azimuthSdDeg * normal()
-    if (Math.abs(measured - WORKED.azimuthDeg) < NEAR_DEG) kept.push({ year, weight: 1 })
+    const built =
+      azimuthDeg(year, WORKED_LINE.altitudeSdDeg(year) * normal()) + (toleranceArcmin / 60) * normal()
+    const measured = built + WORKED_LINE.azimuthSdDeg * normal()
+    if (Math.abs(measured - WORKED_LINE.azimuthDeg) < NEAR_DEG) kept.push({ year, weight: 1 })
   }
   return kept
 }
@@ -65,7 +65,8 @@ function weighAll(): Drawn[] {
   return Array.from({ length: DRAWS }, () => {
     const year = WINDOW.from + (WINDOW.to - WINDOW.from) * uniform()
     const off =
-      (azimuthDeg(year, WORKED.altitudeSdDeg(year) * normal()) - WORKED.azimuthDeg) / WORKED.azimuthSdDeg
+      (azimuthDeg(year, WORKED_LINE.altitudeSdDeg(year) * normal()) - WORKED_LINE.azimuthDeg) /
+      WORKED_LINE.azimuthSdDeg
     return { year, weight: Math.exp((-off * off) / 2) }
   })
 }
@@ -89,7 +90,7 @@ describe.each([
   { tolerance: 20, half: 300, largest: 60 },
   { tolerance: 30, half: 400, largest: 90 },
 ])('the sets at $tolerance′ by drawing dates', ({ tolerance, half, largest }) => {
-  const ground = prepareSweep([WORKED satisfies Sight], WINDOW, { from: -9700, to: -9500 }, [])
+  const ground = prepareSweep([WORKED], WINDOW, { from: -9700, to: -9500 }, [])
   const { sets95, sets68 } = sweepPoint(ground, tolerance)
   const drawn = tolerance === 0 ? weighAll() : keepNear(tolerance)
   const holds = (sets: readonly Interval[]) => (year: number) =>

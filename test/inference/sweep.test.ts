@@ -1,11 +1,12 @@
 import { describe, expect, test } from 'vitest'
 import { bitsAt, lnRatio, otherIn95, prepareSweep, sweepPoint } from '../../src/inference/sweep.ts'
 import { expectWithin } from '../published/expect-within.ts'
-import { artificialSight, WORKED } from './sights.ts'
+import { artificialLine, branchedSight, exactBranch, horizonSight, WORKED } from './sights.ts'
 
 // The azimuth moves by 0.001° a year and the line is right in the year 0 to 0.06°: dates are normal about it with a
 // standard deviation of 60 years, or of √(60² + τ²) with a tolerance of τ in thousandths of a degree.
-const sight = artificialSight((year) => 60 + year / 1000, { azimuthSdDeg: 0.06 })
+const line = artificialLine((year) => 60 + year / 1000, { azimuthSdDeg: 0.06 })
+const sight = horizonSight(line)
 const ground = prepareSweep([sight], { from: -3000, to: 3000 }, { from: -50, to: 50 }, [
   { from: 200, to: 300 },
   { from: 1000, to: 1000 },
@@ -47,16 +48,64 @@ describe('a step of the sweep on a straight track', () => {
   })
 })
 
+// A grid of a quarter of the standard deviation, straight in between, moves an edge by a hundredth of it.
 describe('the joint step of several lines', () => {
   test('of two alike lines with errors of their own has √2 times less spread', () => {
     const two = prepareSweep([sight, sight], { from: -3000, to: 3000 }, { from: 0, to: 0 }, [])
-    expectWithin(sweepPoint(two, 0).sets95[0]![1], (60 * 1.959964) / Math.SQRT2, 0.2, 'years')
+    expectWithin(sweepPoint(two, 0).sets95[0]![1], (60 * 1.959964) / Math.SQRT2, 0.01 * 42, 'years')
   })
 
   test('of two alike lines with one north gains nothing on north', () => {
-    const shared = { ...sight, azimuthSdDeg: 0.001, northSdDeg: 0.06 }
+    const shared = { ...sight, measuredSdDeg: 0.001, northSdDeg: 0.06 }
     const two = prepareSweep([shared, shared], { from: -3000, to: 3000 }, { from: 0, to: 0 }, [])
-    expectWithin(sweepPoint(two, 0).sets95[0]![1], 60 * 1.959964, 0.2, 'years')
+    expectWithin(sweepPoint(two, 0).sets95[0]![1], 60 * 1.959964, 0.01 * 60, 'years')
+  })
+
+  test('of two alike lines between the same points gains nothing, at any tolerance', () => {
+    const same = horizonSight({ ...line, axis: 'a\nb' })
+    const two = prepareSweep([same, same], { from: -3000, to: 3000 }, { from: 0, to: 0 }, [])
+    for (const tolerance of [0, TOLERANCE, 30]) {
+      const want = sweepPoint(ground, tolerance).sets95[0]![1]
+      // The narrower peak that two such lines might have makes the grid finer.
+      expectWithin(sweepPoint(two, tolerance).sets95[0]![1], want, 0.3, 'years', tolerance)
+    }
+  })
+})
+
+describe('a line whose target has two branches', () => {
+  const branches = [exactBranch((year) => 60 + year / 1000), exactBranch((year) => 62 + year / 1000)]
+  const twofold = branchedSight(branches, { measuredSdDeg: 0.1 })
+  const window = { from: -5000, to: 3000 }
+
+  test('has a set of two parts, each as likely, and is as much surer as one of its dates is', () => {
+    const twice = prepareSweep([twofold], window, { from: 0, to: 0 }, [{ from: -2000, to: -2000 }])
+    const { sets95, bits, lnRatios } = sweepPoint(twice, 0)
+    for (const [i, middle] of [-2000, 0].entries()) {
+      expectWithin(sets95[i]![0], middle - 195.9964, 0.3, 'years')
+      expectWithin(sets95[i]![1], middle + 195.9964, 0.3, 'years')
+    }
+    // Two normal densities of 100 years share the probability: a bit less than one of them.
+    expectWithin(bits, Math.log2(8000 / (200 * Math.sqrt(2 * Math.PI * Math.E))), 1e-4, 'bits')
+    expectWithin(lnRatios[0]!, 0, 1e-9, 'nepers')
+  })
+
+  test('loses nothing but a constant where one branch is not to be seen', () => {
+    const half = branchedSight([branches[0]!, exactBranch(() => null)], { measuredSdDeg: 0.1 })
+    const grounds = [half, branchedSight([branches[0]!], { measuredSdDeg: 0.1 })].map((given) =>
+      prepareSweep([given], window, { from: 0, to: 0 }, [{ from: 300, to: 300 }]),
+    )
+    const [with_, without] = grounds.map((given) => sweepPoint(given, 5))
+    expectWithin(with_!.bits, without!.bits, 1e-9, 'bits')
+    expectWithin(with_!.lnRatios[0]!, without!.lnRatios[0]!, 1e-9, 'nepers')
+  })
+
+  test('is sampled finely enough for the faster of them', () => {
+    const fast = branchedSight([exactBranch(() => 40), exactBranch((year) => 60 + year / 50)], {
+      measuredSdDeg: 0.06,
+    })
+    const { years } = prepareSweep([fast], window, { from: 0, to: 0 }, []).window
+    // A standard deviation of 3 years: the finest step, one year.
+    expectWithin(years[1]! - years[0]!, 1, 1e-9, 'years')
   })
 })
 
@@ -72,16 +121,16 @@ describe('the ground', () => {
   })
 
   test('is fine enough for the narrowest peak', () => {
-    // A standard deviation of 6 years: a sixth of it is one year.
-    const sharp = { ...sight, azimuthSdDeg: 0.006 }
+    // A standard deviation of 6 years: a quarter of it.
+    const sharp = { ...sight, measuredSdDeg: 0.006 }
     const { window } = prepareSweep([sharp], { from: -3000, to: 3000 }, { from: 0, to: 0 }, [])
-    expect(window.years[1]! - window.years[0]!).toBeLessThanOrEqual(1)
-    expect(window.years[1]! - window.years[0]!).toBeGreaterThan(0.4)
+    expect(window.years[1]! - window.years[0]!).toBeLessThanOrEqual(1.5)
+    expect(window.years[1]! - window.years[0]!).toBeGreaterThan(1)
   })
 
   test('does not change a figure by being finer', () => {
     const fine = prepareSweep(
-      [sight, { ...sight, azimuthSdDeg: 0.02, azimuthDeg: 60.01 }],
+      [sight, { ...sight, measuredSdDeg: 0.02, measuredDeg: 60.01 }],
       { from: -3000, to: 3000 },
       { from: 0, to: 10 },
       [],
@@ -102,8 +151,8 @@ describe('the ground', () => {
 })
 
 describe('years without a target', () => {
-  const never = { ...sight, altitudeDeg: () => 80 }
-  const later = { ...sight, altitudeDeg: (year: number) => (year > 0 ? 0 : 80) }
+  const never = horizonSight({ ...line, altitudeDeg: () => 80 })
+  const later = horizonSight({ ...line, altitudeDeg: (year) => (year > 0 ? 0 : 80) })
 
   test('leave nothing to say where there are no others', () => {
     const bare = prepareSweep([never], { from: -3000, to: 3000 }, { from: -50, to: 50 }, [

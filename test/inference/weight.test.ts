@@ -1,14 +1,20 @@
 import { describe, expect, test } from 'vitest'
-import type { Curved, Straight } from '../../src/inference/comparison.ts'
-import { lnWeight } from '../../src/inference/weight.ts'
+import type { Comparison, Curved, Straight } from '../../src/inference/comparison.ts'
+import { lnWeight as lnWeightOf, squaredDeviation } from '../../src/inference/weight.ts'
 import { expectWithin } from '../published/expect-within.ts'
+import { straightAt } from './sights.ts'
 
 const straight = (offsetDeg: number, sd: number, north = 0, obliquity = 0): Straight => ({
-  kind: 'straight',
-  offsetDeg,
-  variance: sd * sd,
+  ...straightAt(offsetDeg, sd * sd),
   shared: [north, obliquity],
 })
+
+/** Of lines whose targets have one branch each. */
+const lnWeight = (lines: readonly (Comparison | null)[], toleranceDeg: number) =>
+  lnWeightOf(
+    lines.map((line) => [line]),
+    toleranceDeg,
+  )
 
 /** The weight of one line in the method notes of this project, section 8: (1/s) exp(−d²/2s²). */
 const lnOfOne = (d: number, s: number) => -Math.log(s) - d ** 2 / (2 * s ** 2)
@@ -90,46 +96,236 @@ describe('the weight of several lines', () => {
 })
 
 describe('the weight of a curved comparison', () => {
-  const pieces = (fromDeg: number, toDeg: number, n: number): Curved => ({
-    kind: 'curved',
-    reached: true,
-    variance: 0.02,
-    pieces: Array.from({ length: n }, (_, i) => ({
-      probability: 1 / n,
-      fromDeg: fromDeg + ((toDeg - fromDeg) * i) / n,
-      toDeg: fromDeg + ((toDeg - fromDeg) * (i + 1)) / n,
-    })),
+  /** Offsets that run straight from one end to the other while the errors run through a stretch of theirs. */
+  const pieces = (fromSd: number, toSd: number, fromDeg: number, toDeg: number, n: number): Curved => {
+    const cut = (from: number, to: number, i: number) => from + ((to - from) * i) / n
+    return {
+      kind: 'curved',
+      reached: true,
+      variance: 0.02,
+      pieces: Array.from({ length: n }, (_, i) => ({
+        fromSd: cut(fromSd, toSd, i),
+        toSd: cut(fromSd, toSd, i + 1),
+        fromDeg: cut(fromDeg, toDeg, i),
+        toDeg: cut(fromDeg, toDeg, i + 1),
+      })),
+    }
+  }
+
+  /** The mean over the errors of (1/s) exp(−d²/2s²), in small steps; the highest term taken out. */
+  function averaged({ pieces: given, variance }: Curved, tolerance: number): number {
+    const s = Math.hypot(Math.sqrt(variance), tolerance)
+    const steps = 200_000
+    const [from, to] = [given[0]!.fromSd, given.at(-1)!.toSd]
+    const logs = Array.from({ length: steps }, (_, i) => {
+      const z = from + ((to - from) * (i + 0.5)) / steps
+      const { fromSd, toSd, fromDeg, toDeg } = given.find((piece) => z <= piece.toSd)!
+      const d = fromDeg + ((toDeg - fromDeg) * (z - fromSd)) / (toSd - fromSd)
+      return -(z * z) / 2 - (d / s) ** 2 / 2
+    })
+    const top = logs.reduce((a, b) => Math.max(a, b), -Infinity)
+    const sum = logs.reduce((total, ln) => total + Math.exp(ln - top), 0)
+    return top + Math.log((sum * (to - from)) / steps / Math.sqrt(2 * Math.PI)) - Math.log(s)
+  }
+
+  // Straight all the way it is the straight weight with the error's effect, here 0.1° for one standard deviation.
+  test.each([1, 7, 500])('that is straight all the way is a straight one, in %s pieces', (n) => {
+    for (const [d, tolerance] of [
+      [0.2, 0],
+      [-0.7, 0.1],
+      [3, 0.02],
+    ] as const) {
+      const got = lnWeight([pieces(-60, 60, d - 6, d + 6, n)], tolerance)
+      const want = lnOfOne(d, Math.hypot(Math.sqrt(0.02), tolerance, 0.1))
+      expectWithin(got, want, 2e-6, 'nepers', `${d}° at ${tolerance}°`)
+    }
   })
 
-  // Offsets spread evenly from a to b with a normal error of s: the mean of (1/s) exp(−d²/2s²) is
-  // √(2π) (Φ(b/s) − Φ(a/s))/(b − a). With s² = 0.02 + 0.02: Φ(2.5) − Φ(−1) = 0.9937903 − 0.1586553 (tables).
-  test.each([1, 7, 5000])('spread evenly over %s pieces is the integral in closed form', (n) => {
-    const want = (Math.sqrt(2 * Math.PI) * (0.9937903 - 0.1586553)) / 0.7
-    const got = Math.exp(lnWeight([pieces(-0.2, 0.5, n)], Math.sqrt(0.02)))
-    expectWithin(got / want, 1, 1e-6, 'of the weight', `${n} pieces`)
+  test('of a bent run is the average over the errors', () => {
+    const [low, high] = [pieces(-3, 0.5, 0.4, 0.1, 3), pieces(0.5, 6, 0.1, -4, 5)]
+    const bent: Curved = { ...low, pieces: [...low.pieces, ...high.pieces] }
+    for (const tolerance of [0, 0.1, 1])
+      expectWithin(lnWeight([bent], tolerance), averaged(bent, tolerance), 1e-6, 'nepers', tolerance)
   })
 
-  test('of pieces without width is the weight of a straight one', () => {
-    const got = lnWeight([pieces(0.3, 0.3, 4)], 0.1)
-    expectWithin(got, lnOfOne(0.3, Math.hypot(Math.sqrt(0.02), 0.1)), 1e-12, 'nepers')
+  // Errors of 8 standard deviations and more, or offsets of hundreds, alone take the target to the line.
+  test.each([
+    { name: 'rare errors', run: pieces(8, 15, 0.3, -0.3, 20) },
+    { name: 'a far line', run: pieces(-15, 15, 25, 8, 64) },
+    { name: 'both', run: pieces(9, 14, 45, 40, 20) },
+  ])('keeps its digits in the far tail: $name', ({ run }) => {
+    for (const tolerance of [0, 0.1, 1]) {
+      const want = averaged(run, tolerance)
+      expectWithin(lnWeight([run], tolerance), want, 1e-3, 'nepers', tolerance)
+    }
+    expect(averaged(run, 0)).toBeLessThan(-30)
   })
 
-  test('of one narrow piece on the line keeps its digits', () => {
-    const got = lnWeight([pieces(-1e-6, 1e-6, 1)], 0.1)
-    expectWithin(got, lnOfOne(0, Math.hypot(Math.sqrt(0.02), 0.1)), 1e-9, 'nepers')
+  test('of a direction that no error moves is the weight of a straight one', () => {
+    const got = lnWeight([pieces(-40, 40, 0.3, 0.3, 4)], 0.1)
+    expectWithin(got, lnOfOne(0.3, Math.hypot(Math.sqrt(0.02), 0.1)), 1e-6, 'nepers')
+  })
+
+  test('of a run that errors seldom reach is less by their probability', () => {
+    // Φ(−1) = 0.1586553 (tables).
+    const got = lnWeight([pieces(1, 40, 0.3, 0.3, 4)], 0.1)
+    const want = lnOfOne(0.3, Math.hypot(Math.sqrt(0.02), 0.1)) + Math.log(0.1586553)
+    expectWithin(got, want, 1e-6, 'nepers')
+  })
+
+  test('of one narrow piece keeps its digits', () => {
+    // The normal density at 1 is 0.2419707 (tables).
+    const got = lnWeight([pieces(1, 1 + 1e-8, -1e-9, 1e-9, 1)], 0.1)
+    const want = lnOfOne(0, Math.hypot(Math.sqrt(0.02), 0.1)) + Math.log(0.2419707e-8)
+    expectWithin(got, want, 1e-6, 'nepers')
   })
 
   test('counts beside a straight line as independent of it', () => {
-    const curved = pieces(-0.2, 0.5, 7)
+    const curved = pieces(-15, 15, -0.2, 0.5, 7)
     const want = lnWeight([curved], 0.1) + lnWeight([straight(0.1, 0.1, 0.2)], 0.1)
     expectWithin(lnWeight([straight(0.1, 0.1, 0.2), curved], 0.1), want, 1e-12, 'nepers')
     expectWithin(lnWeight([curved, straight(0.1, 0.1, 0.2)], 0.1), want, 1e-12, 'nepers')
   })
 
   test('goes on falling where its density is beyond the reach of a number', () => {
-    const at = (offset: number) => lnWeight([pieces(offset, offset + 0.1, 4)], 0)
+    const at = (offset: number) => lnWeight([pieces(-15, 15, offset, offset + 0.1, 4)], 0)
     expect(at(20)).toBeGreaterThan(-Infinity)
     for (const offset of [1, 2, 4, 5, 6, 10]) expect(at(offset + 1)).toBeLessThan(at(offset))
+  })
+})
+
+describe('the weight of a target of several branches', () => {
+  // Method notes of this project, section 8: the mean over the branches of (1/s) exp(−d²/2s²).
+  test('is the mean over them', () => {
+    const [near, far] = [straight(0.1, 0.1), straight(-0.3, 0.2)]
+    for (const tolerance of [0, 0.05, 1]) {
+      const s = [Math.hypot(0.1, tolerance), Math.hypot(0.2, tolerance)]
+      const want = (Math.exp(lnOfOne(0.1, s[0]!)) + Math.exp(lnOfOne(-0.3, s[1]!))) / 2
+      expectWithin(Math.exp(lnWeightOf([[near, far]], tolerance)), want, 1e-12 * want, '', tolerance)
+    }
+  })
+
+  test('of one that is not to be seen is half of the other’s', () => {
+    const want = lnOfOne(0.1, 0.1) - Math.LN2
+    expectWithin(lnWeightOf([[straight(0.1, 0.1), null]], 0), want, 1e-12, 'nepers')
+    expectWithin(lnWeightOf([[null, straight(0.1, 0.1)]], 0), want, 1e-12, 'nepers')
+    expect(lnWeightOf([[null, null]], 0.1)).toBe(-Infinity)
+  })
+
+  test('of two alike is that of one', () => {
+    const line = straight(0.2, 0.1, 0.3, 0.1)
+    expectWithin(lnWeightOf([[line, line]], 0.1), lnWeight([line], 0.1), 1e-12, 'nepers')
+  })
+
+  test('keeps its digits where both are far off', () => {
+    // The nearer has all the weight: exp(−5000) of 0.1° at 10°, against exp(−5100.5) at 10.1°.
+    const got = lnWeightOf([[straight(10, 0.1), straight(10.1, 0.1)]], 0)
+    expectWithin(got, lnOfOne(10, 0.1) - Math.LN2, 1e-9, 'nepers')
+  })
+
+  test('counts beside other lines as independent of them', () => {
+    const branches = [straight(0.1, 0.1, 0.3), straight(-0.3, 0.2, 0.3)]
+    const others = [straight(0.2, 0.1, 0.3), straight(0.25, 0.1, 0.3)]
+    const want = lnWeightOf([branches], 0.1) + lnWeight(others, 0.1)
+    const got = lnWeightOf([[others[0]!], branches, [others[1]!]], 0.1)
+    expectWithin(got, want, 1e-12, 'nepers')
+  })
+})
+
+describe('lines between the same two points', () => {
+  /** All of the line's own error is the survey's; or a part of it is the target's, which the other line has not. */
+  const onAxis = (offsetDeg: number, surveySd: number, targetSd = 0, axis = 'p\nq'): Straight => ({
+    ...straightAt(offsetDeg, surveySd ** 2 + targetSd ** 2),
+    measuredVariance: surveySd ** 2,
+    axis,
+  })
+  /** ln of the ratio of the weights of two years, for which constants cancel. */
+  const lnRatio = (here: readonly Straight[], there: readonly Straight[], tolerance: number) =>
+    lnWeight(here, tolerance) - lnWeight(there, tolerance)
+
+  test('that are alike tell as much as one', () => {
+    for (const tolerance of [0, 0.1, 1]) {
+      const [near, far] = [onAxis(0.1, 0.05), onAxis(0.4, 0.05)]
+      const want = lnRatio([near], [far], tolerance)
+      // Their joint error is regular only by the 0.01″ that no line does without: 1e-4 of a standard deviation.
+      expectWithin(lnRatio([near, near], [far, far], tolerance), want, 1e-3 * want, 'nepers', tolerance)
+    }
+  })
+
+  test('on two axes, or between no points, tell twice as much', () => {
+    const pairs = [
+      [onAxis(0.1, 0.05), onAxis(0.1, 0.05, 0, 'p\nr')],
+      [straight(0.1, 0.05), straight(0.1, 0.05)],
+    ]
+    for (const pair of pairs) {
+      const far = pair.map((line) => ({ ...line, offsetDeg: 0.4 }))
+      const want = 2 * lnRatio([pair[0]!], [far[0]!], 0.1)
+      expectWithin(lnRatio(pair, far, 0.1), want, 1e-9, 'nepers')
+    }
+  })
+
+  // With the survey and the build error in common and the targets' errors their own, the mean of the two offsets has
+  // the variance τ² + s² + t²/2, and their difference 2t².
+  test.each([0, 0.1, 1])('share survey and build error, and not their targets’: τ = %s°', (tolerance) => {
+    const [survey, target] = [0.05, 0.08]
+    const [a, b] = [0.12, 0.21]
+    const mean = tolerance ** 2 + survey ** 2 + target ** 2 / 2
+    const difference = 2 * target ** 2
+    const want =
+      -(Math.log(mean) + Math.log(difference) + ((a + b) / 2) ** 2 / mean + (a - b) ** 2 / difference) / 2
+    const got = lnWeight([onAxis(a, survey, target), onAxis(b, survey, target)], tolerance)
+    expectWithin(got, want, 1e-9, 'nepers')
+  })
+
+  test('at a large tolerance tell no more than one, however well their targets are known', () => {
+    const pair = (offset: number) => [onAxis(offset, 0.05, 0.02), onAxis(offset + 0.01, 0.05, 0.02)]
+    const one = lnRatio([onAxis(0, 0.05, 0.02)], [onAxis(2, 0.05, 0.02)], 2)
+    // A hundredth of a degree more or less of 2°.
+    expectWithin(lnRatio(pair(0), pair(2), 2), one, 0.01, 'nepers')
+  })
+
+  test('of which one stands there twice share all, its target’s errors too', () => {
+    for (const tolerance of [0, 0.1, 1]) {
+      const [near, far] = [onAxis(0.1, 0.05, 0.2), onAxis(0.9, 0.05, 0.2)]
+      const want = lnRatio([near], [far], tolerance)
+      expectWithin(lnRatio([near, near], [far, far], tolerance), want, 1e-3 * want, 'nepers', tolerance)
+      const others = straight(0.3, 0.1)
+      const beside = lnRatio([near, others, near], [far, others, far], tolerance)
+      expectWithin(beside, want, 1e-3 * want, 'nepers', tolerance)
+    }
+  })
+})
+
+describe('the squared deviation', () => {
+  /** dᵀ Σ⁻¹ d of two lines, by the inverse of a 2 × 2 matrix. */
+  function mahalanobis(a: Straight, b: Straight, shared: number): number {
+    const of = ({ variance, shared: [north, obliquity] }: Straight) => variance + north ** 2 + obliquity ** 2
+    const [aa, bb] = [of(a), of(b)]
+    const ab = a.shared[0] * b.shared[0] + a.shared[1] * b.shared[1] + shared
+    const squares = bb * a.offsetDeg ** 2 - 2 * ab * a.offsetDeg * b.offsetDeg + aa * b.offsetDeg ** 2
+    return squares / (aa * bb - ab ** 2)
+  }
+
+  test('of one line is the square of its offset in standard deviations', () => {
+    expectWithin(squaredDeviation([[straight(0.3, 0.06, 0.08)]]), 9, 1e-9, '')
+    expect(squaredDeviation([[null]])).toBe(Infinity)
+    expect(squaredDeviation([[straight(0.3, 0.1)], [null]])).toBe(Infinity)
+  })
+
+  test('of two lines is that of Mahalanobis', () => {
+    const north = [straight(0.4, 0.1, 0.5), straight(0.45, 0.12, 0.5)] as const
+    const opposite = [straight(0.2, 0.1, 0.1, 0.3), straight(-0.25, 0.1, 0, -0.28)] as const
+    for (const [a, b] of [north, opposite])
+      expectWithin(squaredDeviation([[a], [b]]), mahalanobis(a, b, 0), 1e-9, '')
+    const [a, b] = north.map((line) => ({ ...line, axis: 'p\nq', measuredVariance: 0.004 }))
+    expectWithin(squaredDeviation([[a!], [b!]]), mahalanobis(a!, b!, 0.004), 1e-9, '')
+  })
+
+  test('of several branches is that of the nearest, in its own errors', () => {
+    const [wide, narrow] = [straight(0.3, 0.1), straight(0.2, 0.05)]
+    expectWithin(squaredDeviation([[narrow, null, wide]]), 9, 1e-9, '')
+    expectWithin(squaredDeviation([[narrow, wide], [straight(0.1, 0.05)]]), 13, 1e-9, '')
+    expect(squaredDeviation([[null, null]])).toBe(Infinity)
   })
 })
 
