@@ -1,5 +1,10 @@
 import { DISC_PARTS } from './read/read-disc.ts'
 import { MODEL_NAMES } from './read/read-formula.ts'
+import { MOON_MOMENTS, STANDSTILLS } from './read/read-moon-target.ts'
+import { PAIR_EVENT } from './read/read-star-pair-target.ts'
+import { EQUINOX_SENSES, SUN_EVENTS } from './read/read-sun-event.ts'
+import { SUN_MOMENTS } from './read/read-sun-target.ts'
+import { STAR_MOMENTS } from './read/star-moments.ts'
 
 /** A part of a JSON Schema. */
 export type Schema = Readonly<Record<string, unknown>>
@@ -30,20 +35,75 @@ const names = (description: string, entry: Schema): Schema => ({
   additionalProperties: entry,
 })
 
-const target = mapping(
-  'What the line is said to mark: the Sun at a solstice.',
-  {
-    body: word('The body.', ['sun']),
-    event: word('The day of the year.', ['june solstice', 'december solstice']),
-    at: word('Where the body crosses the horizon.', ['rising', 'setting']),
-    disc: {
-      type: 'string',
-      description: 'The part of the disc that stands on the horizon, how much of it shows, or unknown.',
-      examples: [...DISC_PARTS, '2′ showing', 'unknown'],
-    },
-  },
-  ['body', 'event', 'at'],
-)
+const disc: Schema = {
+  type: 'string',
+  description:
+    'The part of the disc that stands on the horizon, or at noon is measured; how much of it shows; or unknown.',
+  examples: [...DISC_PARTS, '2′ showing', 'unknown'],
+}
+
+const star = (description: string): Schema => ({
+  type: 'string',
+  description,
+  not: { enum: ['sun', 'moon'] },
+  examples: ['Sirius', 'alpha CMa', 'HR 2491'],
+})
+
+const target: Schema = {
+  description: 'What the line is said to mark: the Sun on a day of the year, the Moon, a star, or two stars.',
+  anyOf: [
+    mapping(
+      'The Sun on a day of the year; at noon the sightline is an altitude.',
+      {
+        body: word('The Sun.', ['sun']),
+        event: word('The day of the year; or else day.', SUN_EVENTS),
+        day: quantity('Days counted from a solstice, at most 183.', '30 days after june solstice'),
+        sense: word('What is meant by an equinox.', [...EQUINOX_SENSES, 'unknown']),
+        at: word('Where the Sun stands.', SUN_MOMENTS),
+        disc,
+      },
+      ['body', 'at'],
+    ),
+    mapping(
+      'The Moon at a standstill, which comes every 18.6 years.',
+      {
+        body: word('The Moon.', ['moon']),
+        event: word('Which end of its swing, and whether the widest or the narrowest swing.', STANDSTILLS),
+        at: word('Where the Moon crosses the horizon.', MOON_MOMENTS),
+        disc,
+      },
+      ['body', 'event', 'at'],
+    ),
+    mapping(
+      'A star; at a culmination the sightline is an altitude.',
+      {
+        body: star('The star, by name, Bayer letter or HR number.'),
+        at: word('Where the star stands.', STAR_MOMENTS),
+        altitude: quantity(
+          'Apparent altitude at which it was sighted; without it, where it is first visible.',
+          '3° ± 0.5°',
+          'unknown',
+        ),
+      },
+      ['body', 'at'],
+    ),
+    mapping(
+      'Two stars at the same azimuth near north.',
+      {
+        bodies: {
+          type: 'array',
+          description: 'The two stars.',
+          items: star('A star, by name, Bayer letter or HR number.'),
+          minItems: 2,
+          maxItems: 2,
+        },
+        event: word('How they stand.', [PAIR_EVENT]),
+        above: text('The upper one of the two; without it, or unknown, either.'),
+      },
+      ['bodies', 'event'],
+    ),
+  ],
+}
 
 const point = mapping(
   'A point on a local grid.',
@@ -56,13 +116,17 @@ const point = mapping(
   ['east', 'north'],
 )
 
-const sightline = mapping('A line: either from and to, or azimuth.', {
-  from: text('The point one stands at.'),
-  to: text('The point one looks at.'),
-  azimuth: quantity('Measured direction from true north through east.', '49°34′18″ ± 1′'),
-  horizon: quantity('Apparent altitude of the horizon where the line meets it.', '1°30′ ± 2′', 'unknown'),
-  target,
-})
+const sightline = mapping(
+  'A line: either from and to, or azimuth, or, for a target at noon or at a culmination, altitude.',
+  {
+    from: text('The point one stands at.'),
+    to: text('The point one looks at.'),
+    azimuth: quantity('Measured direction from true north through east.', '49°34′18″ ± 1′'),
+    altitude: quantity('Apparent altitude measured on the meridian.', '31°12′ ± 10′'),
+    horizon: quantity('Apparent altitude of the horizon where the line meets it.', '1°30′ ± 2′', 'unknown'),
+    target,
+  },
+)
 
 const atmosphere = mapping('The air, or the refraction that the claim took.', {
   temperature: quantity('Of the air at the place.', '15 °C', 'unknown'),
@@ -75,10 +139,10 @@ const atmosphere = mapping('The air, or the refraction that the claim took.', {
 
 const claimed = mapping('Intermediate results that the source prints; each step is checked apart.', {
   azimuth: quantity('Azimuth of the line.', '49°34′18″'),
-  altitude: quantity('True altitude of the centre of the Sun.', '0°24′'),
+  altitude: quantity('True altitude of the body’s centre.', '0°24′'),
   refraction: quantity('Refraction at the horizon.', '27′20″'),
-  semidiameter: quantity('Half the width of the Sun.', '15′45″'),
-  declination: quantity('Declination of the Sun.', '23°54′30″'),
+  semidiameter: quantity('Half the width of the Sun or the Moon.', '15′45″'),
+  declination: quantity('Declination of the body.', '23°54′30″'),
   obliquity: quantity('Obliquity of the ecliptic.', '23°54′30″'),
 })
 

@@ -53,17 +53,66 @@ export interface LocalPoint {
 
 export interface Sightline {
   name: string
-  direction: { by: 'azimuth'; azimuthDeg: Measured } | { by: 'points'; from: string; to: string }
-  /** Apparent altitude of the horizon where the line meets it, degrees. */
+  direction: Direction
+  /** Apparent altitude of the horizon where the line meets it, degrees; not used where the line is an altitude. */
   horizonDeg: Measured | Unstated
   target: Target
 }
 
-export interface Target {
+/** An azimuth, a line between two points, or, for a target on the meridian, an altitude. */
+export type Direction =
+  | { by: 'azimuth'; azimuthDeg: Measured }
+  | { by: 'points'; from: string; to: string }
+  | { by: 'altitude'; altitudeDeg: Measured }
+
+export type Target = SunTarget | MoonTarget | StarTarget | StarPairTarget
+
+export type Solstice = 'june solstice' | 'december solstice'
+
+/** The Sun on one day of the year. At `noon` the sightline is an altitude. */
+export interface SunTarget {
   body: 'sun'
-  event: 'june solstice' | 'december solstice'
+  event: SunEvent
+  at: 'rising' | 'setting' | 'noon'
+  disc: Disc | Unstated
+}
+
+export type SunEvent =
+  | { name: Solstice }
+  | { name: 'equinox'; sense: EquinoxSense | Unstated }
+  /** So many days after a solstice; negative before it. */
+  | { name: 'day'; days: number; after: Solstice }
+  | { name: 'zenith passage' }
+
+export type EquinoxSense = 'declination zero' | 'midway in days' | 'midway in direction'
+
+export interface MoonTarget {
+  body: 'moon'
+  standstill: { side: 'northern' | 'southern'; size: 'major' | 'minor' }
   at: 'rising' | 'setting'
   disc: Disc | Unstated
+}
+
+/** A star, by its number in the Bright Star Catalogue (HR) and as the claim writes it. */
+export interface StarTarget {
+  body: 'star'
+  star: NamedStar
+  at: 'rising' | 'setting' | 'upper culmination' | 'lower culmination'
+  /** Apparent altitude at which it was sighted; unstated: where it is first visible. Not used at a culmination. */
+  altitudeDeg: Measured | Unstated
+}
+
+/** Two stars one above the other, at the same azimuth near north. */
+export interface StarPairTarget {
+  body: 'two stars'
+  stars: readonly [NamedStar, NamedStar]
+  /** Index in `stars` of the upper one; unstated: either. */
+  above: 0 | 1 | Unstated
+}
+
+export interface NamedStar {
+  hr: number
+  text: string
 }
 
 /** The part of the disc that stands on the horizon; `showing` is how much of it is above. */

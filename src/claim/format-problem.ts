@@ -2,6 +2,7 @@ import pc from 'picocolors'
 import type { Problem } from '../quantity/problem.ts'
 import { visibleControls } from '../quantity/quoted.ts'
 import { cutAround } from './read/cut-around.ts'
+import { withLineFeeds } from './read/line-ends.ts'
 
 /**
  * Prints a problem for a terminal: `file:line:column: error: message`, then the line it stands on, cut to
@@ -35,12 +36,13 @@ export function formatProblem(
 
 /** Line and column of an offset, both from 1; a column is one character (code point), a tab included. */
 export function positionOf(text: string, offset: number): { line: number; column: number } {
-  const before = text.slice(0, offset)
+  const before = withLineFeeds(text).slice(0, offset)
   const inLine = before.slice(before.lastIndexOf('\n') + 1).replace(/^\ufeff/, '')
   return { line: before.split('\n').length, column: [...inLine].length + 1 }
 }
 
-function excerptOf(text: string, { offset, length }: Problem): { shown: string; carets: string } {
+function excerptOf(written: string, { offset, length }: Problem): { shown: string; carets: string } {
+  const text = withLineFeeds(written)
   const start = text.slice(0, offset).lastIndexOf('\n') + 1
   const line = /^[^\n]*/.exec(text.slice(start))?.[0].replace(/\r$/, '') ?? ''
   const from = Math.min(offset - start, line.length)

@@ -1,3 +1,5 @@
+import type { Target } from './claim.ts'
+
 /**
  * What this version does with a key. `later`: the file format has it, this version does not read it, and
  * a claim cannot be audited without it (an error). `unused`: it can be left aside (a warning).
@@ -48,23 +50,24 @@ export const KEYS = {
     from: 'optional',
     to: 'optional',
     azimuth: 'optional',
+    altitude: 'optional',
     horizon: 'optional',
     target: 'optional',
-    altitude: 'later',
     angle: 'later',
     span: 'later',
   },
-  target: {
+  /** Has an event or a day. */
+  sunTarget: {
     body: 'required',
-    event: 'required',
+    event: 'optional',
+    day: 'optional',
+    sense: 'optional',
     at: 'required',
     disc: 'optional',
-    bodies: 'later',
-    above: 'later',
-    sense: 'later',
-    day: 'later',
-    altitude: 'later',
   },
+  moonTarget: { body: 'required', event: 'required', at: 'required', disc: 'optional' },
+  starTarget: { body: 'required', at: 'required', altitude: 'optional' },
+  starPairTarget: { bodies: 'required', event: 'required', above: 'optional' },
   otherDate: { label: 'required', date: 'required' },
   atmosphere: {
     temperature: 'optional',
@@ -95,7 +98,7 @@ export const EXAMPLES: Readonly<Record<string, string>> = {
   from: 'from: compass',
   east: 'east: 84.65 m',
   north: 'north: 53.09 m',
-  body: 'body: sun',
+  body: 'body: sun, body: moon, body: Sirius, or bodies: [Kochab, Mizar]',
   event: 'event: june solstice',
   at: 'at: rising',
   label: 'label: radiocarbon',
@@ -106,5 +109,12 @@ export const EXAMPLES: Readonly<Record<string, string>> = {
 export const INSTEAD: Readonly<Partial<Record<keyof typeof KEYS, string>>> = {
   point: 'points on a local grid in metres: {east: 84.65 m, north: 53.09 m, uncertainty: 5 cm}',
   sightline: 'a line from point to point, {from: …, to: …}, or {azimuth: 49°34′18″ ± 1′}, with its horizon',
-  target: '{body: sun, event: june solstice, at: rising, disc: upper limb}',
 }
+
+/** A target of each kind, as it is written. */
+export const TARGET_EXAMPLES = {
+  sun: '{body: sun, event: june solstice, at: rising, disc: upper limb}',
+  moon: '{body: moon, event: northern major standstill, at: rising}',
+  star: '{body: Sirius, at: rising, altitude: 3° ± 0.5°}',
+  'two stars': '{bodies: [Kochab, Mizar], event: one above the other}',
+} as const satisfies Readonly<Record<Target['body'], string>>

@@ -38,13 +38,30 @@ north: {from: compass, uncertainty: 0.5°}
 
 # The lines said to mark something, each with a name: from one point to another, or as a measured
 # azimuth (from true north through east). "horizon" is the altitude of the skyline there as the
-# eye sees it. A line may have a target of its own.
+# eye sees it.
 sightlines:
   doorway: {from: hearth, to: door-post, horizon: 1°10′ ± 5′}
   #measured: {azimuth: 225°08′ ± 10′, horizon: unknown}
+  # A line may have a target of its own. One example of each kind:
+  # - an equinox; "sense" is declination zero, midway in days, midway in direction, or unknown:
+  #window: {azimuth: 90°40′ ± 10′, target: {body: sun, event: equinox, sense: unknown, at: rising}}
+  # - a day counted from a solstice, after or before it; several make a calendar:
+  #marker: {azimuth: 306° ± 10′, target: {body: sun, day: 30 days after june solstice, at: setting}}
+  # - the Sun at noon, seen through a shaft: an altitude is measured, and there is no horizon:
+  #shaft: {altitude: 11°50′ ± 10′, target: {body: sun, event: december solstice, at: noon}}
+  # - the Moon at a standstill: northern or southern, major or minor:
+  #gap: {azimuth: 145° ± 10′, target: {body: moon, event: southern major standstill, at: rising}}
+  # - a star by its name, Bayer letter (alpha CMa) or number (HR 2491); "altitude" is where it was
+  #   sighted, and without it the star is taken where it is first visible:
+  #notch: {azimuth: 128° ± 10′, target: {body: Sirius, at: rising, altitude: 3° ± 0.5°}}
+  # - a star at its upper or lower culmination: an altitude is measured again:
+  #pipe: {altitude: 49° ± 10′, target: {body: Thuban, at: lower culmination}}
+  # - two stars one above the other; without "above" either may be the upper one:
+  #axis: {azimuth: 1°20′ ± 10′, target: {bodies: [Kochab, Mizar], event: one above the other, above: Mizar}}
 
-# What the line marks. The event is june solstice or december solstice, at rising or setting; "disc"
-# is the part of the Sun that stands on the skyline: upper limb, centre, lower limb, or 2′ showing.
+# What the lines mark that have no target of their own. The event is june solstice, december solstice,
+# equinox or zenith passage, at rising, setting or noon; "disc" is the part of the Sun or Moon that
+# stands on the skyline: upper limb, centre, lower limb, or 2′ showing.
 target: {body: sun, event: december solstice, at: setting, disc: upper limb}
 
 # The date the claim asserts: 1900 BCE ± 100, AD 600, 2500 to 2300 BCE, c. 400 CE, 3200 cal BP,
@@ -90,7 +107,7 @@ asserted_date: 1900 BCE ± 100
 # Build tolerances that the tables must include.
 #tolerances: [5′, 10′, 20′]
 
-# Remarks to print in the report, in Markdown.
+# Remarks to print in the report, in Markdown: paragraphs, emphasis, lists, links, code, quotations.
 #notes: |
   #The plan was drawn in 1987; the door post has since been reset.
 `

@@ -17,24 +17,43 @@ import { readSightlines } from './read/read-sightlines.ts'
 import { readStructure } from './read/read-structure.ts'
 import { readTarget } from './read/read-target.ts'
 import { readNotes, readText } from './read/read-text.ts'
+import type { StarFinder } from './star-finder.ts'
 
 const MOST_PROBLEMS = 100
+/** What is wrong with keys is so whatever their values are. */
+const OF_KEYS: ReadonlySet<string> = new Set(['unknown-key', 'duplicate-key', 'missing-key'])
 
 type FileFields = Fields<keyof typeof KEYS.file>
+
+/** What reading a claim needs to know of the sky. */
+export interface ReadingHelp {
+  findStar: StarFinder
+}
 
 /**
  * Reads a claim file. All problems of the file come at once, in the order of the text; the claim is null
  * exactly where one of them is an error. Never throws.
  */
-export function readClaim(text: string): { claim: Claim | null; problems: Problem[] } {
+export function readClaim(
+  text: string,
+  { findStar }: ReadingHelp,
+): { claim: Claim | null; problems: Problem[] } {
   const yaml = parseYaml(text)
   const problems = [...yaml.problems]
   const content: Problem[] = []
-  const context: Context = { text, lineOf: yaml.lineOf, report: (problem) => content.push(problem) }
+  const context: Context = {
+    text,
+    findStar,
+    lineOf: yaml.lineOf,
+    report: (problem) => content.push(problem),
+  }
   const claim = readRoot(yaml.root, context, problems.length > 0)
   // Behind a break of syntax keys may have been taken for others, and some for missing.
   const isSound = ({ code, offset }: Problem) => code !== 'missing-key' && offset < yaml.soundUntil
-  problems.push(...(yaml.soundUntil === Number.POSITIVE_INFINITY ? content : content.filter(isSound)))
+  const told = content.filter(
+    ({ code, offset }) => OF_KEYS.has(code) || !yaml.mendedLines.has(yaml.lineOf(offset)),
+  )
+  problems.push(...(yaml.soundUntil === Number.POSITIVE_INFINITY ? told : told.filter(isSound)))
   const isUsable = problems.every(({ severity }) => severity === 'warning')
   const inside = problems.map((problem) => clipped(problem, text)).sort((a, b) => a.offset - b.offset)
   return { claim: isUsable ? claim : null, problems: limited(inside) }
@@ -142,8 +161,9 @@ function readDates(fields: FileFields, context: Context) {
 function warnUnusedNorth(field: Field | undefined, sightlines: Claim['sightlines'], context: Context): void {
   const isUsed = sightlines.some(({ direction }) => direction.by === 'points')
   if (field === undefined || isUsed || sightlines.length === 0) return
+  const isDirection = sightlines.some(({ direction }) => direction.by === 'azimuth')
   reportWarning(context, field, 'unused-key', '`north` is not used: no sightline runs between points', {
-    expected: 'the uncertainty of north as part of the ± of each azimuth',
+    expected: isDirection ? 'the uncertainty of north as part of the ± of each azimuth' : 'a file without it',
     at: field.keyAt,
   })
 }

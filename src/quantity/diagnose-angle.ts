@@ -60,12 +60,13 @@ const SYMPTOMS: readonly Symptom[] = [
 
 /** Says why a text is no angle, and where possible what was meant. `plain` is the text in plain characters. */
 export function diagnoseAngle(text: string, plain: string, kind: AngleKind): Reading<never> {
-  const value = plain.trim()
+  const { value, letter } = withoutLetter(plain.trim(), kind)
   const expected = `${kind.name} such as ${kind.example}`
   for (const { pattern, code, complaint, repair } of SYMPTOMS) {
     const match = pattern.exec(value)
     if (match === null) continue
-    const suggestion = repair?.(match.slice(1), kind).replace(/^[-–]/, '−') ?? null
+    const repaired = repair?.(match.slice(1), kind).replace(/^[-–]/, '−') ?? null
+    const suggestion = repaired === null || letter === null ? repaired : `${repaired} ${letter}`
     return misread(code, `${quoted(text.trim())} ${complaint}`, trimmedStretch(text), {
       expected,
       suggestion,
@@ -74,4 +75,13 @@ export function diagnoseAngle(text: string, plain: string, kind: AngleKind): Rea
   return misread('not-readable', `${quoted(text.trim())} is not ${kind.name}`, trimmedStretch(text), {
     expected,
   })
+}
+
+/** `41.27N` and `N 41 16` are what they are without their letter; a letter of another angle stays. */
+function withoutLetter(value: string, { letters }: AngleKind): { value: string; letter: string | null } {
+  const match = /^(?:([NSEW])\s*(\S.*)|(.*\S)\s*([NSEW]))$/i.exec(value)
+  const letter = (match?.[1] ?? match?.[4])?.toUpperCase() ?? ''
+  const rest = match?.[2] ?? match?.[3] ?? ''
+  const isOwn = letters?.includes(letter) === true && !/^[-–+]/.test(rest)
+  return isOwn ? { value: rest, letter } : { value, letter: null }
 }

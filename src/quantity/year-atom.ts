@@ -24,6 +24,9 @@ export interface YearAtom {
 /** Tells what a date may look like, for messages. */
 export const DATE_EXAMPLES = 'a date such as 9600 BCE ± 100, 2500 to 2300 BCE, AD 600 or 3200 cal BP'
 
+/** An age instead of a date, mostly a round one. */
+const AGO = /\d\s*(?:(?:thousand\s+)?(?:years?|yrs?)\s+(?:ago|old)|[ky]ya|ya|ka|kyr)\b\.?\s*$/i
+
 /** Counts from here on are no years of anything people built. */
 const TOO_MANY = 1e6
 const ERA = String.raw`(?:cal\.?\s*)?(?:BCE|BC|CE|AD|BP|B\.\s?C\.\s?E\.|B\.\s?C\.|C\.\s?E\.|A\.\s?D\.|B\.\s?P\.)(?![A-Za-z])`
@@ -43,6 +46,10 @@ export function readYearAtom(text: string, plain: string): Reading<YearAtom> {
   const shown = quoted(text.trim())
   const match = ATOM.exec(plain)
   const groups = match?.groups
+  if (AGO.test(plain))
+    return misread('not-readable', `${shown} does not say from which year it counts`, whole, {
+      expected: 'years before 1950, such as 3200 cal BP, or a date in BCE, such as 9600 BCE ± 100',
+    })
   if (match === null || groups === undefined || (groups.before !== undefined && groups.after !== undefined))
     return misread('not-readable', `${shown} is not a date`, whole, { expected: DATE_EXAMPLES })
   if (groups.fraction !== undefined)

@@ -3,14 +3,14 @@ import { describe, expect, test } from 'vitest'
 import { formatProblem } from '../../src/claim/format-problem.ts'
 import { newClaim } from '../../src/claim/new-claim.ts'
 import { PROBLEM_CODES } from '../../src/claim/problem-codes.ts'
-import { readClaim } from '../../src/claim/read-claim.ts'
+import { read } from './read.ts'
 import { THORNMERE } from './thornmere.ts'
 
 const seed = 20_260_102
 
 /** What has to hold of any text whatever. */
 function expectSound(text: string): void {
-  const { claim, problems } = readClaim(text)
+  const { claim, problems } = read(text)
   expect(claim === null).toBe(problems.some(({ severity }) => severity === 'error'))
   let last = 0
   for (const problem of problems) {
@@ -131,11 +131,53 @@ test('any value in the place of a quantity is either read or refused at its key'
       const changed = all.join('\n')
       expectSound(changed)
       const start = all.slice(0, index).join('\n').length
-      for (const { offset } of readClaim(changed).problems.filter(
-        ({ code }) => code !== 'date-outside-window',
-      ))
+      for (const { offset } of read(changed).problems.filter(({ code }) => code !== 'date-outside-window'))
         expect(offset).toBeGreaterThanOrEqual(start)
     }),
     { seed, numRuns: 400 },
+  )
+})
+
+test('any value in a target, or in the line that is to meet it, is either read or refused', () => {
+  const forms = [
+    ['azimuth: 57° ± 1′, horizon: 1°', '{body: sun, event: @, sense: @, at: rising}'],
+    ['azimuth: 57° ± 1′, horizon: 1°', '{body: sun, day: @, at: rising}'],
+    ['azimuth: 57° ± 1′, horizon: 1°', '{body: moon, event: @, at: @, disc: @}'],
+    ['azimuth: 57° ± 1′, horizon: 1°', '{body: @, at: @, altitude: @}'],
+    ['azimuth: 57° ± 1′', '{bodies: [Kochab, @], event: @, above: @}'],
+    ['altitude: @', '{body: sun, event: june solstice, at: noon}'],
+  ]
+  const words = [
+    '30 days after june solstice',
+    '-1 days before ',
+    'june solstice + 3',
+    'northern',
+    'minor',
+    'equinox',
+    'noon',
+    'Sirius',
+    'moon',
+  ]
+  const value = fc.oneof(
+    fc.string({ unit: 'grapheme', maxLength: 30 }),
+    fc.double().map((days) => `${days} days after june solstice`),
+    fc.array(fc.constantFrom(...words), { maxLength: 3 }).map((parts) => parts.join(' ')),
+  )
+  fc.assert(
+    fc.property(
+      fc.constantFrom(...forms),
+      fc.array(value, { minLength: 4, maxLength: 4 }),
+      (form, values) => {
+        const rest = [...values]
+        const [line, target] = form.map((text) => text.replace(/@/g, () => JSON.stringify(rest.pop())))
+        expectSound(
+          THORNMERE.replace(/midsummer: .*/, () => `midsummer: {${line}}`).replace(
+            /^target: .*/m,
+            () => `target: ${target}`,
+          ),
+        )
+      },
+    ),
+    { seed, numRuns: 600 },
   )
 })

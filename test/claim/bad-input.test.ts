@@ -1,12 +1,13 @@
 import { describe, expect, test } from 'vitest'
 import { positionOf } from '../../src/claim/format-problem.ts'
 import { PROBLEM_CODES } from '../../src/claim/problem-codes.ts'
-import { readClaim } from '../../src/claim/read-claim.ts'
 import { BAD_INPUT } from './bad-input.ts'
+import { read } from './read.ts'
+import { THORNMERE, thornmereWith } from './thornmere.ts'
 
 describe('each kind of bad input gives its problem, and no other', () => {
   test.each(BAD_INPUT.map((bad) => [bad.what, bad] as const))('%s', (_, bad) => {
-    const { claim, problems } = readClaim(bad.text)
+    const { claim, problems } = read(bad.text)
     const main = problems.find(({ code }) => code === bad.code)
     expect(problems.map(({ code }) => code).toSorted()).toEqual([bad.code, ...(bad.also ?? [])].toSorted())
     if (main === undefined) return
@@ -34,12 +35,38 @@ describe('a suggestion put in the place of what is marked puts the file right', 
   const curable = BAD_INPUT.filter(({ suggestion }) => suggestion !== undefined)
 
   test.each(curable.map((bad) => [bad.what, bad] as const))('%s', (_, bad) => {
-    const problem = readClaim(bad.text).problems.find(({ code }) => code === bad.code)!
+    const problem = read(bad.text).problems.find(({ code }) => code === bad.code)!
     for (const cure of problem.suggestion!.split(' or ')) {
       const cured = bad.text.slice(0, problem.offset) + cure + bad.text.slice(problem.offset + problem.length)
-      expect(readClaim(cured).problems).toEqual([])
+      expect(read(cured).problems).toEqual([])
     }
   })
+})
+
+test('a precision that is no angle is told of exact and unknown', () => {
+  const [problem] = read(thornmereWith('assumed_precision: exact', 'assumed_precision: good')).problems
+  expect(problem?.expected).toBe('exact, an angle such as 10′, or unknown')
+})
+
+test('breaks of syntax are told in plain words, not in those of the library', () => {
+  const texts = [
+    thornmereWith('body: sun, event', 'body: "sun" event'),
+    thornmereWith('500 BCE}', '500 BCE}}'),
+    thornmereWith('41°16′12″ N', '"41" 16 N'),
+    thornmereWith('upper limb}', 'upper limb]'),
+    thornmereWith('body: sun,', 'body: sun,#x\n'),
+    thornmereWith('640 m', '[640 m'),
+    thornmereWith('640 m', '|x\n   640 m'),
+    thornmereWith('640 m', '"640 m"#x'),
+  ]
+  for (const text of texts) {
+    const syntax = read(text).problems.filter(({ code }) => code === 'yaml-syntax')
+    expect(syntax).not.toEqual([])
+    for (const { message, expected } of syntax) {
+      expect(message).not.toMatch(/scalar|token|node|collection|flow|block|stream|implicit/i)
+      expect(expected).not.toBeNull()
+    }
+  }
 })
 
 test('every kind of problem is tried', () => {
@@ -50,12 +77,40 @@ test('every kind of problem is tried', () => {
 
 test('a file with hundreds of problems lists the first hundred and counts the others', () => {
   const text = Array.from({ length: 150 }, (_, index) => `key${index}: 1\n`).join('')
-  const { claim, problems } = readClaim(text)
+  const { claim, problems } = read(text)
   expect(claim).toBeNull()
   expect(problems).toHaveLength(101)
   // 150 unknown keys and the four that are missing.
   expect(problems[100]).toMatchObject({
     code: 'too-many-problems',
     message: 'the file has 54 more problems from here on',
+  })
+})
+
+describe('a colon in a text hides nothing else that is wrong', () => {
+  const codesOf = (text: string) => read(text).problems.map(({ code }) => code)
+
+  test('before it and after it', () => {
+    const text = thornmereWith('source: Thornmere', 'source: A: Thornmere')
+      .replace('claim:', 'clam:')
+      .replace('at: rising', 'at: risng')
+    expect(codesOf(text)).toEqual(['unknown-key', 'yaml-syntax', 'unknown-word'])
+  })
+
+  test('not even in the first line, where missing keys are told, or a second colon', () => {
+    const text = thornmereWith('claim: The', 'claim: Inside: the')
+      .replace('source: ', 'source: A: ')
+      .replace('asserted_date: 9600 BCE ± 100\n', '')
+    expect(codesOf(text).toSorted()).toEqual(['missing-key', 'yaml-syntax', 'yaml-syntax'])
+  })
+
+  test('and what is made harmless for this is told as a break of syntax only', () => {
+    const text = THORNMERE.replace(/target: \{(.*)\}/, 'target: $1').replace('41°16′12″ N', '41: N')
+    expect(codesOf(text)).toEqual(['yaml-syntax', 'yaml-syntax'])
+  })
+
+  test('nor is a suggestion made where the text goes on in the next line', () => {
+    const [problem] = read(thornmereWith('source: Thornmere', 'source: A: Thornmere\n  old')).problems
+    expect(problem).toMatchObject({ expected: 'the text in quotes', suggestion: null })
   })
 })

@@ -9,6 +9,14 @@ function propertiesOf(schema: Schema): Readonly<Record<string, Schema>> {
 const file = propertiesOf(CLAIM_SCHEMA)
 const sightline = file.sightlines!.additionalProperties as Schema
 
+/** The kinds of target that a schema allows, with the keys of each. */
+function targetsIn(what: string, { anyOf }: Schema): [string, Schema, KeyTable][] {
+  const tables = [KEYS.sunTarget, KEYS.moonTarget, KEYS.starTarget, KEYS.starPairTarget]
+  const kinds = anyOf as readonly Schema[]
+  expect(kinds).toHaveLength(tables.length)
+  return tables.map((table, kind) => [`${what}, kind ${kind}`, kinds[kind]!, table])
+}
+
 /** Each mapping of the schema with the keys the reader takes in its place. */
 const MAPPINGS: readonly [string, Schema, KeyTable][] = [
   ['the file', CLAIM_SCHEMA, KEYS.file],
@@ -16,8 +24,8 @@ const MAPPINGS: readonly [string, Schema, KeyTable][] = [
   ['north', (file.north!.anyOf as Schema[])[1]!, KEYS.north],
   ['a point', file.points!.additionalProperties as Schema, KEYS.point],
   ['a sightline', sightline, KEYS.sightline],
-  ['the target', file.target!, KEYS.target],
-  ['the target of a sightline', propertiesOf(sightline).target!, KEYS.target],
+  ...targetsIn('the target', file.target!),
+  ...targetsIn('the target of a sightline', propertiesOf(sightline).target!),
   ['an independent date', file.other_dates!.items as Schema, KEYS.otherDate],
   ['atmosphere', file.atmosphere!, KEYS.atmosphere],
   ['claimed', file.claimed!, KEYS.claimed],
@@ -44,4 +52,10 @@ test('every key is explained', () => {
 test('it is JSON and names its dialect', () => {
   expect(JSON.parse(JSON.stringify(CLAIM_SCHEMA))).toEqual(CLAIM_SCHEMA)
   expect(CLAIM_SCHEMA.$schema).toBe('https://json-schema.org/draft/2020-12/schema')
+})
+
+test('every way to write a target has words of its own for its body', () => {
+  const kinds = (file.target!.anyOf as Schema[]).map(propertiesOf)
+  expect(kinds.map(({ body }) => body?.enum)).toEqual([['sun'], ['moon'], undefined, undefined])
+  expect(kinds[2]?.body?.not).toEqual({ enum: ['sun', 'moon'] })
 })

@@ -1,8 +1,8 @@
 import { describe, expect, test } from 'vitest'
 import { formatProblem, positionOf } from '../../src/claim/format-problem.ts'
-import { readClaim } from '../../src/claim/read-claim.ts'
 import type { Problem } from '../../src/quantity/problem.ts'
 import { BAD_INPUT } from './bad-input.ts'
+import { read } from './read.ts'
 import { thornmereWith } from './thornmere.ts'
 
 function problemAt(text: string, marked: string, more: Partial<Problem> = {}): Problem {
@@ -28,7 +28,7 @@ function underCarets(printed: string): string {
 
 test('prints place, message, excerpt, field, expectation and suggestion', () => {
   const text = thornmereWith('1°30′ ± 2′', '1°30′ ± 2')
-  const [problem] = readClaim(text).problems
+  const [problem] = read(text).problems
   expect(formatProblem(problem!, text, 'thornmere.yaml')).toBe(
     [
       'thornmere.yaml:12:66: error: `± 2` does not say in which unit',
@@ -64,6 +64,7 @@ describe('lines and columns count from 1, columns in characters', () => {
     ['abc', 'c', 1, 3],
     ['a\nbc', 'c', 2, 2],
     ['a\r\nbc', 'c', 2, 2],
+    ['a\rbc', 'c', 2, 2],
     ['𝔞𝔟c', 'c', 1, 3],
     ['\tc', 'c', 1, 2],
     ['\ufeffabc', 'c', 1, 3],
@@ -75,7 +76,7 @@ describe('lines and columns count from 1, columns in characters', () => {
 
 describe('the excerpt', () => {
   test.each(BAD_INPUT.map((bad) => [bad.what, bad] as const))('of %s fits in 80 columns', (_, bad) => {
-    for (const problem of readClaim(bad.text).problems) {
+    for (const problem of read(bad.text).problems) {
       const [, line = '', carets = ''] = formatProblem(problem, bad.text, 'f').split('\n')
       expect([...line].length).toBeLessThanOrEqual(80)
       expect([...carets].length).toBeLessThanOrEqual(80)

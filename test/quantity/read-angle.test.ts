@@ -85,6 +85,13 @@ describe('refuses', () => {
     ['Infinity°', 'not-readable', 'Infinity°', null],
     [`${'9'.repeat(400)}°`, 'out-of-range', `${'9'.repeat(400)}°`, null],
     ['°', 'not-readable', '°', null],
+    ['41.27 N', 'unit-missing', '41.27 N', '41.27° N'],
+    ['41.27s', 'unit-missing', '41.27s', '41.27° S'],
+    ['S 41 16', 'unit-missing', 'S 41 16', '41°16′ S'],
+    ['41:16:12 N', 'unit-missing', '41:16:12 N', '41°16′12″ N'],
+    ['41°16 N', 'unit-missing', '41°16 N', '41°16′ N'],
+    ['-41.27 N', 'not-readable', '-41.27 N', null],
+    ['41.27 E', 'not-readable', '41.27 E', null],
     ['N', 'not-readable', 'N', null],
     ['north', 'not-readable', 'north', null],
   ])('%s as a latitude: %s', (text, code, marked, suggestion) => {

@@ -49,6 +49,10 @@ describe('reads a value and its uncertainty', () => {
 describe('refuses', () => {
   test.each([
     ['49°34′18″ ± 1', 'tolerance-without-unit', '± 1', '± 1′'],
+    ['1.5 ± 0.03', 'unit-missing', '1.5 ± 0.03', '1.5° ± 0.03°'],
+    ['1.5 within 0.03', 'unit-missing', '1.5 within 0.03', '1.5° within 0.03°'],
+    ['1.5 ± 2′', 'unit-missing', '1.5', '1.5°'],
+    ['49 34 ± 1', 'unit-missing', '49 34', '49°34′'],
     ['49° within 1', 'tolerance-without-unit', 'within 1', 'within 1′'],
     ['49° ± 1′ ± 2′', 'several-tolerances', '± 2′', null],
     ['49° ± 1′ within 2′', 'several-tolerances', 'within 2′', null],

@@ -110,6 +110,14 @@ describe('refuses', () => {
     expectMisread(text, readYears(text), { code, marked, suggestion })
   })
 
+  test.each(['12,000 years ago', '12 kya', '12 ka', '3 thousand yrs ago'])(
+    '%s, with how to say it',
+    (text) => {
+      expectMisread(text, readYears(text), { code: 'not-readable', marked: text, suggestion: null })
+      expect(readYears(text)).toMatchObject({ misread: { expected: expect.stringMatching(/cal BP.*BCE/) } })
+    },
+  )
+
   test('a negative year with both readings in words', () => {
     expect(readYears('-9600')).toMatchObject({
       misread: {

@@ -46,7 +46,8 @@ function firstOf(
 ): Problem[] {
   const [first, ...others] = text.matchAll(pattern)
   if (first === undefined) return []
-  const more = others.length === 0 ? '' : `, and at ${others.length} more places`
+  const more =
+    others.length === 0 ? '' : `, and at ${others.length} more ${others.length === 1 ? 'place' : 'places'}`
   const message = `${what} (${namesOf(first[0])})${more}`
   return [characterProblem(code, message, expected, { offset: first.index, length: first[0].length })]
 }

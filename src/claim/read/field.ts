@@ -1,7 +1,8 @@
-import { isScalar, type Node, type Scalar } from 'yaml'
+import { isMap, isScalar, type Node, type Scalar } from 'yaml'
 import type { Advice, Stretch } from '../../quantity/misread.ts'
 import type { Problem } from '../../quantity/problem.ts'
 import type { ProblemCode } from '../problem-codes.ts'
+import type { StarFinder } from '../star-finder.ts'
 
 /** A value of the file with what is needed to point at it. */
 export interface Field {
@@ -14,9 +15,10 @@ export interface Field {
   node: Node | null
 }
 
-/** The text being read, and where its problems go. */
+/** The text being read, how stars are looked up, and where its problems go. */
 export interface Context {
   text: string
+  findStar: StarFinder
   /** The line of an offset, from 1. */
   lineOf: (offset: number) => number
   report: (problem: Problem) => void
@@ -65,6 +67,11 @@ export function stretchInValue(field: Field, source: string, value: string, at: 
 /** Tells a key that nothing follows, or null. */
 export function isEmpty({ node }: Field): boolean {
   return node === null || (isScalar(node) && node.value === null)
+}
+
+/** The value of a mapping's key, looked up before the mapping is read; null where there is none. */
+export function peek({ node }: Field, key: string): Node | null {
+  return isMap(node) ? ((node.get(key, true) as Node | undefined) ?? null) : null
 }
 
 /** The field of an entry of a list. */

@@ -1,8 +1,10 @@
-import { isMap } from 'yaml'
+import { isMap, isScalar } from 'yaml'
 import type { Stretch } from '../../quantity/misread.ts'
 import { quoted } from '../../quantity/quoted.ts'
-import type { KeyTable } from '../keys.ts'
 import { type Context, type Field, reportError, valueStretch } from './field.ts'
+
+/** Keys whose values are lists: there a comma parts two values, and what is missing are the brackets. */
+const LISTS: ReadonlySet<string> = new Set(['bodies', 'tolerances'])
 
 /**
  * In `{date: 11,881 BCE}` the comma ends the value, and `881 BCE` comes out as a key without one. Such values are
@@ -11,7 +13,7 @@ import { type Context, type Field, reportError, valueStretch } from './field.ts'
 export function joinCutValues(
   entries: readonly Field[],
   parent: Field,
-  table: KeyTable,
+  isKey: (entry: Field) => boolean,
   spoilt: Set<string>,
   context: Context,
 ): readonly Field[] {
@@ -19,7 +21,7 @@ export function joinCutValues(
   const whole: { head: Field; tail: Field | null }[] = []
   for (const entry of entries) {
     const last = whole.at(-1)
-    const isCutOff = entry.node === null && !Object.hasOwn(table, entry.name)
+    const isCutOff = entry.node === null && !isKey(entry)
     if (isCutOff && last !== undefined && last.head.node !== null) last.tail = entry
     else whole.push({ head: entry, tail: null })
   }
@@ -35,11 +37,16 @@ function reportCut(before: Field, after: Field, context: Context): void {
   const { offset } = valueStretch(before)
   const at: Stretch = { offset, length: after.keyAt.offset + after.keyAt.length - offset }
   const whole = context.text.slice(at.offset, at.offset + at.length)
+  const isList = LISTS.has(before.name) && isScalar(before.node)
   reportError(context, before, 'comma-in-braces', `the comma in ${quoted(whole)} ends the value inside { }`, {
-    expected: 'a value with a comma in quotes',
-    suggestion: /["\n\\]/.test(whole) ? null : isDecimalComma(whole) ? whole.replace(',', '.') : `"${whole}"`,
+    expected: isList ? 'a list in brackets' : 'a value with a comma in quotes',
+    suggestion: /["\n\\]/.test(whole) ? null : isList ? `[${whole}]` : asOneValue(whole),
     at,
   })
+}
+
+function asOneValue(whole: string): string {
+  return isDecimalComma(whole) ? whole.replace(',', '.') : `"${whole}"`
 }
 
 function isDecimalComma(value: string): boolean {

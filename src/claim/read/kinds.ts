@@ -24,7 +24,18 @@ export const DIRECTION_UNCERTAINTY: AngleKind = {
   limits: 'from 0′ to 30°',
 }
 
-/** Standard deviation of a horizon's altitude, or of refraction. */
+/** An apparent altitude of a body: on the meridian, or where a star was sighted. Below −5° no place on Earth sees one. */
+export const APPARENT_ALTITUDE: AngleKind = {
+  ...TOLERANCE,
+  name: 'an apparent altitude',
+  example: '31°12′ ± 10′',
+  lowDeg: -5,
+  highDeg: 90,
+  limits: 'from −5° to 90°',
+  usualUnit: '°',
+}
+
+/** Standard deviation of a measured altitude, or of refraction. */
 export const ALTITUDE_UNCERTAINTY: AngleKind = {
   ...TOLERANCE,
   name: 'the uncertainty of an altitude',
@@ -33,7 +44,7 @@ export const ALTITUDE_UNCERTAINTY: AngleKind = {
   limits: 'from 0′ to 10°',
 }
 
-/** How much of the Sun's disc is above the horizon; the disc is never wider than 33′. */
+/** How much of the disc is above the horizon; the Sun's is never wider than 33′, the Moon's hardly ever. */
 export const SHOWING: AngleKind = {
   ...TOLERANCE,
   name: 'a part of the disc that shows',
@@ -52,17 +63,17 @@ export const REFRACTION: AngleKind = {
   limits: 'from −1° to 5°',
 }
 
-/** A semidiameter of the Sun as printed. */
+/** A semidiameter of the Sun or the Moon as printed. */
 export const SEMIDIAMETER: AngleKind = {
   ...TOLERANCE,
-  name: 'a semidiameter of the Sun',
+  name: 'a semidiameter of the Sun or the Moon',
   example: '15′45″',
   lowDeg: 14 / 60,
   highDeg: 18 / 60,
   limits: 'from 14′ to 18′',
 }
 
-/** A true altitude of the Sun's centre as printed. */
+/** A true altitude of a body's centre as printed. */
 export const TRUE_ALTITUDE: AngleKind = {
   ...TOLERANCE,
   name: 'an altitude',

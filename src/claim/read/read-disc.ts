@@ -9,6 +9,20 @@ import { SHOWING } from './kinds.ts'
 export const DISC_PARTS = ['upper limb', 'centre', 'lower limb'] as const
 export const DISC_EXPECTED = 'upper limb, centre, lower limb, so much of it as in 2′ showing, or unknown'
 
+const CALLED: ReadonlyMap<string, (typeof DISC_PARTS)[number]> = new Map([
+  ['upper', 'upper limb'],
+  ['top', 'upper limb'],
+  ['upperedge', 'upper limb'],
+  ['firstgleam', 'upper limb'],
+  ['lastgleam', 'upper limb'],
+  ['half', 'centre'],
+  ['middle', 'centre'],
+  ['lower', 'lower limb'],
+  ['bottom', 'lower limb'],
+  ['loweredge', 'lower limb'],
+  ['full', 'lower limb'],
+])
+
 /** Reads which part of the disc stands on the horizon: `upper limb`, `centre`, `lower limb` or `2′ showing`. */
 export function readDisc(text: string): Reading<Disc> {
   const part = DISC_PARTS.find((word) => foldWord(word) === foldWord(text))
@@ -18,7 +32,7 @@ export function readDisc(text: string): Reading<Disc> {
   if (showing === null)
     return misread('not-readable', `${quoted(text.trim())} is not a part of the disc`, trimmedStretch(text), {
       expected: DISC_EXPECTED,
-      suggestion: nearMiss(text, DISC_PARTS),
+      suggestion: CALLED.get(foldWord(text)) ?? nearMiss(text, DISC_PARTS),
     })
   const angle = readAngle(text.slice(0, showing.index), SHOWING)
   return angle.ok ? { ok: true, value: { part: 'showing', showingArcmin: toArcmin(angle.value) } } : angle

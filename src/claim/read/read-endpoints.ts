@@ -1,9 +1,9 @@
 import { nearMiss } from '../../quantity/near-miss.ts'
 import { quoted } from '../../quantity/quoted.ts'
-import type { LocalPoint, Sightline } from '../claim.ts'
+import type { Direction, LocalPoint } from '../claim.ts'
 import type { KEYS } from '../keys.ts'
 import { type Context, type Field, reportError } from './field.ts'
-import type { Fields } from './read-mapping.ts'
+import { type Fields, reportMissingKey } from './read-mapping.ts'
 import type { ReadPoints } from './read-points.ts'
 import { scalarText } from './read-text.ts'
 
@@ -13,11 +13,12 @@ export function readEndpoints(
   fields: Fields<keyof typeof KEYS.sightline>,
   around: { points: ReadPoints | null; hasPoints: boolean },
   context: Context,
-): Sightline['direction'] | null {
+): Direction | null {
   const [from, to] = (['from', 'to'] as const).map((key) => {
     const field = fields.get(key)
-    if (field === undefined) return fields.has(key) ? null : reportNoEnd(line, key, context)
-    return readPointName(field, around, context)
+    if (field !== undefined) return readPointName(field, around, context)
+    if (!fields.has(key)) reportMissingKey(line, key, 'the name of a point', context)
+    return null
   })
   if (from == null || to == null) return null
   const end = fields.get('to') ?? line
@@ -38,13 +39,6 @@ export function readEndpoints(
       },
     )
   return { by: 'points', from, to }
-}
-
-function reportNoEnd(line: Field, key: 'from' | 'to', context: Context): null {
-  const field = { ...line, path: `${line.path}.${key}` }
-  const message = `${quoted(line.name)} has no ${quoted(key)}`
-  reportError(context, field, 'missing-key', message, { expected: 'the name of a point', at: line.keyAt })
-  return null
 }
 
 function readPointName(

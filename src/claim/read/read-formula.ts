@@ -15,6 +15,17 @@ export const MODEL_NAMES: readonly ObliquityModelName[] = [
   'newcomb1895',
 ]
 
+/** What people call the held models; `a or b` where one name stands for two. */
+const CALLED: readonly (readonly [RegExp, string])[] = [
+  [/^vondrak(2011)?$/, 'vondrak2011'],
+  [/^laskar$/, 'laskar1986 or laskar2004'],
+  [/^la(skar)?2004$/, 'laskar2004'],
+  [/^laskar1986$/, 'laskar1986'],
+  [/^(p03)?(iau2006)?$|^capitaine(2003)?$/, 'p03'],
+  [/^(lieske(1977)?)?(iau1976)?$/, 'iau1976'],
+  [/^newcomb(1895)?$/, 'newcomb1895'],
+]
+
 /** Reads the claimant's obliquity model. A table that this program does not have is kept by its name. */
 export function readFormula(field: Field | undefined, context: Context): Formula | Unstated {
   const text = readText(field, context)
@@ -22,7 +33,7 @@ export function readFormula(field: Field | undefined, context: Context): Formula
   if (isUnknown(text)) return 'unknown'
   const model = MODEL_NAMES.find((name) => name === foldWord(text))
   if (model !== undefined) return { model }
-  const suggestion = nearMiss(text, MODEL_NAMES, 2)
+  const suggestion = calledOtherwise(text) ?? nearMiss(text, MODEL_NAMES, 2)
   const expected = `one of ${MODEL_NAMES.join(', ')}, or the author and year of another table`
   if (suggestion === null)
     reportWarning(
@@ -40,4 +51,14 @@ export function readFormula(field: Field | undefined, context: Context): Formula
       suggestion,
     })
   return { lacking: text }
+}
+
+/** The held model meant by its author alone, or by its name written another way: `Newcomb`, `Vondrák et al. (2011)`. */
+function calledOtherwise(text: string): string | null {
+  const plain = text
+    .normalize('NFD')
+    .toLowerCase()
+    .replace(/\bet al\b|['’]s\b|\b(?:formulae?|tables?|model|theory|obliquity|precession)\b/g, '')
+    .replace(/[^a-z0-9]+/g, '')
+  return plain === '' ? null : (CALLED.find(([pattern]) => pattern.test(plain))?.[1] ?? null)
 }

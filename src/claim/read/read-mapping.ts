@@ -1,3 +1,4 @@
+import type { Advice } from '../../quantity/misread.ts'
 import { quoted } from '../../quantity/quoted.ts'
 import { EXAMPLES, type KeyTable } from '../keys.ts'
 import { type Context, type Field, reportError, reportWarning } from './field.ts'
@@ -11,15 +12,30 @@ export interface Fields<K extends string> {
   has: (key: K) => boolean
 }
 
+/** Why a key that is legal elsewhere has no place in a mapping; a suggestion takes the place of the key. */
+export interface OutOfPlace extends Advice {
+  message: string
+}
+
+/** What to tell of keys besides that they are wrong. */
+export interface KeyAdvice {
+  /** What to write in place of the keys that this version does not read. */
+  instead?: string | undefined
+  /** Tells a key that the table lacks because it belongs elsewhere; null for one that belongs nowhere. */
+  outOfPlace?: (entry: Field) => OutOfPlace | null
+  /** How lines with required keys may look, where the usual example does not fit. */
+  examples?: Readonly<Record<string, string>>
+}
+
 /**
- * Reads a mapping with fixed keys. Reports unknown, doubled and missing keys, those that this version does not
- * use or read, and values that a comma has cut in two. Null where the value is no mapping.
+ * Reads a mapping with fixed keys. Reports unknown, doubled, misplaced and missing keys, those that this version
+ * does not use or read, and values that a comma has cut in two. Null where the value is no mapping.
  */
 export function readMapping<T extends KeyTable>(
   field: Field,
   table: T,
   context: Context,
-  instead?: string,
+  { instead, outOfPlace = () => null, examples = {} }: KeyAdvice = {},
 ): Fields<keyof T & string> | null {
   const keys = Object.keys(table).slice(0, 3).join(': …, ')
   const entries = readEntries(field, context, `keys with values, such as ${keys}: …`)
@@ -29,16 +45,21 @@ export function readMapping<T extends KeyTable>(
   const readKeys = Object.keys(table).filter((key) => table[key] !== 'later' && table[key] !== 'unused')
   const taken = new Set(entries.map(({ name }) => name))
   const freeKeys = { keys: readKeys, free: readKeys.filter((key) => !taken.has(key)) }
+  const isKey = (entry: Field) => Object.hasOwn(table, entry.name) || outOfPlace(entry) !== null
   let isFromLater = false
-  for (const entry of joinCutValues(entries, field, table, spoilt, context)) {
+  for (const entry of joinCutValues(entries, field, isKey, spoilt, context)) {
     const use = Object.hasOwn(table, entry.name) ? table[entry.name] : undefined
-    if (use === undefined) reportUnknown(entry, freeKeys, spoilt, context)
+    const stray = use === undefined ? outOfPlace(entry) : null
+    if (stray !== null) {
+      if (stray.suggestion != null) spoilt.add(stray.suggestion)
+      reportOutOfPlace(entry, stray, context)
+    } else if (use === undefined) reportUnknown(entry, freeKeys, spoilt, context)
     else if (use === 'unused') warnUnused(entry, context)
     else if (use === 'later') isFromLater = reportLater(entry, instead, context)
     else fields.set(entry.name, entry)
   }
   const isThere = (key: string) => fields.has(key) || spoilt.has(key)
-  if (!isFromLater) reportMissing(field, table, isThere, context)
+  if (!isFromLater) reportMissing(field, table, isThere, { ...EXAMPLES, ...examples }, context)
   return { get: (key) => fields.get(key), has: isThere }
 }
 
@@ -81,15 +102,24 @@ function reportMissing(
   field: Field,
   table: KeyTable,
   isThere: (key: string) => boolean,
+  examples: Readonly<Record<string, string>>,
   context: Context,
 ): void {
-  for (const [key, use] of Object.entries(table)) {
-    if (use !== 'required' || isThere(key)) continue
-    const missing = { ...field, path: field.path === '' ? key : `${field.path}.${key}` }
-    const place = field.path === '' ? 'the file' : quoted(field.name)
-    reportError(context, missing, 'missing-key', `${place} has no ${quoted(key)}`, {
-      expected: EXAMPLES[key] ?? null,
-      at: field.keyAt,
-    })
-  }
+  for (const [key, use] of Object.entries(table))
+    if (use === 'required' && !isThere(key)) reportMissingKey(field, key, examples[key] ?? null, context)
+}
+
+/** Reports that a mapping lacks a key. */
+export function reportMissingKey(field: Field, key: string, expected: string | null, context: Context): void {
+  const missing = { ...field, path: field.path === '' ? key : `${field.path}.${key}` }
+  const place = field.path === '' ? 'the file' : quoted(field.name)
+  reportError(context, missing, 'missing-key', `${place} has no ${quoted(key)}`, {
+    expected,
+    at: field.keyAt,
+  })
+}
+
+/** Reports a key that is legal elsewhere, at the key. */
+export function reportOutOfPlace(entry: Field, { message, ...advice }: OutOfPlace, context: Context): void {
+  reportError(context, entry, 'out-of-place', message, { ...advice, at: entry.keyAt })
 }

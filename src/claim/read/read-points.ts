@@ -21,7 +21,7 @@ export function readPoints(field: Field | undefined, context: Context): ReadPoin
 }
 
 function readPoint(field: Field, context: Context): LocalPoint | null {
-  const fields = readMapping(field, KEYS.point, context, INSTEAD.point)
+  const fields = readMapping(field, KEYS.point, context, { instead: INSTEAD.point })
   if (fields === null) return null
   const length = (key: 'east' | 'north' | 'up') =>
     readQuantity(fields.get(key), (text) => readUnit(text, PLAN_LENGTH), 'a length such as 84.65 m', context)

@@ -1,5 +1,7 @@
 import { TOLERANCE } from '../../quantity/angle-kind.ts'
-import { mapReading } from '../../quantity/misread.ts'
+import { mapReading, misread, trimmedStretch } from '../../quantity/misread.ts'
+import { nearMiss } from '../../quantity/near-miss.ts'
+import { quoted } from '../../quantity/quoted.ts'
 import { readAngle } from '../../quantity/read-angle.ts'
 import { readAngleRange } from '../../quantity/read-angle-range.ts'
 import type { Reading } from '../../quantity/reading.ts'
@@ -10,9 +12,28 @@ import { toArcmin } from './read-disc.ts'
 import { readList } from './read-list.ts'
 import { readQuantity, readStatable } from './read-quantity.ts'
 
+const PRECISION_EXPECTED = 'exact, an angle such as 10′, or unknown'
+
 /** Reads the precision that the claim gives the builders: `exact` (0), an angle, or `unknown`; arcminutes. */
 export function readAssumedPrecision(field: Field | undefined, context: Context): number | Unstated {
-  return readStatable(field, readTolerance, 'exact, an angle such as 10′, or unknown', context)
+  const read = (text: string) => {
+    const reading = readTolerance(text)
+    return !reading.ok && reading.misread.code === 'not-readable' ? noPrecision(text) : reading
+  }
+  return readStatable(field, read, PRECISION_EXPECTED, context)
+}
+
+function noPrecision(text: string) {
+  const isExact = /^(?:exact\w*|precise(?:ly)?|perfect(?:ly)?)$/i.test(text.trim())
+  return misread(
+    'not-readable',
+    `${quoted(text.trim())} is neither an angle nor exact`,
+    trimmedStretch(text),
+    {
+      expected: PRECISION_EXPECTED,
+      suggestion: isExact ? 'exact' : nearMiss(text, ['exact', 'unknown']),
+    },
+  )
 }
 
 /** Reads the range of build tolerances to sweep over, arcminutes. */

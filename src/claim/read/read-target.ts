@@ -1,81 +1,91 @@
-import { isMap } from 'yaml'
+import { isMap, isSeq } from 'yaml'
 import { foldWord } from '../../quantity/near-miss.ts'
 import { quoted } from '../../quantity/quoted.ts'
 import type { Target } from '../claim.ts'
-import { INSTEAD, KEYS } from '../keys.ts'
-import { type Context, type Field, reportError } from './field.ts'
-import { DISC_EXPECTED, readDisc } from './read-disc.ts'
-import { readMapping } from './read-mapping.ts'
-import { readStatable } from './read-quantity.ts'
+import { EXAMPLES } from '../keys.ts'
+import { type Context, type Field, peek, reportError } from './field.ts'
+import { readMapping, reportMissingKey } from './read-mapping.ts'
+import { readMoonTarget } from './read-moon-target.ts'
+import { reportUnknownBody, starNamed } from './read-star.ts'
+import { readStarPairTarget } from './read-star-pair-target.ts'
+import { readStarTarget } from './read-star-target.ts'
+import { readSunTarget } from './read-sun-target.ts'
 import { plainText, scalarText } from './read-text.ts'
-import { readWord } from './read-word.ts'
 
-const EVENTS = {
-  words: ['june solstice', 'december solstice'],
-  later: [
-    'equinox',
-    'zenith passage',
-    'june to december solstice',
-    'northern major standstill',
-    'southern major standstill',
-    'northern minor standstill',
-    'southern minor standstill',
-  ],
-} as const
-const CROSSINGS = {
-  words: ['rising', 'setting'],
-  later: ['noon', 'upper culmination', 'lower culmination'],
-  hints: {
-    rise: 'rising',
-    sunrise: 'rising',
-    rises: 'rising',
-    set: 'setting',
-    sunset: 'setting',
-    sets: 'setting',
-  },
+const BODIES = ['sun', 'moon'] as const
+const PLANETS = new Set(['mercury', 'venus', 'mars', 'jupiter', 'saturn', 'uranus', 'neptune'])
+const OTHER_NAMES: ReadonlyMap<string, (typeof BODIES)[number]> = new Map([
+  ['sol', 'sun'],
+  ['thesun', 'sun'],
+  ['luna', 'moon'],
+  ['themoon', 'moon'],
+])
+
+/** Where the body is not known, what else the target lacks or holds is no matter. */
+const ANY_KEY = {
+  body: 'optional',
+  bodies: 'optional',
+  event: 'optional',
+  day: 'optional',
+  sense: 'optional',
+  at: 'optional',
+  disc: 'optional',
+  altitude: 'optional',
+  above: 'optional',
 } as const
 
-const SEASON = /^(?:summersolstice|wintersolstice|midsummer|midwinter)$/
-
-/** Reads what the line is said to mark. This version knows the Sun at a solstice. */
+/** Reads what the line is said to mark: the Sun, the Moon, a star, or two stars. */
 export function readTarget(field: Field | undefined, context: Context): Target | null {
   if (field === undefined) return null
-  const fields = readMapping(field, isOtherBody(field) ? OTHER_BODY : KEYS.target, context, INSTEAD.target)
-  if (fields === null || !isSun(fields.get('body'), context)) return null
-  const event = readEvent(fields.get('event'), context)
-  const at = readWord(fields.get('at'), CROSSINGS, context)
-  const disc = readStatable(fields.get('disc'), readDisc, DISC_EXPECTED, context)
-  return event === null || at === null ? null : { body: 'sun', event, at, disc }
+  switch (kindOf(field, context)) {
+    case 'sun':
+      return readSunTarget(field, context)
+    case 'moon':
+      return readMoonTarget(field, context)
+    case 'star':
+      return readStarTarget(field, context)
+    case 'two stars':
+      return readStarPairTarget(field, context)
+    case null:
+      return refuse(field, context)
+  }
 }
 
-/** A body this version does not know is refused by itself; what its event lacks is no matter. */
-const OTHER_BODY = { ...KEYS.target, event: 'optional', at: 'optional' } as const
-
-function isOtherBody({ node }: Field): boolean {
-  const body = isMap(node) ? node.get('body') : undefined
-  return body !== undefined && foldWord(String(body)) !== 'sun'
+function kindOf(field: Field, context: Context): Target['body'] | null {
+  if (isMap(field.node) && field.node.has('bodies')) return 'two stars'
+  const body = plainText({ ...field, node: peek(field, 'body') })
+  if (body === null) return null
+  const known = BODIES.find((name) => name === foldWord(body))
+  return known ?? (starNamed(body, context) === null ? null : 'star')
 }
 
-function isSun(field: Field | undefined, context: Context): boolean {
-  if (field === undefined) return true
-  const body = scalarText(field, context, 'sun')
-  if (body === null || foldWord(body) === 'sun') return body !== null
-  reportError(context, field, 'not-in-this-version', `this version does not compute ${quoted(body)}`, {
-    expected: 'sun',
-  })
-  return false
-}
-
-/** Summer and winter depend on the hemisphere, which a claim should not leave to its reader. */
-function readEvent(field: Field | undefined, context: Context): Target['event'] | null {
-  const text = field === undefined ? null : plainText(field)
-  const season = SEASON.exec(foldWord(text ?? ''))
-  if (field === undefined || text === null || season === null) return readWord(field, EVENTS, context)
-  const isSummer = season[0].includes('summer')
-  const [north, south] = isSummer ? EVENTS.words : ([EVENTS.words[1], EVENTS.words[0]] as const)
-  reportError(context, field, 'unknown-word', `${quoted(text)} falls in another month south of the equator`, {
-    expected: `${north} (in the north) or ${south} (in the south)`,
-    suggestion: `${north} or ${south}`,
-  })
+function refuse(field: Field, context: Context): null {
+  const fields = readMapping(field, ANY_KEY, context)
+  if (fields === null) return null
+  const body = fields.get('body')
+  if (!fields.has('body') && !fields.has('bodies'))
+    reportMissingKey(field, 'body', EXAMPLES.body ?? null, context)
+  if (body === undefined) return null
+  if (isSeq(body.node)) {
+    const advice = { expected: 'bodies for two stars, or one body', suggestion: 'bodies', at: body.keyAt }
+    reportError(context, body, 'not-text', '`body` is one body, and here is a list', advice)
+    return null
+  }
+  const text = scalarText(body, context, 'sun, moon or a star')
+  if (text !== null) reportBody(body, text, context)
   return null
+}
+
+function reportBody(field: Field, text: string, context: Context): void {
+  const otherName = OTHER_NAMES.get(foldWord(text))
+  if (otherName !== undefined)
+    reportError(context, field, 'unknown-body', `${quoted(text)} is called ${quoted(otherName)} here`, {
+      expected: otherName,
+      suggestion: otherName,
+    })
+  else if (PLANETS.has(foldWord(text)))
+    reportError(context, field, 'unknown-body', `${quoted(text)} is a planet, and those are not computed`, {
+      expected: 'sun, moon or a star',
+    })
+  else reportUnknownBody(field, text, BODIES, context)
 }

@@ -3,17 +3,21 @@ import { quoted } from '../../quantity/quoted.ts'
 import { type Context, type Field, reportError } from './field.ts'
 import { scalarText } from './read-text.ts'
 
-/** The words a key takes. `later` ones are legal but not computed by this version; `hints` say what others mean. */
+/**
+ * The words a key takes. `later` ones are legal but not computed by this version; `hints` say what others mean, and
+ * `guess` what is meant by a text that is none of them: a word, or `a or b`.
+ */
 export interface Vocabulary<W extends string> {
   words: readonly W[]
   later?: readonly string[]
   hints?: Readonly<Record<string, W>>
+  guess?: (text: string) => string | null
 }
 
 /** Reads one of a few words, whatever its case and spacing; null, with the problem reported, where it is none. */
 export function readWord<W extends string>(
   field: Field | undefined,
-  { words, later = [], hints = {} }: Vocabulary<W>,
+  { words, later = [], hints = {}, guess = () => null }: Vocabulary<W>,
   context: Context,
 ): W | null {
   if (field === undefined) return null
@@ -28,7 +32,7 @@ export function readWord<W extends string>(
     })
   else {
     const hint = Object.entries(hints).find(([other]) => foldWord(other) === foldWord(text))?.[1]
-    const suggestion = hint ?? nearMiss(text, words)
+    const suggestion = hint ?? guess(text) ?? nearMiss(text, words)
     reportError(
       context,
       field,
