@@ -6,7 +6,8 @@ import { YEARS_BEYOND_WINDOW } from './defaults.ts'
 import type { Gap } from './gap.ts'
 import { gapsOfClaim } from './gaps-of-claim.ts'
 import { gapsOfLine } from './gaps-of-line.ts'
-import { type SightlineInputs, sightOf } from './sightline-inputs.ts'
+import { sightOf } from './sight-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
 
 /** Step in which the effect of a change is looked for, years. */
 const STEP = 40
@@ -32,7 +33,19 @@ export function listAssumptions(
     )
   })
   const ofClaim = gapsOfClaim(claim).map((gap) => weigh(gap, null, () => null, lines[0]!))
-  return [...ofLines, ...ofClaim].sort((a, b) => rank(b) - rank(a)).map(({ vanishes: _, ...row }) => row)
+  return [...merged(ofLines), ...ofClaim]
+    .sort((a, b) => rank(b) - rank(a))
+    .map(({ vanishes: _, ...row }) => row)
+}
+
+/** What all lines take alike is one row, with the largest of its effects. */
+function merged(rows: readonly Weighed[]): Weighed[] {
+  const byWhat = new Map<string, Weighed>()
+  for (const row of rows) {
+    const held = byWhat.get(row.what)
+    if (held === undefined || rank(row) > rank(held)) byWhat.set(row.what, row)
+  }
+  return [...byWhat.values()]
 }
 
 type Weighed = Assumption & { vanishes: boolean }
@@ -53,7 +66,7 @@ function weigh(
     return {
       ...row,
       effect_years: null,
-      effect_of: `${change.words}; no date fits this line`,
+      effect_of: `${change.words}; no date fits this line exactly, so there is none to move`,
       vanishes: false,
     }
   }

@@ -1,22 +1,14 @@
 import { dateBudget } from '../inference/budget.ts'
 import { sampleDate } from '../inference/sampled-date.ts'
-import { modelSpreadSdDeg, NUTATION_SD_DEG } from '../sky/solstice-declination.ts'
-import { sunSemidiameter } from '../sky/sun.ts'
+import type { Branch } from '../inference/sight.ts'
+import { wrap180 } from '../quantity/degrees.ts'
 import type { BudgetCheck, BudgetRow } from './audit.ts'
-import { refractionAtHorizon, type SightlineInputs, sightOf } from './sightline-inputs.ts'
+import { sightOf } from './sight-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
 
 /** Where the uncertainty of a date comes from when the line was built exactly, largest first. */
 export function auditBudget(inputs: SightlineInputs, year: number): BudgetRow[] {
-  const { perDegree } = refractionAtHorizon(inputs)
-  return dateBudget(sightOf(inputs), year, [
-    { source: 'direction of the line', of: 'azimuth', sdDeg: inputs.azimuthSdDeg },
-    { source: 'the plan’s north', of: 'azimuth', sdDeg: inputs.northSdDeg },
-    { source: 'altitude of the horizon', of: 'altitude', sdDeg: inputs.horizonSdDeg * (1 - perDegree / 60) },
-    { source: 'refraction of the day', of: 'altitude', sdDeg: inputs.refractionSdArcmin / 60 },
-    { source: 'the Sun’s size', of: 'altitude', sdDeg: sunSemidiameter(year, inputs.event).sdArcmin / 60 },
-    { source: 'model of the obliquity', of: 'declination', sdDeg: modelSpreadSdDeg(year) },
-    { source: 'nutation', of: 'declination', sdDeg: NUTATION_SD_DEG },
-  ]).filter((row) => row.sd > 0)
+  return dateBudget(sightOf(inputs), branchAt(inputs, year), year)
 }
 
 /** The sum of a budget, and the same by draws over a stretch of years. */
@@ -27,12 +19,22 @@ export function auditBudgetCheck(
   { from, to }: { from: number; to: number },
 ): BudgetCheck {
   const linear = Math.hypot(...rows.map((row) => row.sd))
-  const { sd, noDateShare } = sampleDate(sightOf(inputs), year, from, to)
+  const { sd, noDateShare } = sampleDate(sightOf(inputs), branchAt(inputs, year), year, from, to)
   return {
     year,
     linear_sd: linear,
     sampled_sd: sd,
     no_date_share: noDateShare,
-    agree: noDateShare === 0 && Math.abs(sd / linear - 1) < 0.1,
+    agree: sd !== null && noDateShare === 0 && Math.abs(sd / linear - 1) < 0.1,
   }
+}
+
+/** The branch of the target that stands on the line in a year. */
+function branchAt(inputs: SightlineInputs, year: number): Branch {
+  const { branches, measuredDeg } = sightOf(inputs)
+  const distance = (branch: Branch) => {
+    const prediction = branch.predict(year)
+    return prediction === null ? Infinity : Math.abs(wrap180(measuredDeg - prediction.directionDeg))
+  }
+  return branches.reduce((best, branch) => (distance(branch) < distance(best) ? branch : best))
 }

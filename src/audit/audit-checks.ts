@@ -2,11 +2,11 @@ import type { Claimed, Printed } from '../claim/claim.ts'
 import { wrap180 } from '../quantity/degrees.ts'
 import { formatArcmin, formatDegrees } from '../quantity/format-angle.ts'
 import { formatNumber } from '../quantity/format-number.ts'
+import { horizonAboveCentreArcmin } from '../site/centre-altitude.ts'
 import { declinationDeg } from '../site/horizontal.ts'
 import { OBLIQUITY_MODELS, type ObliquityModelName } from '../sky/obliquity-models.ts'
-import { sunSemidiameter } from '../sky/sun.ts'
 import type { Check, SightlineAudit } from './audit.ts'
-import { centreAltitude, refractionAtHorizon, type SightlineInputs } from './sightline-inputs.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
 
 /**
  * Each intermediate result that the source prints, redone from the printed results of the steps before it, so that
@@ -19,51 +19,69 @@ export function auditChecks(
   formula: ObliquityModelName,
   year: number,
 ): Check[] {
-  const ours = refractionAtHorizon(inputs)
-  const semidiameter = claimed.semidiameterArcmin?.value ?? sunSemidiameter(year, inputs.event).arcmin
-  const refraction =
-    claimed.refractionArcmin === null ? ours : { ...ours, arcmin: claimed.refractionArcmin.value }
-  const recomputed = centreAltitude(inputs, refraction, semidiameter)
-  const altitude = claimed.altitudeDeg?.value ?? recomputed
-  const azimuth = claimed.azimuthDeg?.value ?? inputs.azimuthDeg
+  const refraction = line.refraction_arcmin.value
   const model = OBLIQUITY_MODELS[formula]
+  const altitude = recomputedAltitude(claimed, inputs, line)
+  const azimuth = claimed.azimuthDeg?.value ?? line.azimuth_deg.value
+  const declination = declinationDeg(azimuth, claimed.altitudeDeg?.value ?? altitude, inputs.latitudeDeg)
+  const fromAzimuth = (deg: number) =>
+    declinationDeg(deg, claimed.altitudeDeg?.value ?? altitude, inputs.latitudeDeg)
+  const byAzimuth =
+    claimed.azimuthDeg === null ? 0 : Math.abs(fromAzimuth(azimuth + claimed.azimuthDeg.half) - declination)
+  const halves = (...printed: (Printed | null)[]) =>
+    printed.reduce((sum, each) => sum + (each?.half ?? 0), 0) / 60
+  const ofAltitude = halves(claimed.refractionArcmin, claimed.semidiameterArcmin)
+  const airSd = claimed.refractionArcmin === null ? inputs.refractionSdArcmin / 60 : 0
+  const altitudeSd = Math.hypot(airSd, line.altitude_deg.sd)
   return [
-    ...angle('azimuth of the line', claimed.azimuthDeg, inputs.azimuthDeg, line.azimuth_deg.sd),
-    ...minutes(
-      'refraction on that horizon',
-      claimed.refractionArcmin,
-      ours.arcmin,
-      inputs.refractionSdArcmin,
-    ),
-    ...minutes(
-      'semidiameter of the Sun',
-      claimed.semidiameterArcmin,
-      sunSemidiameter(year, inputs.event).arcmin,
-      0,
-    ),
-    ...angle(
-      'true altitude of the Sun’s centre',
-      claimed.altitudeDeg,
-      recomputed,
-      line.centre_altitude_deg.sd,
-    ),
+    ...angle('azimuth of the line', claimed.azimuthDeg, line.azimuth_deg.value, 0, line.azimuth_deg.sd),
+    ...minutes('refraction', claimed.refractionArcmin, refraction, inputs.refractionSdArcmin),
+    ...minutes('semidiameter', claimed.semidiameterArcmin, line.semidiameter_arcmin?.value ?? 0, 0),
+    ...angle('true altitude of the centre', claimed.altitudeDeg, altitude, ofAltitude, airSd),
     ...angle(
       'declination',
       claimed.declinationDeg,
-      declinationDeg(azimuth, altitude, inputs.latitudeDeg),
-      line.declination_deg.sd,
+      declination,
+      byAzimuth + (claimed.altitudeDeg?.half ?? ofAltitude),
+      claimed.altitudeDeg === null ? altitudeSd : 0,
     ),
     ...angle(
       `obliquity at the asserted date (${model.label})`,
       claimed.obliquityDeg,
       model.obliquityDeg(year),
       0,
+      0,
     ),
   ]
 }
 
-/** A step whose result is an angle in degrees; its difference is told in arcseconds. */
-function angle(step: string, printed: Printed | null, oursDeg: number, sdDeg: number): Check[] {
+/** True altitude of the centre, degrees, with the refraction and the semidiameter that the source prints. */
+function recomputedAltitude(claimed: Claimed, inputs: SightlineInputs, line: SightlineAudit): number {
+  const { target } = inputs
+  const ours = line.centre_altitude_deg?.value ?? inputs.horizonDeg
+  const refraction = line.refraction_arcmin.value
+  const byRefraction = (refraction - (claimed.refractionArcmin?.value ?? refraction)) / 60
+  if (!('disc' in target) || claimed.semidiameterArcmin === null || line.semidiameter_arcmin === null) {
+    return ours + byRefraction
+  }
+  const above = (arcmin: number) => horizonAboveCentreArcmin(target.disc, arcmin)
+  const bySize = (above(line.semidiameter_arcmin.value) - above(claimed.semidiameterArcmin.value)) / 60
+  return ours + byRefraction + bySize
+}
+
+/**
+ * A step whose result is an angle in degrees; its difference is told in arcseconds.
+ *
+ * @param inputHalfDeg What half a digit of the printed results before it may move.
+ * @param sdDeg What the inputs that are not printed leave open.
+ */
+function angle(
+  step: string,
+  printed: Printed | null,
+  oursDeg: number,
+  inputHalfDeg: number,
+  sdDeg: number,
+): Check[] {
   if (printed === null) return []
   const difference = wrap180(oursDeg - printed.value)
   return [
@@ -76,7 +94,7 @@ function angle(step: string, printed: Printed | null, oursDeg: number, sdDeg: nu
       difference: difference * 3600,
       difference_printed: signedArcmin(difference * 60),
       unit: 'arcsec',
-      verdict: verdictOf(difference, printed.half, sdDeg),
+      verdict: verdictOf(difference, printed.half + inputHalfDeg, sdDeg),
     },
   ]
 }
@@ -104,8 +122,11 @@ function signedArcmin(arcmin: number): string {
   return (arcmin > 0 ? '+' : '') + formatArcmin(arcmin)
 }
 
-/** A result reproduces where it agrees to one unit of the last printed digit. */
-function verdictOf(difference: number, half: number, sd: number): Check['verdict'] {
-  if (Math.abs(difference) <= 2 * half) return 'reproduces'
-  return Math.abs(difference) <= 2 * sd ? 'within uncertainty' : 'differs'
+/**
+ * A result reproduces where it rounds to the printed one, with what rounding of the printed results before it may
+ * have moved; else where air and horizon, which the source need not have taken as here, explain the rest.
+ */
+function verdictOf(difference: number, roundingHalf: number, airSd: number): Check['verdict'] {
+  if (Math.abs(difference) <= roundingHalf * (1 + 1e-9)) return 'reproduces'
+  return Math.abs(difference) <= roundingHalf + 2 * airSd ? 'within uncertainty' : 'differs'
 }

@@ -1,11 +1,13 @@
-import { offsetSdDeg } from '../inference/comparison.ts'
+import { nearestOffset } from '../inference/comparison.ts'
 import { impliedDates, nearestApproach } from '../inference/implied-dates.ts'
 import type { ObliquityModelName } from '../sky/obliquity-models.ts'
-import { sunSemidiameter } from '../sky/sun.ts'
 import type { Implied, ImpliedDate, NearestApproach } from './audit.ts'
+import { widthAltitude } from './audit-sightline.ts'
 import { YEARS_BEYOND_WINDOW } from './defaults.ts'
 import { sunWidths } from './measures.ts'
-import { computableStretch, type SightlineInputs, sightOf } from './sightline-inputs.ts'
+import { computableStretch, sightOf } from './sight-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
+import { yardstickSemidiameterArcmin } from './sun-yardstick.ts'
 
 interface Stretch {
   from: number
@@ -43,14 +45,14 @@ export function auditImplied(
 function approachOf(inputs: SightlineInputs, { from, to }: Stretch): NearestApproach {
   const sight = sightOf(inputs)
   const { year, offsetDeg } = nearestApproach(sight, from, to)
-  const sd = offsetSdDeg(sight, year)
+  const sd = nearestOffset(sight, year)?.sdDeg ?? null
   if (offsetDeg === null || sd === null)
     return { year, offset_arcmin: null, sd_arcmin: null, sun_widths: null }
-  const semidiameter = sunSemidiameter(year, inputs.event).arcmin
+  const semidiameter = yardstickSemidiameterArcmin(year)
   return {
     year,
     offset_arcmin: offsetDeg * 60,
     sd_arcmin: sd * 60,
-    sun_widths: sunWidths(Math.abs(offsetDeg) * 60, semidiameter, inputs.horizonDeg),
+    sun_widths: sunWidths(Math.abs(offsetDeg) * 60, semidiameter, widthAltitude(inputs)),
   }
 }

@@ -1,26 +1,34 @@
 import type { Claim } from '../claim/claim.ts'
-import { yearsOfObliquity } from '../inference/declination-dates.ts'
+import { yearsOfDeclination } from '../inference/declination-dates.ts'
 import { crossingYears } from '../inference/implied-dates.ts'
 import { isUnstated } from '../quantity/unstated.ts'
 import { OBLIQUITY_MODELS, type ObliquityModelName } from '../sky/obliquity-models.ts'
 import type { Reproduction } from './audit.ts'
 import { middle, nearestYear } from './dated-label.ts'
 import { YEARS_BEYOND_WINDOW } from './defaults.ts'
-import { computableStretch, type SightlineInputs, sightOf } from './sightline-inputs.ts'
+import { computableStretch, sightOf } from './sight-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
+import { targetModel } from './targets/target-model.ts'
 
 const STEP = 20
 
 /** The models of the period check: the claimant's, then the two of today; all of them where theirs is not known. */
-export function modelsToTry({ formula }: Claim): ObliquityModelName[] {
-  if (!isUnstated(formula) && 'model' in formula) {
-    return [...new Set<ObliquityModelName>([formula.model, 'vondrak2011', 'laskar2004'])]
-  }
-  return Object.keys(OBLIQUITY_MODELS) as ObliquityModelName[]
+export function modelsToTry({ formula }: Claim, line: SightlineInputs): readonly ObliquityModelName[] {
+  const { models } = targetModel(line)
+  if (isUnstated(formula) || !('model' in formula) || !models.includes(formula.model)) return models
+  return [...new Set([formula.model, ...models.slice(0, 2)])]
+}
+
+/** The models whose dates are told with their intervals: the claimant's, and the two of today. */
+export function modelsOfDates(claim: Claim, line: SightlineInputs): readonly ObliquityModelName[] {
+  const [first, second] = targetModel(line).models
+  const theirs = modelsToTry(claim, line)[0]!
+  return [...new Set([theirs, first!, second!])]
 }
 
 /**
- * Does the last step reproduce: the date by the claimant's formula and by today's, first from the declination that the
- * source prints, then from each line as recomputed here.
+ * Does the last step reproduce: the date by the claimant's formula and by today's, first from the declination and the
+ * azimuth that the source prints, then from each line as recomputed here.
  */
 export function auditReproduction(
   claim: Claim,
@@ -34,24 +42,47 @@ export function auditReproduction(
   const routes: Route[] = lines.map((line) => ({
     from: 'sightline',
     sightline: line.name,
+    line,
     datesBy: (model) => {
       const { from, to } = computableStretch(model, span.from, span.to)
       return crossingYears(sightOf({ ...line, model }), from, to, STEP)
     },
   }))
-  if (printed !== null) {
+  const azimuth = claim.claimed.azimuthDeg
+  if (azimuth !== null && first.measures === 'azimuth') {
+    routes.unshift({
+      from: 'claimed azimuth',
+      sightline: first.name,
+      line: first,
+      datesBy: (model) => {
+        const { from, to } = computableStretch(model, span.from, span.to)
+        return crossingYears(sightOf({ ...first, measuredDeg: azimuth.value, model }), from, to, STEP)
+      },
+    })
+  }
+  if (printed !== null && targetModel(first).declinationDeg(near) !== null) {
     routes.unshift({
       from: 'claimed declination',
       sightline: first.name,
+      line: first,
       datesBy: (model) => datesOfDeclination(printed.value, first, model, span),
     })
   }
-  return routes.flatMap((route) => [...lackingRow(claim, route), ...rowsOf(route, modelsToTry(claim), near)])
+  return routes.flatMap((route) => [
+    ...lackingRow(claim, route),
+    ...rowsOf(route, modelsOf(claim, route, first), near),
+  ])
+}
+
+/** The first line is told by all models; of the others the claimant's and today's are enough. */
+function modelsOf(claim: Claim, { line }: Route, first: SightlineInputs): readonly ObliquityModelName[] {
+  return line === first ? modelsToTry(claim, line) : modelsOfDates(claim, line)
 }
 
 interface Route {
   from: Reproduction['from']
   sightline: string
+  line: SightlineInputs
   datesBy: (model: ObliquityModelName) => number[]
 }
 
@@ -101,14 +132,14 @@ function lackingRow({ formula }: Claim, { from, sightline }: Route): Reproductio
   ]
 }
 
-/** A declination on the other side of the equator than the event's has no date at all. */
+/** The years in which the target's declination is the printed one by a model. */
 function datesOfDeclination(
   declination: number,
-  { event }: SightlineInputs,
+  line: SightlineInputs,
   model: ObliquityModelName,
   span: { from: number; to: number },
 ): number[] {
-  const size = event === 'june solstice' ? declination : -declination
+  const { declinationDeg } = targetModel({ ...line, model })
   const { from, to } = computableStretch(model, span.from, span.to)
-  return yearsOfObliquity(size, OBLIQUITY_MODELS[model].obliquityDeg, from, to)
+  return yearsOfDeclination(declination, declinationDeg, from, to)
 }

@@ -1,57 +1,107 @@
-import { offsetDeg, offsetSdDeg, targetAzimuthDeg } from '../inference/comparison.ts'
+import { nearestOffset } from '../inference/comparison.ts'
+import { bestFit } from '../inference/fit.ts'
 import { driftDegPerYear } from '../inference/implied-dates.ts'
-import { declinationDeg, horizonCrossing } from '../site/horizontal.ts'
-import { solsticeDwellDays, sunSemidiameter } from '../sky/sun.ts'
-import type { Drift, SightlineAudit, Sweep } from './audit.ts'
+import type { Branch } from '../inference/sight.ts'
+import { wrap180 } from '../quantity/degrees.ts'
+import { declinationDeg } from '../site/horizontal.ts'
+import type { Drift, SightlineAudit, Sweep, Value } from './audit.ts'
+import { middle } from './dated-label.ts'
 import { centimetres, markerOf, sunWidths } from './measures.ts'
-import { centreAltitude, refractionAtHorizon, type SightlineInputs, sightOf } from './sightline-inputs.ts'
-import { eventWords, targetWords } from './words.ts'
+import { refractionAt, refractionAtHorizon } from './refraction-at.ts'
+import { sightOf } from './sight-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
+import { yardstickSemidiameterArcmin } from './sun-yardstick.ts'
+import { type TargetModel, targetModel } from './targets/target-model.ts'
 
-/** What one line says at the middle of the asserted date, with the Sun's semidiameter of that epoch. */
-export function auditSightline(inputs: SightlineInputs, year: number, sweep: Sweep | null): SightlineAudit {
-  const sight = sightOf(inputs)
-  const refraction = refractionAtHorizon(inputs)
-  const semidiameter = sunSemidiameter(year, inputs.event)
-  const altitude = centreAltitude(inputs, refraction, semidiameter.arcmin)
-  const azimuth = targetAzimuthDeg(sight, year)
-  const offset = offsetDeg(sight, year)
-  const offsetSd = offsetSdDeg(sight, year)
+/** What one line says at the middle of the asserted date, with the body's size of that epoch. */
+export function auditSightline(
+  inputs: SightlineInputs,
+  asserted: { from: number; to: number },
+  sweep: Sweep | null,
+): SightlineAudit {
+  const year = middle(asserted)
+  const target = targetModel(inputs)
+  const offset = nearestOffset(sightOf(inputs), year)
+  const semidiameter = target.semidiameter(year)
+  const altitude = centreAltitudeOf(inputs, target, year)
+  const seen = target.seenAt ?? { deg: inputs.horizonDeg, sdDeg: inputs.horizonSdDeg }
   return {
     name: inputs.name,
-    event: eventWords(inputs),
-    target: targetWords(inputs),
-    azimuth_deg: { value: inputs.azimuthDeg, sd: Math.hypot(inputs.azimuthSdDeg, inputs.northSdDeg) },
-    altitude_deg: { value: inputs.horizonDeg, sd: inputs.horizonSdDeg },
-    refraction_arcmin: { value: refraction.arcmin, sd: inputs.refractionSdArcmin },
-    semidiameter_arcmin: { value: semidiameter.arcmin, sd: semidiameter.sdArcmin },
-    centre_altitude_deg: { value: altitude, sd: sight.altitudeSdDeg(year) },
-    declination_deg: {
-      value: declinationDeg(inputs.azimuthDeg, altitude, inputs.latitudeDeg),
-      sd: declinationSd(inputs, altitude, sight.altitudeSdDeg(year)),
-    },
+    body: inputs.target.body,
+    measures: inputs.measures,
+    event: target.event,
+    target: target.description,
+    azimuth_deg: azimuthOf(inputs, target, year),
+    altitude_deg: { value: seen.deg, sd: seen.sdDeg },
+    refraction_arcmin: { value: refractionAt(inputs, seen.deg).arcmin, sd: inputs.refractionSdArcmin },
+    semidiameter_arcmin:
+      semidiameter === null ? null : { value: semidiameter.arcmin, sd: semidiameter.sdArcmin },
+    centre_altitude_deg: altitude,
+    declination_deg: altitude === null ? null : declinationOf(inputs, target, altitude, year),
     air: airOf(inputs),
     length_m: inputs.lengthM,
-    azimuth_at_asserted_deg: azimuth,
-    offset_at_asserted_arcmin: offset === null ? null : offset * 60,
-    offset_at_asserted_sd_arcmin: offsetSd === null ? null : offsetSd * 60,
-    drift: driftOf(inputs, year),
-    dwell_days: dwellDays(inputs, year),
+    direction_at_asserted_deg: offset === null ? null : offset.directionDeg,
+    offset_at_asserted_arcmin: offset === null ? null : offset.offsetDeg * 60,
+    offset_at_asserted_sd_arcmin: offset === null ? null : offset.sdDeg * 60,
+    closest_in_asserted: closestIn(inputs, asserted),
+    drift: driftOf(inputs, target.branches, year),
+    notes: target.notes(year),
     sweep,
   }
 }
 
+/** The offset in the year of a stretch in which the line fits best. */
+function closestIn(
+  inputs: SightlineInputs,
+  asserted: { from: number; to: number },
+): SightlineAudit['closest_in_asserted'] {
+  const sight = sightOf(inputs)
+  const { year } = bestFit([sight], asserted)
+  const offset = nearestOffset(sight, year)
+  return offset === null ? null : { year, offset_arcmin: offset.offsetDeg * 60, sd_arcmin: offset.sdDeg * 60 }
+}
+
+/** A measured altitude stands on the meridian, on the side of the target. */
+function azimuthOf(inputs: SightlineInputs, target: TargetModel, year: number): Value {
+  if (inputs.measures === 'azimuth') {
+    return { value: inputs.measuredDeg, sd: Math.hypot(inputs.measuredSdDeg, inputs.northSdDeg) }
+  }
+  return { value: isNorthOfZenith(inputs, target, year) ? 0 : 180, sd: 0 }
+}
+
+function isNorthOfZenith(
+  { target: { body, ...settled }, latitudeDeg }: SightlineInputs,
+  target: TargetModel,
+  year: number,
+) {
+  const declination = target.declinationDeg(year) ?? 0
+  const isLower = body === 'star' && 'at' in settled && settled.at === 'lower culmination'
+  return isLower ? latitudeDeg + declination > 0 : declination > latitudeDeg
+}
+
+/** On the meridian, the measured altitude less refraction; elsewhere where the body's centre meets the horizon. */
+function centreAltitudeOf(inputs: SightlineInputs, target: TargetModel, year: number): Value | null {
+  if (inputs.measures === 'altitude') {
+    const sd = Math.hypot(inputs.measuredSdDeg, inputs.refractionSdArcmin / 60)
+    return { value: inputs.measuredDeg - refractionAtHorizon(inputs).arcmin / 60, sd }
+  }
+  const altitude = target.altitudeDeg(year)
+  return altitude === null ? null : { value: altitude.deg, sd: altitude.sdDeg }
+}
+
 /** Errors of direction and altitude carried into the declination, by the derivatives of sin δ. */
-function declinationSd(inputs: SightlineInputs, altitude: number, altitudeSd: number): number {
+function declinationOf(inputs: SightlineInputs, target: TargetModel, altitude: Value, year: number): Value {
+  const azimuth = azimuthOf(inputs, target, year)
+  const at = (azimuthDeg: number, h: number) => declinationDeg(azimuthDeg, h, inputs.latitudeDeg)
   const step = 1e-3
-  const at = (azimuth: number, h: number) => declinationDeg(azimuth, h, inputs.latitudeDeg)
-  const { azimuthDeg } = inputs
-  const perAzimuth = (at(azimuthDeg + step, altitude) - at(azimuthDeg - step, altitude)) / (2 * step)
-  const perAltitude = (at(azimuthDeg, altitude + step) - at(azimuthDeg, altitude - step)) / (2 * step)
-  return Math.hypot(
-    perAzimuth * inputs.azimuthSdDeg,
-    perAzimuth * inputs.northSdDeg,
-    perAltitude * altitudeSd,
-  )
+  const perAzimuth =
+    (at(azimuth.value + step, altitude.value) - at(azimuth.value - step, altitude.value)) / (2 * step)
+  const perAltitude =
+    (at(azimuth.value, altitude.value + step) - at(azimuth.value, altitude.value - step)) / (2 * step)
+  return {
+    value: at(azimuth.value, altitude.value),
+    sd: Math.hypot(perAzimuth * azimuth.sd, perAltitude * altitude.sd),
+  }
 }
 
 function airOf({ refraction }: SightlineInputs): SightlineAudit['air'] {
@@ -60,25 +110,27 @@ function airOf({ refraction }: SightlineInputs): SightlineAudit['air'] {
   return { pressure_hpa: pressureHpa, temperature_c: temperatureC, humidity, lapse_k_per_km: lapseKPerKm }
 }
 
-function driftOf(inputs: SightlineInputs, year: number): Drift | null {
-  const perYear = driftDegPerYear(sightOf(inputs), year)
+/** Of the branch that stands nearest to the line in that year. */
+function driftOf(inputs: SightlineInputs, branches: readonly Branch[], year: number): Drift | null {
+  const sight = sightOf(inputs)
+  const distance = (branch: Branch) => {
+    const prediction = branch.predict(year)
+    return prediction === null ? Infinity : Math.abs(wrap180(sight.measuredDeg - prediction.directionDeg))
+  }
+  const branch = branches.reduce((best, each) => (distance(each) < distance(best) ? each : best))
+  const perYear = driftDegPerYear(sight, branch, year)
   if (perYear === null || perYear === 0) return null
   const arcminPerYear = perYear * 60
-  const semidiameter = sunSemidiameter(year, inputs.event).arcmin
+  const semidiameter = yardstickSemidiameterArcmin(year)
   return {
     arcmin_per_century: arcminPerYear * 100,
     cm_per_century: centimetres(arcminPerYear * 100, markerOf(inputs.lengthM)),
-    sun_widths_per_millennium: sunWidths(Math.abs(arcminPerYear) * 1000, semidiameter, inputs.horizonDeg),
+    sun_widths_per_millennium: sunWidths(Math.abs(arcminPerYear) * 1000, semidiameter, widthAltitude(inputs)),
     years_per_arcmin: 1 / Math.abs(arcminPerYear),
   }
 }
 
-/** The Sun's declination may fall short of its extreme by so much that its azimuth moves by 1′. */
-function dwellDays(inputs: SightlineInputs, year: number): number | null {
-  const sight = sightOf(inputs)
-  const declination = sight.declinationDeg(year)
-  const crossing = horizonCrossing(declination, sight.altitudeDeg(year), inputs.latitudeDeg, inputs.at)
-  if (crossing === null) return null
-  const marginDeg = 1 / 60 / Math.abs(crossing.perDeclination)
-  return solsticeDwellDays(year, inputs.event, Math.abs(declination), marginDeg)
+/** Along the horizon a disc is wider the higher it stands; up the meridian it is not. */
+export function widthAltitude({ measures, horizonDeg }: SightlineInputs): number {
+  return measures === 'azimuth' ? horizonDeg : 0
 }

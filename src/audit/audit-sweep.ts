@@ -87,7 +87,7 @@ function unreachedYears({ window }: SweepGround): Interval[] {
   let open = false
   window.comparisons.forEach((comparisons, i) => {
     const year = window.years[i]!
-    const missing = !comparisons.every(isReached)
+    const missing = !comparisons.every((branches) => branches.some(isReached))
     if (missing && open) runs.at(-1)![1] = year
     else if (missing) runs.push([year, year])
     open = missing

@@ -1,30 +1,31 @@
-import { targetAzimuthDeg } from '../inference/comparison.ts'
-import { wrap180 } from '../quantity/degrees.ts'
-import { sunSemidiameter } from '../sky/sun.ts'
+import { nearestOffset } from '../inference/comparison.ts'
 import type { Today } from './audit.ts'
+import { widthAltitude } from './audit-sightline.ts'
 import { centimetres, markerOf, sunWidths } from './measures.ts'
-import { type SightlineInputs, sightOf } from './sightline-inputs.ts'
+import { sightOf } from './sight-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
+import { yardstickSemidiameterArcmin } from './sun-yardstick.ts'
 
 /** How far the line is from its target in the year the audit was made. */
 export function auditToday(inputs: SightlineInputs, year: number): Today {
-  const azimuth = targetAzimuthDeg(sightOf(inputs), year)
-  if (azimuth === null) {
+  const nearest = nearestOffset(sightOf(inputs), year)
+  if (nearest === null) {
     return {
       sightline: inputs.name,
       year,
-      azimuth_deg: null,
+      direction_deg: null,
       offset_arcmin: null,
       sun_widths: null,
       offset_cm: null,
     }
   }
-  const offset = wrap180(inputs.azimuthDeg - azimuth) * 60
+  const offset = nearest.offsetDeg * 60
   return {
     sightline: inputs.name,
     year,
-    azimuth_deg: azimuth,
+    direction_deg: nearest.directionDeg,
     offset_arcmin: offset,
-    sun_widths: sunWidths(Math.abs(offset), sunSemidiameter(year, inputs.event).arcmin, inputs.horizonDeg),
+    sun_widths: sunWidths(Math.abs(offset), yardstickSemidiameterArcmin(year), widthAltitude(inputs)),
     offset_cm: centimetres(Math.abs(offset), markerOf(inputs.lengthM)),
   }
 }

@@ -109,40 +109,46 @@ export interface Value {
 
 export interface SightlineAudit {
   name: string
+  body: 'sun' | 'moon' | 'star' | 'two stars'
+  /** What the line gives: its azimuth, or an apparent altitude on the meridian. */
+  measures: 'azimuth' | 'altitude'
   /** The event in words, such as `June solstice sunrise`. */
   event: string
   /** The target in words, such as `June solstice sunrise, upper limb on the horizon`. */
   target: string
+  /** On the meridian 0 or 180. */
   azimuth_deg: Value
-  /** Apparent altitude of the horizon. */
+  /** Apparent altitude at which the target is seen: of the horizon, of a star's first sight, or the one measured. */
   altitude_deg: Value
   refraction_arcmin: Value
-  /** Semidiameter of the Sun at the middle of the asserted date. */
-  semidiameter_arcmin: Value
-  /** True altitude of the body's centre, geocentric. */
-  centre_altitude_deg: Value
-  /** Geocentric, of the body's centre; sd leaves the build tolerance out. */
-  declination_deg: Value
+  /** Semidiameter of the body at the middle of the asserted date; null for a star. */
+  semidiameter_arcmin: Value | null
+  /** True altitude of the body's centre, geocentric; null for two stars one above the other. */
+  centre_altitude_deg: Value | null
+  /** Geocentric, of the body's centre; sd leaves the build tolerance out; null likewise. */
+  declination_deg: Value | null
   /** The pressure, temperature and humidity the refraction was computed for; null where it was given. */
   air: { pressure_hpa: number; temperature_c: number; humidity: number; lapse_k_per_km: number } | null
   /** Distance from backsight to foresight, or null where the line is a bare azimuth. */
   length_m: number | null
-  /** Azimuth the target would have at the middle of the asserted date, or null where it has none. */
-  azimuth_at_asserted_deg: number | null
-  /** The line less that azimuth, arcminutes along the horizon. */
+  /** Direction the target would have at the middle of the asserted date, or null where it has none. */
+  direction_at_asserted_deg: number | null
+  /** The line less that direction, arcminutes. */
   offset_at_asserted_arcmin: number | null
   /** One standard deviation of that offset, the build tolerance left out. */
   offset_at_asserted_sd_arcmin: number | null
-  /** Movement of the target along the horizon at the asserted date. */
+  /** In the year of the asserted date in which the line fits best; null where the target is not to be seen in any. */
+  closest_in_asserted: { year: number; offset_arcmin: number; sd_arcmin: number } | null
+  /** Movement of the target at the asserted date. */
   drift: Drift | null
-  /** Days about the event for which the rising or setting stays within 1′ of its extreme azimuth at this latitude. */
-  dwell_days: number | null
+  /** Sentences on how such a target moves or comes back. */
+  notes: readonly string[]
   /** This line's own sweep; null where the claim has one line only. */
   sweep: Sweep | null
 }
 
 export interface Drift {
-  /** Positive to the right, as one faces the horizon. */
+  /** Positive to the right, as one faces the horizon; upwards for an altitude. */
   arcmin_per_century: number
   cm_per_century: number
   /** Sun's widths along the horizon in 1,000 years. */
@@ -150,15 +156,19 @@ export interface Drift {
   years_per_arcmin: number
 }
 
-/** What the figures draw: where the target stood. `azimuth_deg` is null in years in which it has none. */
+/** What the figures draw: where the target stood. `direction_deg` is null in years in which it has none. */
 export interface Track {
   sightline: string
   model: string
   years: readonly number[]
-  azimuth_deg: readonly (number | null)[]
+  /** Of several branches of one target, which: from 0. */
+  branch: number
+  /** What tells this branch from the others, such as `Mizar above` or `March equinox`; null where the target has one only. */
+  branch_words: string | null
+  direction_deg: readonly (number | null)[]
   /** One standard deviation of the comparison at τ = 0 in each year, arcminutes; null likewise. */
   sd_arcmin: readonly (number | null)[]
-  /** The measured band: the line's azimuth and its sd. */
+  /** The measured band: the line's direction and its sd. */
   line_deg: Value
 }
 
@@ -211,8 +221,8 @@ export interface Reproduction {
   model: string
   /** As the report prints it, such as `Newcomb 1895`. */
   label: string
-  /** From the declination the source prints, or from the sightline as recomputed here. */
-  from: 'claimed declination' | 'sightline'
+  /** From the declination or the azimuth that the source prints, or from the sightline as recomputed here. */
+  from: 'claimed declination' | 'claimed azimuth' | 'sightline'
   sightline: string
   /** The root nearest the middle of the asserted date. */
   year: number | null
@@ -272,7 +282,11 @@ export interface SecondWindow {
 export interface Limit {
   /** Label of the independent date; null where the claim names none. */
   against: string | null
+  /** Whether it is much the same date as the asserted one, which no line could tell apart. */
+  overlaps: boolean
   ratio_3_arcmin: number | null
+  /** Whether the asserted date leads by 3 to 1 at every tolerance up to there, and not only at some. */
+  ratio_3_steady: boolean | null
   other_date_in_95_arcmin: number | null
   half_bit_arcmin: number | null
   /** The same three as distances at the marker (`tolerance_cm` of the sweep), centimetres. */
@@ -298,7 +312,8 @@ export interface BudgetCheck {
   /** The implied date that both are about. */
   year: number
   linear_sd: number
-  sampled_sd: number
+  /** Null where no draw has a date. */
+  sampled_sd: number | null
   /** Share of the draws for which no date fits the line at all. */
   no_date_share: number
   /** Whether the two agree to a tenth, with every draw having a date: the track is straight there. */
@@ -323,8 +338,8 @@ export interface Alternative {
 export interface Today {
   sightline: string
   year: number
-  azimuth_deg: number | null
-  /** The line less that azimuth. */
+  direction_deg: number | null
+  /** The line less that direction. */
   offset_arcmin: number | null
   sun_widths: number | null
   offset_cm: number | null

@@ -10,10 +10,16 @@ export const DEFAULTS = {
   unknownHorizonSdDeg: 0.5,
   horizonSdDeg: 2 / 60,
   azimuthSdDeg: 2 / 60,
+  altitudeSdDeg: 2 / 60,
   pointSdM: 0.05,
   /** By how north was found; the compass figure is the best a compass does. */
   northSdDeg: { compass: 0.5, gps: 1 / 60, sun: 1 / 60, plan: 2 },
   disc: 'upper limb',
+  /** At noon nothing stands on the horizon: the middle of the disc, or of its light. */
+  discAtNoon: 'centre',
+  equinoxSense: 'declination zero',
+  visibilityRule: 'extinction',
+  sightedAltitudeSdDeg: 0.5,
   elevationM: 0,
   humidity: 0,
 } as const

@@ -7,7 +7,7 @@ import { airOf } from './settle-sightline.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 
 /** What the claim leaves open of the air that refraction is traced through. */
-export function airGaps(claim: Claim, of: string): Gap[] {
+export function airGaps(claim: Claim): Gap[] {
   const { atmosphere, structure } = claim
   const air = airOf(claim)
   const gap = (
@@ -25,7 +25,7 @@ export function airGaps(claim: Claim, of: string): Gap[] {
   const height = `${formatNumber(air.heightM, 4)} m`
   return [
     ...gap(
-      `temperature${of}`,
+      'temperature',
       atmosphere.temperatureC,
       `${formatNumber(air.temperatureC, 3)} °C`,
       `standard atmosphere (ISO 2533) at ${height}`,
@@ -33,7 +33,7 @@ export function airGaps(claim: Claim, of: string): Gap[] {
       ({ temperatureC }) => [{ temperatureC: temperatureC + 10 }, { temperatureC: temperatureC - 10 }],
     ),
     ...gap(
-      `pressure${of}`,
+      'pressure',
       atmosphere.pressureHpa,
       `${formatNumber(air.pressureHpa, 4)} hPa`,
       `standard atmosphere (ISO 2533) at ${height}`,
@@ -41,7 +41,7 @@ export function airGaps(claim: Claim, of: string): Gap[] {
       ({ pressureHpa }) => [{ pressureHpa: pressureHpa + 10 }, { pressureHpa: pressureHpa - 10 }],
     ),
     ...gap(
-      `humidity${of}`,
+      'humidity',
       atmosphere.humidity,
       'dry air',
       'the least of the effects of air; our choice',
@@ -49,7 +49,7 @@ export function airGaps(claim: Claim, of: string): Gap[] {
       () => [{ humidity: 1 }],
     ),
     ...gap(
-      `fall of temperature with height${of}`,
+      'fall of temperature with height',
       atmosphere.lapseKPerKm,
       `${formatNumber(air.lapseKPerKm, 3)} K/km`,
       'standard atmosphere (ISO 2533)',
@@ -57,7 +57,7 @@ export function airGaps(claim: Claim, of: string): Gap[] {
       ({ lapseKPerKm }) => [{ lapseKPerKm: lapseKPerKm + 1 }, { lapseKPerKm: lapseKPerKm - 1 }],
     ),
     ...gap(
-      `height above sea level${of}`,
+      'height above sea level',
       structure.elevationM,
       height,
       'sea level; our choice',

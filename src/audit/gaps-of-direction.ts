@@ -15,10 +15,23 @@ export function directionGaps(
   of: string,
 ): Gap[] {
   const turned = (deg: number) => (line: SightlineInputs) => [
-    { ...line, azimuthDeg: line.azimuthDeg + deg },
-    { ...line, azimuthDeg: line.azimuthDeg - deg },
+    { ...line, measuredDeg: line.measuredDeg + deg },
+    { ...line, measuredDeg: line.measuredDeg - deg },
   ]
   const { direction } = sightline
+  if (direction.by === 'altitude') {
+    if (!isUnstated(direction.altitudeDeg.sd)) return []
+    const sd = formatArcmin(DEFAULTS.altitudeSdDeg * 60)
+    return [
+      {
+        what: `uncertainty of the altitude${of}`,
+        said: direction.altitudeDeg.sd,
+        used: `± ${sd}`,
+        basis: 'a careful survey of worn stone; our choice',
+        change: { words: `an altitude ${sd} higher or lower`, of: turned(DEFAULTS.altitudeSdDeg) },
+      },
+    ]
+  }
   if (direction.by === 'azimuth') {
     if (!isUnstated(direction.azimuthDeg.sd)) return []
     const sd = formatArcmin(DEFAULTS.azimuthSdDeg * 60)
@@ -36,14 +49,14 @@ export function directionGaps(
     const said = claim.points.get(name)?.uncertaintyM
     return said === undefined || !isUnstated(said) ? [] : [{ name, said }]
   })
-  const lineSd = formatArcmin(inputs.azimuthSdDeg * 60)
+  const lineSd = formatArcmin(inputs.measuredSdDeg * 60)
   const pointGaps = points.map(
     ({ name, said }): Gap => ({
       what: `uncertainty of the point ${name}`,
       said,
       used: `± ${formatCm(DEFAULTS.pointSdM * 100)}`,
       basis: 'a taped or tachymetric survey of stones with worn edges; our choice',
-      change: { words: `the line ${lineSd} further left or right`, of: turned(inputs.azimuthSdDeg) },
+      change: { words: `the line ${lineSd} further left or right`, of: turned(inputs.measuredSdDeg) },
     }),
   )
   return [...pointGaps, ...northGap(claim, turned)]

@@ -1,28 +1,52 @@
-import type { Claim, Disc, Sightline } from '../claim/claim.ts'
+import type { Claim, Sightline } from '../claim/claim.ts'
 import { formatArcmin } from '../quantity/format-angle.ts'
+import { listed } from '../quantity/listed.ts'
 import { isUnstated } from '../quantity/unstated.ts'
+import { choicesOf } from './choices-of.ts'
 import type { Gap } from './gap.ts'
 import { airGaps } from './gaps-of-air.ts'
 import { directionGaps } from './gaps-of-direction.ts'
+import { readingsOf } from './readings-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 
 /** What one sightline leaves open, in the order of the claim file. */
 export function gapsOfLine(claim: Claim, sightline: Sightline, inputs: SightlineInputs): Gap[] {
   const of = claim.sightlines.length > 1 ? ` of ${sightline.name}` : ''
   return [
-    ...horizonGaps(sightline, inputs, of),
-    ...discGap(sightline, inputs, of),
+    ...(inputs.measures === 'azimuth' && usesHorizon(inputs) ? horizonGaps(sightline, inputs, of) : []),
+    ...targetGaps(sightline, inputs, of),
     ...directionGaps(claim, sightline, inputs, of),
-    ...refractionGaps(claim, inputs, of),
-    {
-      what: `long-term model of the obliquity${of}`,
+    ...(inputs.target.body === 'two stars' ? [] : refractionGaps(claim, inputs, of)),
+    modelGap(inputs),
+  ]
+}
+
+/** A star sighted at a stated altitude, and two stars one above the other, need no horizon. */
+function usesHorizon({ target }: SightlineInputs): boolean {
+  return target.body !== 'two stars' && !(target.body === 'star' && target.sighted.by === 'altitude')
+}
+
+function modelGap(inputs: SightlineInputs): Gap {
+  const ofStars = inputs.target.body === 'star' || inputs.target.body === 'two stars'
+  if (ofStars) {
+    return {
+      what: 'long-term model of precession',
       said: 'omitted',
       used: 'Vondrák, Capitaine & Wallace 2011',
-      basis:
-        'the most recent model for long times; half of its distance to Laskar 2004 is in the uncertainty',
-      change: { words: 'Laskar 2004 instead', of: (line) => [{ ...line, model: 'laskar2004' }] },
-    },
-  ]
+      basis: 'the only one held here that is good for long times',
+      change: {
+        words: 'the short polynomials of IAU 2006 instead',
+        of: (line) => [{ ...line, model: 'p03' }],
+      },
+    }
+  }
+  return {
+    what: 'long-term model of the obliquity',
+    said: 'omitted',
+    used: 'Vondrák, Capitaine & Wallace 2011',
+    basis: 'the most recent model for long times; half of its distance to Laskar 2004 is in the uncertainty',
+    change: { words: 'Laskar 2004 instead', of: (line) => [{ ...line, model: 'laskar2004' }] },
+  }
 }
 
 function horizonGaps({ horizonDeg: horizon }: Sightline, inputs: SightlineInputs, of: string): Gap[] {
@@ -54,23 +78,28 @@ function horizonGaps({ horizonDeg: horizon }: Sightline, inputs: SightlineInputs
   ]
 }
 
-const PARTS: readonly Disc[] = [{ part: 'upper limb' }, { part: 'centre' }, { part: 'lower limb' }]
-
-function discGap({ target }: Sightline, inputs: SightlineInputs, of: string): Gap[] {
-  if (!isUnstated(target.disc)) return []
-  const others = PARTS.filter(({ part }) => part !== inputs.disc.part)
-  return [
-    {
-      what: `part of the Sun’s disc on the horizon${of}`,
-      said: target.disc,
-      used: inputs.disc.part,
-      basis: 'the first or last gleam, the moment easiest to see; our choice',
-      change: {
-        words: 'the centre or the lower limb instead',
-        of: (line) => others.map((disc) => ({ ...line, disc })),
-      },
-    },
-  ]
+/** What of the target the claim leaves open, each with the other readings of it. */
+function targetGaps({ target: stated }: Sightline, inputs: SightlineInputs, of: string): Gap[] {
+  return choicesOf(stated).flatMap(({ choice, said, basis }) => {
+    if (!isUnstated(said)) return []
+    const readings = readingsOf(inputs.target).filter((reading) => reading.choice === choice)
+    const own = readings.find((reading) => reading.target === inputs.target)
+    const others = readings.filter((reading) => reading.target !== inputs.target)
+    return own === undefined
+      ? []
+      : [
+          {
+            what: `${choice}${of}`,
+            said,
+            used: own.value,
+            basis,
+            change: {
+              words: `${listed(others.map((reading) => reading.value))} instead`,
+              of: (line: SightlineInputs) => others.map(({ target }) => ({ ...line, target })),
+            },
+          },
+        ]
+  })
 }
 
 function refractionGaps(claim: Claim, inputs: SightlineInputs, of: string): Gap[] {
@@ -82,16 +111,16 @@ function refractionGaps(claim: Claim, inputs: SightlineInputs, of: string): Gap[
           said: atmosphere.refractionUncertaintyArcmin,
           used: `± ${formatArcmin(inputs.refractionSdArcmin)}`,
           basis:
-            '9.6′ e^(−h/1°), at least 0.3′: our choice, after Schaefer & Liller 1990 and Sampson et al. 2003',
+            '9.6′ e^(−h/1°), at least 0.3′ and at most 9.6′: our choice, after Schaefer & Liller 1990 and Sampson et al. 2003',
           change: {
             words: 'refraction larger or smaller by that much',
             of: (line) => [
-              { ...line, horizonDeg: line.horizonDeg + inputs.refractionSdArcmin / 60 },
-              { ...line, horizonDeg: line.horizonDeg - inputs.refractionSdArcmin / 60 },
+              { ...line, refractionShiftArcmin: inputs.refractionSdArcmin },
+              { ...line, refractionShiftArcmin: -inputs.refractionSdArcmin },
             ],
           },
         },
       ]
     : []
-  return inputs.refraction.by === 'claim' ? scatter : [...scatter, ...airGaps(claim, of)]
+  return inputs.refraction.by === 'claim' ? scatter : [...scatter, ...airGaps(claim)]
 }

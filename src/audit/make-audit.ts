@@ -7,7 +7,7 @@ import { auditBudget, auditBudgetCheck } from './audit-budget.ts'
 import { auditChecks } from './audit-checks.ts'
 import { auditImplied } from './audit-implied.ts'
 import { auditLimits } from './audit-limits.ts'
-import { auditReproduction, modelsToTry } from './audit-reproduction.ts'
+import { auditReproduction, modelsOfDates, modelsToTry } from './audit-reproduction.ts'
 import { auditSightline } from './audit-sightline.ts'
 import { auditSweep, groundOf, sweepStep } from './audit-sweep.ts'
 import { auditToday } from './audit-today.ts'
@@ -15,14 +15,15 @@ import { auditTracks } from './audit-tracks.ts'
 import { nearestYear } from './dated-label.ts'
 import { deepFreeze } from './deep-freeze.ts'
 import { DEFAULTS, YEARS_BEYOND_WINDOW } from './defaults.ts'
-import { outcomeOf } from './outcome.ts'
+import { verdictOf } from './outcome.ts'
 import { referencesOf } from './references.ts'
 import { auditSecondWindow } from './second-window.ts'
 import { type SettledClaim, settleClaim, yardstickOf } from './settle-claim.ts'
-import { statedOr } from './settle-sightline.ts'
+import { statedOr } from './stated-or.ts'
+import { writeSummary } from './summary/write-summary.ts'
+import { takenAs } from './taken-as.ts'
 import { listWarnings } from './warnings.ts'
 import { writeFindings } from './write-findings.ts'
-import { writeSummary } from './write-summary.ts'
 
 /** What an audit needs besides the claim: where it came from, and the clock. */
 export interface AuditContext {
@@ -43,26 +44,33 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
   const { lines, sights, dates, year, plausible, yardstick, wantedArcmin } = settled
   const { asserted, others, window } = dates
   const present = context.now.getUTCFullYear()
-  const models = modelsToTry(claim)
   const ground = groundOf(sights, dates)
   const sweep = auditSweep(ground, dates, yardstick, wantedArcmin)
   const limits = auditLimits(ground, dates, yardstick.marker)
-  const sightlines = lines.map((line) => auditSightline(line, year, ownSweep(line, settled)))
-  const implied = lines.flatMap((line) => models.map((model) => auditImplied(line, model, window, present)))
+  const sightlines = lines.map((line) => auditSightline(line, asserted, ownSweep(line, settled)))
+  const implied = lines.flatMap((line) =>
+    modelsOfDates(claim, line).map((model) => auditImplied(line, model, window, present)),
+  )
   const ours = implied.filter(({ model }) => model === 'vondrak2011')
-  const checks = auditChecks(claim.claimed, lines[0]!, sightlines[0]!, models[0]!, year)
+  const checks = auditChecks(
+    claim.claimed,
+    lines[0]!,
+    sightlines[0]!,
+    modelsToTry(claim, lines[0]!)[0]!,
+    year,
+  )
   const reproduction = auditReproduction(claim, lines, window)
-  const outcome = outcomeOf({
+  const { outcome, misfits } = verdictOf({
     sights,
-    asserted,
-    window,
-    implied: ours,
+    dates,
+    ground,
     limits,
-    plausibleHighArcmin: plausible.high_arcmin,
+    plausibleArcmin: tolerancesWithin(sweep, plausible),
   })
   const facts = { outcome, asserted, other_dates: others, plausible, window, sightlines, sweep, limits }
-  const offset = largestOffset(sightlines)
+  const offset = largestOffset(misfits.map((i) => sightlines[i]!))
   const atOffset = offset === null ? null : sweepStep(ground, dates, yardstick, offset)
+  const taken = lines.map((line, i) => takenAs(claim.sightlines[i]!, line, asserted))
   return deepFreeze({
     datestone: context.version,
     made_on: context.now.toISOString().slice(0, 10),
@@ -74,8 +82,15 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
     structure: structureOf(claim),
     assumed_precision_arcmin: isUnstated(claim.assumedPrecisionArcmin) ? null : claim.assumedPrecisionArcmin,
     ...facts,
-    summary: writeSummary({ ...facts, implied: ours, atOffset }),
-    findings: writeFindings({ ...facts, implied: ours, checks, reproduction }),
+    summary: writeSummary({
+      ...facts,
+      implied: ours,
+      misfits,
+      atOffset,
+      taken,
+      northTaken: isNorthTaken(claim),
+    }),
+    findings: writeFindings({ ...facts, implied, checks, reproduction }),
     assumptions: listAssumptions(claim, lines, window),
     tracks: lines.flatMap((line) => tracksOf(line, window)),
     implied,
@@ -86,8 +101,8 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
     alternatives: lines.flatMap((line) => auditAlternatives(line, window, year)),
     chance: null,
     today: lines.map((line) => auditToday(line, present)),
-    warnings: listWarnings(claim, settled, context.readingWarnings),
-    references: referencesOf(claim, models),
+    warnings: listWarnings(claim, settled, ours, sweep, context.readingWarnings),
+    references: referencesOf(claim, lines),
   })
 }
 
@@ -113,7 +128,7 @@ function ownSweep(
 function tracksOf(line: SettledClaim['lines'][number], window: { from: number; to: number }) {
   const from = window.from - YEARS_BEYOND_WINDOW
   const to = window.to + YEARS_BEYOND_WINDOW
-  return auditTracks(line, ['vondrak2011', 'laskar2004'], from, to)
+  return auditTracks(line, from, to)
 }
 
 /** At the implied date nearest the asserted one of the first line; empty where no date fits. */
@@ -132,9 +147,21 @@ function budgetOf(
   return { budget, budget_check: auditBudgetCheck(line, nearest, budget, span) }
 }
 
-/** Of all lines, how far the target stood from the line at the asserted date; null where one was not to be seen. */
+/** Of some lines, how far the target stood from them where it came nearest; null where one was not to be seen. */
 function largestOffset(sightlines: readonly SightlineAudit[]): number | null {
-  const offsets = sightlines.map((line) => line.offset_at_asserted_arcmin)
-  if (offsets.some((offset) => offset === null)) return null
+  const offsets = sightlines.map((line) => line.closest_in_asserted?.offset_arcmin ?? null)
+  if (offsets.length === 0 || offsets.some((offset) => offset === null)) return null
   return Math.max(...offsets.map((offset) => Math.abs(offset!)))
+}
+
+/** The tolerances of a sweep that lie in the plausible range. */
+function tolerancesWithin({ steps }: Sweep, { low_arcmin, high_arcmin }: Audit['plausible']): number[] {
+  return steps
+    .map((step) => step.tolerance_arcmin)
+    .filter((tolerance) => low_arcmin <= tolerance && tolerance <= high_arcmin)
+}
+
+/** A plan that says nothing of its north is taken as true where a line runs between its points. */
+function isNorthTaken({ north, sightlines }: Claim): boolean {
+  return north === 'omitted' && sightlines.some(({ direction }) => direction.by === 'points')
 }

@@ -10,9 +10,9 @@ export function markerOf(lengthM: number | null): Marker {
   return lengthM === null ? { distance_m: 100, measured: false } : { distance_m: lengthM, measured: true }
 }
 
-/** The distance that an angle in arcminutes spans at the marker, centimetres. */
+/** The distance that an angle in arcminutes spans at the marker, centimetres, as the crow flies. */
 export function centimetres(arcmin: number, { distance_m }: Marker): number {
-  return 100 * distance_m * Math.tan((arcmin / 60) * DEG)
+  return 200 * distance_m * Math.sin(((arcmin / 60) * DEG) / 2)
 }
 
 /** An angle along the horizon in widths of the Sun's disc, which at an altitude spans 1/cos h of its width. */

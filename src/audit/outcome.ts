@@ -1,39 +1,62 @@
-import { deviation } from '../inference/fit.ts'
+import { bestFit, type Fit, isFit } from '../inference/fit.ts'
 import type { Sight } from '../inference/sight.ts'
-import type { DatedLabel, Implied, Limit, Outcome } from './audit.ts'
-import { FITS_WITHIN_SD, YEARS_BEYOND_WINDOW } from './defaults.ts'
-import { LEADS_ALWAYS, OVERLAPS } from './limit-reasons.ts'
+import { lnRatio, type SweepGround } from '../inference/sweep.ts'
+import type { Limit, Outcome } from './audit.ts'
+import type { SweepDates } from './audit-sweep.ts'
+import { YEARS_BEYOND_WINDOW } from './defaults.ts'
+import { LEADS_ALWAYS } from './limit-reasons.ts'
 
-/** Which of the kinds of result an audit has; see `Outcome`. */
-export function outcomeOf(facts: {
+/** Which kind of result an audit has, and which lines are to blame where it is no fit. */
+export interface Verdict {
+  outcome: Outcome
+  /** Indices of the lines that by themselves do not fit the asserted date (`missed`) or any date (`none`). */
+  misfits: readonly number[]
+}
+
+/** Step in which all of the reach is looked through, years. */
+const REACH_STEP = 20
+
+export function verdictOf(facts: {
   sights: readonly Sight[]
-  asserted: DatedLabel
-  window: { from: number; to: number }
-  /** By the default model, one for each line. */
-  implied: readonly Implied[]
+  dates: SweepDates
+  ground: SweepGround
   limits: readonly Limit[]
-  plausibleHighArcmin: number
-}): Outcome {
-  const { sights, asserted, window, implied, limits, plausibleHighArcmin } = facts
-  if (sights.some((sight) => deviation(sight, asserted) > FITS_WITHIN_SD)) {
+  /** Tolerances at which the lead of the asserted date is looked at, arcminutes. */
+  plausibleArcmin: readonly number[]
+}): Verdict {
+  const { sights, dates, ground, limits, plausibleArcmin } = facts
+  const { asserted, window } = dates
+  if (!isFit(bestFit(sights, asserted), sights.length)) {
     const reach = { from: window.from - YEARS_BEYOND_WINDOW, to: window.to + YEARS_BEYOND_WINDOW }
-    const hopeless = sights.some(
-      (sight, i) => implied[i]!.dates.length === 0 && deviation(sight, reach) > FITS_WITHIN_SD,
-    )
-    return hopeless ? 'none' : 'missed'
+    const isNowhere = !isFit(bestFit(sights, reach, REACH_STEP), sights.length)
+    const step = isNowhere ? REACH_STEP : undefined
+    return {
+      outcome: isNowhere ? 'none' : 'missed',
+      misfits: misfitsOf(sights, (sight) => bestFit([sight], isNowhere ? reach : asserted, step)),
+    }
   }
-  const rivals = rivalLimits(limits)
-  if (rivals.length === 0) return 'open'
-  return rivals.every((limit) => leadsUpTo(limit) >= plausibleHighArcmin) ? 'carried' : 'premise'
+  const rivals = limits.flatMap(({ against, overlaps }, i) => (against === null || overlaps ? [] : [i]))
+  if (rivals.length === 0) return { outcome: 'open', misfits: [] }
+  const leads = rivals.every((i) => plausibleArcmin.every((tolerance) => leadsAt(ground, i, tolerance)))
+  return { outcome: leads ? 'carried' : 'premise', misfits: [] }
 }
 
-/** The limits against dates that the asserted one can be told apart from: those that do not overlap it. */
-export function rivalLimits(limits: readonly Limit[]): Limit[] {
-  return limits.filter(({ against, ratio_3_reason }) => against !== null && ratio_3_reason !== OVERLAPS)
+function misfitsOf(sights: readonly Sight[], fitOf: (sight: Sight) => Fit): number[] {
+  return sights.flatMap((sight, i) => (isFit(fitOf(sight), 1) ? [] : [i]))
 }
 
-/** The tolerance up to which the asserted date leads by 3 to 1; Infinity where it does at every one, −1 where never. */
+/** Whether the asserted date leads over an independent one by 3 to 1 at a tolerance. */
+export function leadsAt(ground: SweepGround, other: number, toleranceArcmin: number): boolean {
+  return (lnRatio(ground, other, toleranceArcmin) ?? -Infinity) >= Math.log(3)
+}
+
+/** The tolerance beyond which the asserted date no longer leads by 3 to 1; Infinity where none is known, −1: never. */
 export function leadsUpTo({ ratio_3_arcmin, ratio_3_reason }: Limit): number {
   if (ratio_3_arcmin !== null) return ratio_3_arcmin
   return ratio_3_reason === LEADS_ALWAYS ? Infinity : -1
+}
+
+/** The limits against dates that the asserted one can be told apart from. */
+export function rivalLimits(limits: readonly Limit[]): Limit[] {
+  return limits.filter(({ against, overlaps }) => against !== null && !overlaps)
 }

@@ -1,10 +1,17 @@
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatYear, formatYearRange } from '../quantity/format-year.ts'
+import { listedShort } from '../quantity/listed.ts'
 import type { DatedLabel, Implied, SweepStep, Window } from './audit.ts'
-import { listed } from './words.ts'
 
 /** Years are told to the nearest ten: no audit of a line of sight knows them better. */
 const YEAR_STEP = 10
+
+/** So many dates are told in one sentence, and the others counted. */
+const MOST_DATES = 3
+const MOST_OUTSIDE = 1
+
+/** So many parts of a set likewise. */
+const MOST_PARTS = 3
 
 /** `about 9600 BCE`. */
 export function aboutYear(year: number): string {
@@ -18,8 +25,25 @@ export function labelled({ printed, label }: DatedLabel): string {
 
 /** The dates of a line that lie in the window, in words; null where there are none. */
 export function datesInWindow({ dates }: Implied): string | null {
-  const years = dates.filter((date) => date.in_window).map(({ year }) => aboutYear(year))
-  return years.length === 0 ? null : listed(years)
+  return inWords(
+    dates.filter((date) => date.in_window),
+    MOST_DATES,
+  )
+}
+
+/** The dates of a line outside the window, nearest to it first, those to come named as such; null where there are none. */
+export function datesOutside({ dates }: Implied, window: Window): string | null {
+  const distance = (year: number) => Math.max(window.from - year, year - window.to)
+  const outside = dates.filter((date) => !date.in_window)
+  return inWords(
+    outside.sort((a, b) => distance(a.year) - distance(b.year)),
+    MOST_OUTSIDE,
+  )
+}
+
+function inWords(dates: Implied['dates'], most: number): string | null {
+  const years = dates.map(({ year, future }) => `${aboutYear(year)}${future ? ', in the future' : ''}`)
+  return years.length === 0 ? null : listedShort([...new Set(years)], most)
 }
 
 /** A set of dates in words; where the window's edge cuts it, open towards that side. */
@@ -31,12 +55,13 @@ export function setInWords(
   if (sets95.length === 0) return 'none'
   if (sets95.length === 1 && open_low && open_high) return `any date of the window, ${window.printed}`
   const last = sets95.length - 1
-  return listed(
+  return listedShort(
     sets95.map(([from, to], i) => {
       if (i === 0 && open_low) return `any up to ${formatYear(to, YEAR_STEP)}`
       if (i === last && open_high) return `any from ${formatYear(from, YEAR_STEP)} on`
       return formatYearRange(from, to, YEAR_STEP)
     }),
+    MOST_PARTS,
   )
 }
 
@@ -50,7 +75,8 @@ export function plausibleWords(plausible: {
   return `${range}, ${plausible.stated ? 'as the claim file states them' : 'this program’s default'},`
 }
 
-/** The side of the line on which its target stood, as one faces the horizon. */
-export function sideOf(offsetArcmin: number): string {
+/** The side of the line on which its target stood, as one faces the horizon; above or below for an altitude. */
+export function sideOf(offsetArcmin: number, measures: 'azimuth' | 'altitude'): string {
+  if (measures === 'altitude') return offsetArcmin > 0 ? 'below what was measured' : 'above what was measured'
   return offsetArcmin > 0 ? 'to the left of the line' : 'to the right of the line'
 }

@@ -6,13 +6,16 @@ import type { SecondWindow, Window } from './audit.ts'
 import { groundOf, type SweepDates } from './audit-sweep.ts'
 import { DEFAULTS } from './defaults.ts'
 
+/** The oldest year that a claim's window may hold. */
+const WIDEST_FROM = -29_999
+
 /** Bits and sets over another window: the default one where the claim gives its own, else a narrower one. */
 export function auditSecondWindow(
   sights: readonly Sight[],
   dates: SweepDates,
   tolerancesArcmin: readonly number[],
 ): SecondWindow {
-  const window = windowOf(isDefault(dates.window) ? narrower(dates) : DEFAULTS.window)
+  const window = windowOf(isDefault(dates.window) ? another(dates) : DEFAULTS.window)
   const ground = groundOf(sights, { ...dates, window })
   const limit = halfBitLimit(ground)
   return {
@@ -27,6 +30,12 @@ export function auditSecondWindow(
 
 function isDefault({ from, to }: Window): boolean {
   return from === DEFAULTS.window.from && to === DEFAULTS.window.to
+}
+
+/** A narrower window, or where the claim's dates leave no room for one a wider. */
+function another(dates: SweepDates): { from: number; to: number } {
+  const narrow = narrower(dates)
+  return narrow.from > dates.window.from ? narrow : { from: WIDEST_FROM, to: dates.window.to }
 }
 
 /** Every date the claim names, with a fifth of their span to the window's end to spare, in whole thousands. */

@@ -2,14 +2,16 @@ import type { Claim } from '../claim/claim.ts'
 import type { Sight } from '../inference/sight.ts'
 import { formatYearRange } from '../quantity/format-year.ts'
 import { isUnstated } from '../quantity/unstated.ts'
-import { sunSemidiameter } from '../sky/sun.ts'
 import type { Audit, Window } from './audit.ts'
+import { widthAltitude } from './audit-sightline.ts'
 import type { SweepDates, Yardstick } from './audit-sweep.ts'
 import { datedLabel, middle } from './dated-label.ts'
 import { DEFAULTS } from './defaults.ts'
 import { markerOf } from './measures.ts'
 import { settleSightline } from './settle-sightline.ts'
-import { type SightlineInputs, sightOf } from './sightline-inputs.ts'
+import { sightOf } from './sight-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
+import { yardstickSemidiameterArcmin } from './sun-yardstick.ts'
 
 /** A claim with every gap filled, as all parts of the audit use it. */
 export interface SettledClaim {
@@ -46,8 +48,8 @@ export function settleClaim(claim: Claim): SettledClaim {
 export function yardstickOf(line: SightlineInputs, year: number, lengthM: number | null): Yardstick {
   return {
     marker: markerOf(lengthM),
-    semidiameterArcmin: sunSemidiameter(year, line.event).arcmin,
-    altitudeDeg: line.horizonDeg,
+    semidiameterArcmin: yardstickSemidiameterArcmin(year),
+    altitudeDeg: widthAltitude(line),
   }
 }
 

@@ -1,57 +1,88 @@
-import type { Claim, Sightline } from '../claim/claim.ts'
+import type { Claim, Direction, Sightline } from '../claim/claim.ts'
 import { wrap360 } from '../quantity/degrees.ts'
 import { isUnstated } from '../quantity/unstated.ts'
 import { type Air, STANDARD_LAPSE_K_PER_KM, standardPressureHpa, standardTemperatureC } from '../site/air.ts'
 import { lineDirection } from '../site/line-direction.ts'
 import { refractionScatterArcmin } from '../site/refraction-scatter.ts'
 import { DEFAULTS } from './defaults.ts'
+import { settleTarget } from './settle-target.ts'
 import type { Refraction, SightlineInputs } from './sightline-inputs.ts'
-
-/** A stated value, or the default that stands in for it. */
-export function statedOr<T>(value: T | 'omitted' | 'unknown', fallback: T): T {
-  return isUnstated(value) ? fallback : (value as T)
-}
+import { statedOr } from './stated-or.ts'
 
 /** Fills every gap of one sightline of a claim with its default. */
 export function settleSightline(claim: Claim, sightline: Sightline): SightlineInputs {
-  const { horizonDeg: horizon, target } = sightline
-  const horizonDeg = isUnstated(horizon) ? 0 : horizon.value
+  const line = lineOf(claim, sightline)
   return {
     name: sightline.name,
-    event: target.event,
-    at: target.at,
-    disc: statedOr(target.disc, { part: DEFAULTS.disc }),
+    target: settleTarget(sightline.target),
     latitudeDeg: claim.structure.latitudeDeg,
-    ...directionOf(claim, sightline),
-    horizonDeg,
-    horizonSdDeg: isUnstated(horizon)
-      ? DEFAULTS.unknownHorizonSdDeg
-      : statedOr(horizon.sd, DEFAULTS.horizonSdDeg),
+    ...line,
     refraction: refractionOf(claim),
+    refractionShiftArcmin: 0,
     refractionSdArcmin: statedOr(
       claim.atmosphere.refractionUncertaintyArcmin,
-      refractionScatterArcmin(horizonDeg),
+      refractionScatterArcmin(line.horizonDeg),
     ),
     model: 'vondrak2011',
   }
 }
 
-type Direction = Pick<SightlineInputs, 'azimuthDeg' | 'azimuthSdDeg' | 'northSdDeg' | 'lengthM'>
+type Line = Pick<
+  SightlineInputs,
+  | 'measures'
+  | 'measuredDeg'
+  | 'measuredSdDeg'
+  | 'northSdDeg'
+  | 'axis'
+  | 'lengthM'
+  | 'horizonDeg'
+  | 'horizonSdDeg'
+>
 
-function directionOf(claim: Claim, { direction }: Sightline): Direction {
+function lineOf(claim: Claim, { direction, horizonDeg: horizon }: Sightline): Line {
+  if (direction.by === 'altitude') {
+    const { value, sd } = direction.altitudeDeg
+    const measuredSdDeg = statedOr(sd, DEFAULTS.altitudeSdDeg)
+    return {
+      measures: 'altitude',
+      measuredDeg: value,
+      measuredSdDeg,
+      northSdDeg: 0,
+      axis: null,
+      lengthM: null,
+      horizonDeg: value,
+      horizonSdDeg: measuredSdDeg,
+    }
+  }
+  return {
+    measures: 'azimuth',
+    ...azimuthOf(claim, direction),
+    horizonDeg: isUnstated(horizon) ? 0 : horizon.value,
+    horizonSdDeg: isUnstated(horizon)
+      ? DEFAULTS.unknownHorizonSdDeg
+      : statedOr(horizon.sd, DEFAULTS.horizonSdDeg),
+  }
+}
+
+function azimuthOf(
+  claim: Claim,
+  direction: Exclude<Direction, { by: 'altitude' }>,
+): Pick<SightlineInputs, 'measuredDeg' | 'measuredSdDeg' | 'northSdDeg' | 'axis' | 'lengthM'> {
   if (direction.by === 'azimuth') {
     return {
-      azimuthDeg: wrap360(direction.azimuthDeg.value),
-      azimuthSdDeg: statedOr(direction.azimuthDeg.sd, DEFAULTS.azimuthSdDeg),
+      measuredDeg: wrap360(direction.azimuthDeg.value),
+      measuredSdDeg: statedOr(direction.azimuthDeg.sd, DEFAULTS.azimuthSdDeg),
       northSdDeg: 0,
+      axis: null,
       lengthM: null,
     }
   }
   const line = lineDirection(surveyed(claim, direction.from), surveyed(claim, direction.to))
   return {
-    azimuthDeg: line.azimuthDeg,
-    azimuthSdDeg: line.sdDeg,
+    measuredDeg: line.azimuthDeg,
+    measuredSdDeg: line.sdDeg,
     northSdDeg: northSdDeg(claim),
+    axis: [direction.from, direction.to].sort().join('\n'),
     lengthM: line.lengthM,
   }
 }

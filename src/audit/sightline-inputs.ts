@@ -1,91 +1,53 @@
-import type { Disc } from '../claim/claim.ts'
+import type { Disc, EquinoxSense, MoonTarget, SunEvent } from '../claim/claim.ts'
 import type { Sight } from '../inference/sight.ts'
 import type { Air } from '../site/air.ts'
-import { centreAltitudeDeg, horizonAboveCentreArcmin } from '../site/centre-altitude.ts'
-import { refractionArcmin } from '../site/refraction.ts'
-import { OBLIQUITY_MODELS, type ObliquityModelName } from '../sky/obliquity-models.ts'
-import { modelSpreadSdDeg, NUTATION_SD_DEG, solsticeDeclinationDeg } from '../sky/solstice-declination.ts'
-import { hemisphere, type SolsticeEvent, SUN_PARALLAX_ARCSEC, sunSemidiameter } from '../sky/sun.ts'
+import type { VisibilityRule } from '../sky/first-visibility.ts'
+import type { ObliquityModelName } from '../sky/obliquity-models.ts'
+import type { Star } from '../sky/star-catalogue.ts'
 
 /** One sightline with every gap filled: what its target, its dates and its declination follow from. */
 export interface SightlineInputs {
   name: string
-  event: SolsticeEvent
-  at: 'rising' | 'setting'
-  disc: Disc
+  target: SettledTarget
   latitudeDeg: number
-  azimuthDeg: number
-  azimuthSdDeg: number
+  /** What the line gives: an azimuth from true north, or an apparent altitude on the meridian. */
+  measures: Sight['measures']
+  measuredDeg: number
+  measuredSdDeg: number
   northSdDeg: number
-  /** Horizontal length, metres; null where the line is a bare azimuth. */
+  /** Names its pair of points, in either direction; null where it is no line between points. */
+  axis: string | null
+  /** Horizontal length, metres; null where the line is no line between points. */
   lengthM: number | null
+  /** Apparent altitude at which the target is seen: of the horizon, or the one measured on the meridian. */
   horizonDeg: number
   horizonSdDeg: number
   refraction: Refraction
+  /** Added to the refraction, arcminutes: 0 but where the effect of another refraction is looked at. */
+  refractionShiftArcmin: number
   /** Day-to-day scatter of refraction, arcminutes. */
   refractionSdArcmin: number
+  /** Of the obliquity, and of precession for a star. */
   model: ObliquityModelName
 }
 
+export type SettledTarget =
+  | { body: 'sun'; event: SettledSunEvent; at: 'rising' | 'setting' | 'noon'; disc: Disc }
+  | { body: 'moon'; standstill: MoonTarget['standstill']; at: 'rising' | 'setting'; disc: Disc }
+  | {
+      body: 'star'
+      star: Star
+      at: 'rising' | 'setting' | 'upper culmination' | 'lower culmination'
+      sighted: Sighted
+    }
+  | { body: 'two stars'; stars: readonly [Star, Star]; above: 0 | 1 | null }
+
+export type SettledSunEvent =
+  | Exclude<SunEvent, { name: 'equinox' }>
+  | { name: 'equinox'; sense: EquinoxSense }
+
+/** The apparent altitude at which a star was sighted, or the rule for where it is first visible. */
+export type Sighted = { by: 'altitude'; deg: number; sdDeg: number } | { by: 'rule'; rule: VisibilityRule }
+
 /** Ray-traced in the claim's air, or given by the claim, less parallax. */
 export type Refraction = { by: 'ray trace'; air: Air } | { by: 'claim'; arcmin: number }
-
-/** Refraction at the horizon's apparent altitude, and how it changes with that altitude. */
-export interface RefractionAtHorizon {
-  arcmin: number
-  perDegree: number
-  /** Horizontal parallax still to be taken into account, arcseconds. */
-  parallaxArcsec: number
-}
-
-export function refractionAtHorizon(inputs: SightlineInputs): RefractionAtHorizon {
-  const { refraction, horizonDeg, latitudeDeg } = inputs
-  if (refraction.by === 'claim') return { arcmin: refraction.arcmin, perDegree: 0, parallaxArcsec: 0 }
-  const at = (altitudeDeg: number) => refractionArcmin(altitudeDeg, refraction.air, latitudeDeg)
-  return {
-    arcmin: at(horizonDeg),
-    perDegree: (at(horizonDeg + 0.05) - at(horizonDeg - 0.05)) / 0.1,
-    parallaxArcsec: SUN_PARALLAX_ARCSEC,
-  }
-}
-
-/** The sightline as the inference sees it. */
-export function sightOf(inputs: SightlineInputs): Sight {
-  const { event, model } = inputs
-  const refraction = refractionAtHorizon(inputs)
-  const horizonSd = inputs.horizonSdDeg * (1 - refraction.perDegree / 60)
-  return {
-    name: inputs.name,
-    latitudeDeg: inputs.latitudeDeg,
-    at: inputs.at,
-    azimuthDeg: inputs.azimuthDeg,
-    azimuthSdDeg: inputs.azimuthSdDeg,
-    northSdDeg: inputs.northSdDeg,
-    altitudeDeg: (year) => centreAltitude(inputs, refraction, sunSemidiameter(year, event).arcmin),
-    altitudeSdDeg: (year) =>
-      Math.hypot(horizonSd, inputs.refractionSdArcmin / 60, sunSemidiameter(year, event).sdArcmin / 60),
-    declinationDeg: (year) => solsticeDeclinationDeg(year, event, model),
-    declinationSdDeg: (year) => Math.hypot(modelSpreadSdDeg(year), NUTATION_SD_DEG),
-    declinationSign: hemisphere(event),
-  }
-}
-
-/** True altitude of the Sun's centre for a semidiameter in arcminutes, degrees. */
-export function centreAltitude(
-  inputs: SightlineInputs,
-  refraction: RefractionAtHorizon,
-  semidiameterArcmin: number,
-): number {
-  const above = horizonAboveCentreArcmin(inputs.disc, semidiameterArcmin)
-  return centreAltitudeDeg(inputs.horizonDeg, refraction.arcmin, above, refraction.parallaxArcsec)
-}
-
-/** The part of a stretch of years for which a model gives numbers. */
-export function computableStretch(
-  model: ObliquityModelName,
-  from: number,
-  to: number,
-): { from: number; to: number } {
-  const { computable } = OBLIQUITY_MODELS[model]
-  return { from: Math.max(from, computable.from), to: Math.min(to, computable.to) }
-}

@@ -1,18 +1,26 @@
 import type { Claim } from '../claim/claim.ts'
+import { nearestOffset } from '../inference/comparison.ts'
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatYearRange } from '../quantity/format-year.ts'
+import { listedShort } from '../quantity/listed.ts'
 import { isUnstated } from '../quantity/unstated.ts'
 import { bennettRefractionArcmin } from '../site/bennett.ts'
 import { OBLIQUITY_MODELS } from '../sky/obliquity-models.ts'
 import { ORBIT_SPAN } from '../sky/orbit.ts'
-import type { DatedLabel } from './audit.ts'
+import type { DatedLabel, Implied, Sweep } from './audit.ts'
+import { middle } from './dated-label.ts'
+import { refractionAtHorizon } from './refraction-at.ts'
 import type { SettledClaim } from './settle-claim.ts'
-import { refractionAtHorizon, type SightlineInputs } from './sightline-inputs.ts'
+import { sightOf } from './sight-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
+import { targetModel } from './targets/target-model.ts'
 
 /** What is doubtful about an audit but was computed all the same; shown in the report. */
 export function listWarnings(
   claim: Claim,
   settled: SettledClaim,
+  implied: readonly Implied[],
+  sweep: Sweep,
   readingWarnings: readonly string[],
 ): string[] {
   const { dates, lines } = settled
@@ -21,12 +29,20 @@ export function listWarnings(
     ...beyondOrbit(dates.asserted),
     ...beyondFormula(claim, dates.asserted),
     ...lines.flatMap(refractionParts),
+    ...new Set(lines.flatMap((line) => targetModel(line).warnings)),
+    ...lines.flatMap((line) => [
+      ...impossibleHorizon(claim, line),
+      ...nearMeridian(line, dates),
+      ...reversed(line, dates),
+    ]),
+    ...datesBeyondOrbit(implied),
+    ...unreached(sweep),
     ...(lines.length > 1 ? [SEVERAL] : []),
   ]
 }
 
 const SEVERAL =
-  'Several lines are read together: they share the errors of north and of the obliquity, but each is taken to have been built with an error of its own.'
+  'Several lines are read together: they share the errors of north and of the obliquity, and lines between the same two points their build error; otherwise each is taken to have been built and surveyed with errors of its own, also where two lines share one end.'
 
 function beyondOrbit({ printed, from, to }: DatedLabel) {
   if (ORBIT_SPAN.from <= from && to <= ORBIT_SPAN.to) return []
@@ -56,5 +72,62 @@ function refractionParts(line: SightlineInputs) {
   if (Math.abs(difference) <= 2) return []
   return [
     `Line ${line.name}: the ray-traced refraction and Bennett’s formula part by ${formatArcmin(Math.abs(difference))} in this air.`,
+  ]
+}
+
+/** No horizon lies lower than the sea's, seen from the height (1.76′ √H, the navigator's figure, with room to spare). */
+function impossibleHorizon({ structure }: Claim, { name, measures, horizonDeg }: SightlineInputs) {
+  const heightM = isUnstated(structure.elevationM) ? 0 : structure.elevationM
+  const dipArcmin = 1.76 * Math.sqrt(Math.max(0, heightM) + LOWEST_LAND_M)
+  if (measures === 'altitude' || horizonDeg * 60 > -dipArcmin) return []
+  return [
+    `Line ${name}: a horizon ${formatArcmin(-horizonDeg * 60)} below the level lies lower than any sea seen from that height; its refraction means nothing.`,
+  ]
+}
+
+/** Room for land below sea level. */
+const LOWEST_LAND_M = 450
+
+/** Where direction turns too fast with altitude for a straight sum of errors. */
+function nearMeridian(line: SightlineInputs, { asserted }: SettledClaim['dates']) {
+  const isCurved = targetModel(line).branches.some(
+    (branch) => (branch.curve?.(middle(asserted)) ?? []).length > 0,
+  )
+  if (!isCurved) return []
+  return [
+    `Line ${line.name} meets its target close to the meridian, where a small error of altitude turns the direction far: its dates are ill-conditioned. The weights are integrated over the altitude there; single dates and the budget are not to be trusted.`,
+  ]
+}
+
+/** A line that points the opposite way most likely has its ends, or rising and setting, exchanged. */
+function reversed(line: SightlineInputs, { asserted }: SettledClaim['dates']) {
+  const offset = nearestOffset(sightOf(line), middle(asserted))
+  if (line.measures === 'altitude' || offset === null || Math.abs(offset.offsetDeg) < 90) return []
+  return [
+    `Line ${line.name} points away from its target, ${Math.round(Math.abs(offset.offsetDeg))}° off: are its ends exchanged, or rising and setting?`,
+  ]
+}
+
+/** Dates found where the Sun's size is no longer tabulated. */
+function datesBeyondOrbit(implied: readonly Implied[]) {
+  const isBeyond = implied.some(({ dates }) =>
+    dates.some(({ year }) => year < ORBIT_SPAN.from || year > ORBIT_SPAN.to),
+  )
+  if (!isBeyond) return []
+  const span = formatYearRange(ORBIT_SPAN.from, ORBIT_SPAN.to)
+  return [
+    `Dates outside ${span} rest on a mean size of the Sun, 15.99′ ± 0.27′, since the table of the Earth’s orbit ends there.`,
+  ]
+}
+
+/** Years in which a target is not to be seen at its altitude. */
+function unreached({ no_target }: Sweep) {
+  if (no_target.length === 0) return []
+  const stretches = listedShort(
+    no_target.map(([from, to]) => formatYearRange(from, to, 10)),
+    4,
+  )
+  return [
+    `In ${stretches} the target is not to be seen at that altitude; these years have no weight, or only what errors of altitude give them.`,
   ]
 }

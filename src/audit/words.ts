@@ -2,19 +2,8 @@ import type { Disc } from '../claim/claim.ts'
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatCm } from '../quantity/format-length.ts'
 import { formatNumber } from '../quantity/format-number.ts'
-import type { SightlineInputs } from './sightline-inputs.ts'
 
-/** `June solstice sunrise`. */
-export function eventWords({ event, at }: Pick<SightlineInputs, 'event' | 'at'>): string {
-  const month = event === 'june solstice' ? 'June' : 'December'
-  return `${month} solstice ${at === 'rising' ? 'sunrise' : 'sunset'}`
-}
-
-/** `June solstice sunrise, upper limb on the horizon`. */
-export function targetWords(inputs: Pick<SightlineInputs, 'event' | 'at' | 'disc'>): string {
-  return `${eventWords(inputs)}, ${discWords(inputs.disc)}`
-}
-
+/** `upper limb on the horizon`. */
 export function discWords(disc: Disc): string {
   if (disc.part === 'showing') return `${formatArcmin(disc.showingArcmin)} of the disc showing`
   return `${disc.part} on the horizon`
@@ -24,12 +13,6 @@ export function discWords(disc: Disc): string {
 export function inThreeMeasures(arcmin: number, cm: number, distanceM: number, sunWidths: number): string {
   const place = `${formatCm(cm)} at ${formatNumber(distanceM, 3)} m`
   return `${formatArcmin(arcmin)} (${place}, ${widthsInWords(sunWidths)})`
-}
-
-/** `a`, `a and b`, `a, b and c`. */
-export function listed(items: readonly string[]): string {
-  if (items.length < 2) return items.join('')
-  return `${items.slice(0, -1).join(', ')} and ${items.at(-1)}`
 }
 
 function widthsInWords(sunWidths: number): string {

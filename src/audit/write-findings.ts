@@ -1,9 +1,9 @@
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatNumber } from '../quantity/format-number.ts'
 import { formatYear } from '../quantity/format-year.ts'
+import { listed } from '../quantity/listed.ts'
 import type { Audit, Check, Finding, Limit, Reproduction } from './audit.ts'
 import { aboutYear, labelled, setInWords } from './phrases.ts'
-import { listed } from './words.ts'
 
 type Facts = Pick<
   Audit,
@@ -30,32 +30,57 @@ export function writeFindings(facts: Facts): Finding[] {
 }
 
 function reproduces({ checks, reproduction, asserted }: Facts): Finding {
-  const differing = checks.filter(({ verdict }) => verdict === 'differs')
-  const tested = reproduction.filter(({ within_model_range }) => within_model_range === true)
-  const strayed = reproduction.find(({ within_model_range }) => within_model_range === false)
-  const steps =
-    checks.length === 0
-      ? 'The source prints no intermediate results that could be checked.'
-      : differing.length === 0
-        ? `Every step that the source prints comes out again: ${listed(checks.map(stepWords))}.`
-        : `Not every step comes out again: ${listed(differing.map(stepWords))}.`
-  const last =
-    tested.length === 0
-      ? 'No formula gives a date within its range.'
-      : `The date by ${listed(tested.slice(0, 3).map(dateWords))}, against the ${asserted.printed} asserted.`
-  const beyond =
-    strayed === undefined ? '' : ` ${strayed.label} gives ${formatYear(strayed.year!)}, outside its range.`
-  const untestable = reproduction.find(
-    ({ reason, model_range }) => reason !== null && model_range === 'not known here',
+  const route = reproduction[0]!
+  const rows = reproduction.filter(
+    ({ from, sightline }) => from === route.from && sightline === route.sightline,
   )
+  const untestable = rows.find(({ model_range }) => model_range === 'not known here')
   return {
     question: 'Does the arithmetic reproduce?',
-    answer: `${steps} ${last}${beyond}`,
+    answer: `${stepsWords(checks)} ${lastStepWords(rows, asserted.printed)}`,
     because:
       untestable === undefined
         ? 'Each step was redone from the printed results of the steps before it.'
         : `The claimant’s table, ${untestable.label}, is not held here, so the last step could be redone only with others.`,
   }
+}
+
+function stepsWords(checks: readonly Check[]): string {
+  if (checks.length === 0) return 'The source prints no intermediate results that could be checked.'
+  const by = (verdict: Check['verdict']) => checks.filter((check) => check.verdict === verdict).map(stepWords)
+  return [
+    ...sentence(by('reproduces'), 'comes out again', 'come out again'),
+    ...sentence(
+      by('within uncertainty'),
+      'differs by no more than air and horizon explain',
+      'differ by no more than air and horizon explain',
+    ),
+    ...sentence(by('differs'), 'does not come out again', 'do not come out again'),
+  ].join(' ')
+}
+
+function sentence(steps: readonly string[], one: string, several: string): string[] {
+  if (steps.length === 0) return []
+  const words = listed(steps)
+  return [`${words.charAt(0).toUpperCase()}${words.slice(1)} ${steps.length === 1 ? one : several}.`]
+}
+
+const ROUTES = {
+  'claimed declination': 'From the declination printed',
+  'claimed azimuth': 'From the azimuth printed',
+  sightline: 'From the line as it stands',
+} as const
+
+/** The last step by the first of its routes, the claimant's formula first. */
+function lastStepWords(rows: readonly Reproduction[], asserted: string): string {
+  const { from, sightline } = rows[0]!
+  const route = from === 'sightline' ? `${ROUTES[from]} (${sightline})` : ROUTES[from]
+  const dated = rows.filter(({ within_model_range }) => within_model_range === true)
+  const strayed = rows.find(({ within_model_range }) => within_model_range === false)
+  const beyond =
+    strayed === undefined ? '' : ` ${strayed.label} gives ${formatYear(strayed.year!)}, outside its range.`
+  if (dated.length === 0) return `${route} no formula gives a date within its range.${beyond}`
+  return `${route} the date by ${listed(dated.slice(0, 3).map(dateWords))}, against the ${asserted} asserted.${beyond}`
 }
 
 function stepWords({ step, difference_printed, verdict }: Check): string {
@@ -75,16 +100,18 @@ function dates({ implied }: Facts): Finding {
         const place = future ? ' (in the future)' : in_window ? '' : ' (outside the window)'
         return aboutYear(year) + place
       })
-      return `${name}${listed(years)}.`
+      return `${name}${listed([...new Set(years)])}.`
     }
-    if (nearest_approach?.offset_arcmin == null) return `${name}none; the Sun does not cross that horizon.`
+    if (nearest_approach?.offset_arcmin == null)
+      return `${name}none; it is not to be seen at that altitude in any year of the window.`
     return `${name}none; nearest in ${aboutYear(nearest_approach.year)}, ${formatArcmin(Math.abs(nearest_approach.offset_arcmin))} away.`
   })
   return {
     question: 'Which dates fit the line as measured, had it been built exactly?',
     answer: sentences.join(' '),
-    because:
-      'The obliquity of the ecliptic swings between 22.1° and 24.5° in about 41,000 years, so most directions have more than one date, or none.',
+    because: implied.some(({ model }) => model === 'laskar2004')
+      ? 'The obliquity of the ecliptic swings between 22.1° and 24.5° in about 41,000 years, so a direction may have several dates, or none.'
+      : 'Precession carries the pole of the sky once round in about 26,000 years, so a direction may have several dates, or none.',
   }
 }
 

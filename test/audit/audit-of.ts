@@ -1,13 +1,14 @@
 import { readFileSync } from 'node:fs'
 import type { Audit } from '../../src/audit/audit.ts'
 import { makeAudit } from '../../src/audit/make-audit.ts'
+import { findStar } from '../../src/audit/star-names.ts'
 import { readClaim } from '../../src/claim/read-claim.ts'
 
 export const NOW = new Date('2026-12-01T12:00:00Z')
 
 /** The audit of a claim file's text; throws with the problems where the text has errors. */
 export function auditOf(text: string, now = NOW): Audit {
-  const { claim, problems } = readClaim(text)
+  const { claim, problems } = readClaim(text, { findStar })
   if (claim === null) throw new Error(problems.map(({ message }) => message).join('\n'))
   return makeAudit(claim, {
     version: 'test',

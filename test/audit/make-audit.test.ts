@@ -113,7 +113,8 @@ describe('outcomes of the samples', () => {
   test('a date that overlaps the asserted one is no rival to it', () => {
     const audit = auditOf(claimText({ other_dates: '[{label: seeds, date: 2050 BCE to 1950 BCE}]' }))
     expect(audit.outcome).toBe('open')
-    expect(audit.limits[0]!.ratio_3_reason).toMatch(/overlaps/)
+    expect(audit.limits[0]).toMatchObject({ overlaps: true, ratio_3_arcmin: null })
+    expect(audit.limits[0]!.ratio_3_reason).toMatch(/much the same date/)
   })
 })
 
@@ -122,7 +123,7 @@ describe('a Sun that never sets', () => {
 
   test('has no date, and says why in words', () => {
     expect(audit.outcome).toBe('none')
-    expect(audit.summary[0]).toMatch(/does not cross that horizon/)
+    expect(audit.summary[0]).toMatch(/not to be seen at that altitude in any year/)
     const longTerm = audit.implied.filter(({ model }) => model === 'vondrak2011' || model === 'laskar2004')
     expect(longTerm.map(({ dates }) => dates)).toEqual([[], []])
   })
@@ -154,7 +155,7 @@ describe('two lines', () => {
   })
 
   test('carry a warning that each was built with an error of its own', () => {
-    expect(audit.warnings.join()).toMatch(/error of its own/)
+    expect(audit.warnings.join()).toMatch(/with errors of its own/)
   })
 })
 
@@ -215,7 +216,7 @@ describe('a printed chain of results', () => {
     expect(azimuth!.difference).toBeCloseTo(-3600, 6)
     // sin δ = sin φ sin h + cos φ cos h cos A with A = 51.2°, φ = 50°, h of the audit.
     const rad = Math.PI / 180
-    const h = audit.sightlines[0]!.centre_altitude_deg.value * rad
+    const h = audit.sightlines[0]!.centre_altitude_deg!.value * rad
     const want =
       Math.asin(Math.sin(50 * rad) * Math.sin(h) + Math.cos(50 * rad) * Math.cos(h) * Math.cos(51.2 * rad)) /
       rad

@@ -114,8 +114,8 @@ describe('the printed example of 1902', () => {
 
   test('no parallax is added to a refraction that has it taken off', () => {
     // 35′30″ − 27′20″ − (15′45″ − 2′) = −5′35″ with the printed semidiameter; ours of the epoch is larger by 0.1′.
-    const altitude = audit.sightlines[0]!.centre_altitude_deg.value * 60
-    const semidiameter = audit.sightlines[0]!.semidiameter_arcmin.value
+    const altitude = audit.sightlines[0]!.centre_altitude_deg!.value * 60
+    const semidiameter = audit.sightlines[0]!.semidiameter_arcmin!.value
     expect(altitude).toBeCloseTo(35.5 - 27 - 20 / 60 - semidiameter + 2, 6)
   })
 })

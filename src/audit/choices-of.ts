@@ -1,0 +1,48 @@
+import type { Target } from '../claim/claim.ts'
+
+/** Something that a target leaves to be chosen. */
+export interface Choice {
+  /** As `readingsOf` names it. */
+  choice: string
+  said: unknown
+  basis: string
+}
+
+/** Everything that the readings of a target can differ in, and what the claim says of it. */
+export function choicesOf(target: Target): Choice[] {
+  switch (target.body) {
+    case 'sun':
+      return [
+        ...(target.event.name === 'equinox'
+          ? [
+              {
+                choice: 'sense of equinox',
+                said: target.event.sense,
+                basis: 'the astronomers’ sense, though no builder could see it; our choice',
+              },
+            ]
+          : []),
+        { choice: 'part of the disc', said: target.disc, basis: discBasis(target.at === 'noon') },
+      ]
+    case 'moon':
+      return [{ choice: 'part of the disc', said: target.disc, basis: discBasis(false) }]
+    case 'star':
+      return [
+        {
+          choice: 'where the star is seen',
+          said: target.altitudeDeg,
+          basis: 'a loss of 0.25 magnitudes per air mass and a limit of 6; our choice',
+        },
+      ]
+    case 'two stars':
+      return [
+        { choice: 'which star is above', said: target.above, basis: 'both happen once a day; both count' },
+      ]
+  }
+}
+
+function discBasis(atNoon: boolean): string {
+  return atNoon
+    ? 'the middle of the light that falls through an opening; our choice'
+    : 'the first or last gleam, the moment easiest to see; our choice'
+}

@@ -1,0 +1,45 @@
+import { formatArcmin } from '../../quantity/format-angle.ts'
+import { formatYearRange } from '../../quantity/format-year.ts'
+import { YEARS_BEYOND_WINDOW } from '../defaults.ts'
+import { aboutYear, sideOf } from '../phrases.ts'
+import { takenAs } from './missed.ts'
+import { threeMeasures } from './parts.ts'
+import { shortened } from './shortened.ts'
+import type { SummaryFacts } from './summary-facts.ts'
+
+/** No date in reach fits. */
+export function none(facts: SummaryFacts): string[] {
+  const { window, implied, sightlines, misfits } = facts
+  if (misfits.length === 0) {
+    return [
+      `No date fits all ${sightlines.length} lines together: each has dates of its own, but not the same ones.`,
+      'Either they were not all meant so, or they were built with larger errors than this survey, horizon and air have. This audit does not decide which.',
+    ]
+  }
+  const index = worst(facts)
+  const { event, measures, name } = sightlines[index]!
+  const which = sightlines.length > 1 ? `the line ${shortened(name)}` : 'the line'
+  const near = implied[index]!.nearest_approach
+  if (near === null || near.offset_arcmin === null || near.sd_arcmin === null) {
+    return [
+      `No date fits ${which}. At this latitude the ${event} is not to be seen at that altitude in any year of ${window.printed}. ${takenAs(facts, index)}`.trim(),
+      'Either the line was meant for something else, or latitude, horizon or target are not as stated. This audit does not decide which.',
+    ]
+  }
+  const years = formatYearRange(window.from - YEARS_BEYOND_WINDOW, window.to + YEARS_BEYOND_WINDOW)
+  return [
+    `No date fits ${which}. From ${years} the ${event} never stands on it. In the window it came nearest in ${aboutYear(near.year)}, and then stood ${threeMeasures(facts, Math.abs(near.offset_arcmin))} ${sideOf(near.offset_arcmin, measures)}, give or take ${formatArcmin(near.sd_arcmin)} (one standard deviation) for survey, horizon and air. ${takenAs(facts, index)}`.trim(),
+    'For any date at all the builders must have been off by about that much or more; or the line was meant for something else; or survey, horizon or target are not as stated. This audit does not decide which.',
+  ]
+}
+
+/** Of the lines without a date the one that is furthest off in units of its own error. */
+function worst({ misfits, implied }: SummaryFacts): number {
+  const deviations = misfits.map((i) => {
+    const near = implied[i]!.nearest_approach
+    return near?.offset_arcmin == null || near.sd_arcmin == null
+      ? Infinity
+      : Math.abs(near.offset_arcmin) / near.sd_arcmin
+  })
+  return misfits[deviations.indexOf(Math.max(...deviations))]!
+}

@@ -1,0 +1,46 @@
+import { formatArcmin } from '../../quantity/format-angle.ts'
+import type { Limit, SweepStep } from '../audit.ts'
+import { middle } from '../dated-label.ts'
+import { centimetres, sunWidths } from '../measures.ts'
+import { leadsUpTo, rivalLimits } from '../outcome.ts'
+import { labelled } from '../phrases.ts'
+import { yardstickSemidiameterArcmin } from '../sun-yardstick.ts'
+import { inThreeMeasures } from '../words.ts'
+import { grammarOf } from './grammar.ts'
+import { shortened } from './shortened.ts'
+import type { SummaryFacts } from './summary-facts.ts'
+
+/** `24′ (71 cm at 99.9 m, 0.74 of the Sun’s width)`. */
+export function threeMeasures({ sweep, sightlines, asserted }: SummaryFacts, arcmin: number): string {
+  const { measures, altitude_deg } = sightlines[0]!
+  const semidiameter = yardstickSemidiameterArcmin(middle(asserted))
+  const widths = sunWidths(arcmin, semidiameter, measures === 'azimuth' ? altitude_deg.value : 0)
+  return inThreeMeasures(arcmin, centimetres(arcmin, sweep.marker), sweep.marker.distance_m, widths)
+}
+
+/** What half a bit means for this claim; empty where it is told at every tolerance. */
+export function halfBit({ limits, sightlines, window }: SummaryFacts): string {
+  const { half_bit_arcmin } = limits[0]!
+  if (half_bit_arcmin === null) return ''
+  const { it, tells } = grammarOf(sightlines)
+  const from = half_bit_arcmin === 0 ? 'Even built exactly' : `From ${formatArcmin(half_bit_arcmin)} on`
+  return `${from} ${it} ${tells} less than half a bit about the date, of ${window.printed}.`
+}
+
+/** The independent date over which the asserted one loses its lead first. */
+export function tightestLimit(limits: readonly Limit[]): Limit {
+  return rivalLimits(limits).reduce((a, b) => (leadsUpTo(b) < leadsUpTo(a) ? b : a))
+}
+
+/** `800 to 500 BCE (radiocarbon)`. */
+export function againstWords({ other_dates }: SummaryFacts, { against }: Limit): string {
+  const other = other_dates.find(({ label }) => label === against)!
+  return labelled({ ...other, label: shortened(other.label) })
+}
+
+/** The step of a tolerance that the sweep includes exactly. */
+export function stepAt(steps: readonly SweepStep[], arcmin: number): SweepStep {
+  const step = steps.find(({ tolerance_arcmin }) => tolerance_arcmin === arcmin)
+  if (step === undefined) throw new Error(`the sweep lacks the tolerance of ${arcmin}′`)
+  return step
+}

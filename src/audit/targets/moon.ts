@@ -1,0 +1,56 @@
+import { horizonBranch, type Uncertain } from '../../inference/horizon-branch.ts'
+import {
+  MOON_NEARNESS_SD,
+  MOON_PARALLAX_ARCMIN,
+  MOON_SEMIDIAMETER_ARCMIN,
+  MOON_WOBBLE_SD_ARCMIN,
+  STANDSTILL_CYCLE_YEARS,
+  type StandstillEvent,
+  standstillDeclinationDeg,
+} from '../../sky/moon.ts'
+import type { SettledTarget, SightlineInputs } from '../sightline-inputs.ts'
+import { discWords } from '../words.ts'
+import { discAltitude } from './disc-altitude.ts'
+import { obliquityErrors } from './obliquity-errors.ts'
+import { SUN_MODELS } from './sun.ts'
+import type { TargetModel } from './target-model.ts'
+
+/** The Moon at a standstill, rising or setting. */
+export function moonTarget(
+  inputs: SightlineInputs,
+  target: Extract<SettledTarget, { body: 'moon' }>,
+): TargetModel {
+  const { standstill, at, disc } = target
+  const event: StandstillEvent = `${standstill.side} ${standstill.size} standstill`
+  const semidiameter = () => ({ arcmin: MOON_SEMIDIAMETER_ARCMIN, sdArcmin: 0 })
+  const altitude = discAltitude(inputs, disc, {
+    semidiameter,
+    parallaxArcsec: MOON_PARALLAX_ARCMIN * 60,
+    nearnessSd: MOON_NEARNESS_SD,
+  })
+  const declination = (year: number): Uncertain => ({
+    deg: standstillDeclinationDeg(year, event, inputs.model),
+    errors: [
+      ...obliquityErrors(year, standstill.side === 'northern' ? 1 : -1),
+      { source: 'the wobble of the Moon’s path', sdDeg: MOON_WOBBLE_SD_ARCMIN / 60 },
+    ],
+  })
+  const words = `${event} ${at === 'rising' ? 'moonrise' : 'moonset'}`
+  return {
+    event: words,
+    description: `${words}, ${discWords(disc)}`,
+    branches: [horizonBranch({ latitudeDeg: inputs.latitudeDeg, at, altitude, declination })],
+    declinationDeg: (year) => declination(year).deg,
+    altitudeDeg: (year) => {
+      const { deg, errors } = altitude(year)
+      return { deg, sdDeg: Math.hypot(...errors.map(({ sdDeg }) => sdDeg)) }
+    },
+    seenAt: null,
+    semidiameter,
+    models: SUN_MODELS,
+    notes: () => [
+      `A standstill comes back every ${STANDSTILL_CYCLE_YEARS} years; for a year or so about it the Moon gets as far once in each month, and within that swings by 9′ to either side every 173 days. In most years no moonrise or moonset stands there.`,
+    ],
+    warnings: [],
+  }
+}
