@@ -25,6 +25,12 @@ export const CITATIONS: Readonly<Record<string, Citation>> = {
     title: 'The calculation of astronomical refraction in marine navigation',
     where: 'Journal of Navigation 35, 255',
   },
+  hoffleit1991: {
+    authors: 'Hoffleit, D. & Warren, W. H.',
+    year: 1991,
+    title: 'The Bright Star Catalogue, 5th revised edition',
+    where: 'Astronomical Data Center, NSSDC, NASA',
+  },
   hohenkerk1985: {
     authors: 'Hohenkerk, C. Y. & Sinclair, A. T.',
     year: 1985,
@@ -85,6 +91,12 @@ export const CITATIONS: Readonly<Record<string, Citation>> = {
     year: 1883,
     title: 'The pyramids and temples of Gizeh',
     where: 'London, Field & Tuer',
+  },
+  rozenberg1966: {
+    authors: 'Rozenberg, G. V.',
+    year: 1966,
+    title: 'Twilight: a study in atmospheric optics',
+    where: 'New York, Plenum Press',
   },
   ruggles1984: {
     authors: 'Ruggles, C. L. N.',

@@ -9,7 +9,7 @@ import { figuresOf } from '../../src/report/figures-of.ts'
 import { plainText } from '../../src/report/plain-text.ts'
 import { renderTemplate } from '../../src/report/template/render-template.ts'
 import { writeMarkdown } from '../../src/report/write-markdown.ts'
-import { completeAudit, OUTCOMES, severalLinesAudit } from './complete-audit.ts'
+import { auditOfKind, completeAudit, KINDS, OUTCOMES, severalLinesAudit } from './complete-audit.ts'
 
 const TEMPLATE = readFileSync(new URL('../../templates/audit.md', import.meta.url), 'utf8')
 
@@ -49,11 +49,14 @@ function words(node: Nodes): number {
     : plainText(node).split(/\s+/).filter(Boolean).length
 }
 
-const AUDITS: readonly (readonly [name: string, audit: Audit])[] = OUTCOMES.flatMap((outcome) => [
-  [`${outcome}, one line`, completeAudit(outcome)] as const,
-  [`${outcome}, two lines`, severalLinesAudit(outcome)] as const,
-  [`${outcome}, nothing but the figures`, bareAudit(outcome)] as const,
-])
+const AUDITS: readonly (readonly [name: string, audit: Audit])[] = [
+  ...OUTCOMES.flatMap((outcome) => [
+    [`${outcome}, one line`, completeAudit(outcome)] as const,
+    [`${outcome}, two lines`, severalLinesAudit(outcome)] as const,
+    [`${outcome}, nothing but the figures`, bareAudit(outcome)] as const,
+  ]),
+  ...KINDS.map((kind) => [kind, auditOfKind(kind)] as const),
+]
 
 /** As little as an audit can hold. */
 function bareAudit(outcome: Outcome): Audit {
@@ -169,6 +172,66 @@ describe('what must not be missing from any report', () => {
     const markdown = markdownOf(completeAudit('carried'))
     expect(markdown).toContain('within the window 3001 BCE to 2026 CE')
     expect(markdown).toContain('The same in a second window, 12,001 BCE to 2026 CE.')
+  })
+})
+
+describe('each kind of target', () => {
+  /** The items of the methods by their lead, in order. */
+  function methods(audit: Audit): string[] {
+    const { children } = render(audit)
+    const start = children.findIndex((node) => node.type === 'heading' && plainText(node) === 'Methods')
+    const lists = children.slice(start + 1).filter((node) => node.type === 'list')
+    return lists[0]!.children.map((item) => plainText(item).split('.')[0]!)
+  }
+
+  it.each([
+    ['equinox', ['Direction', 'Sun', 'Air']],
+    ['noon', ['Meridian', 'Sun', 'Air']],
+    ['moon', ['Direction', 'Moon', 'Air']],
+    ['star', ['Direction', 'Stars', 'First sight', 'Air']],
+    ['pair', ['Stars', 'Two stars']],
+  ] as const)('has the methods of %s in one list, and no others', (kind, leads) => {
+    expect(methods(auditOfKind(kind))).toEqual([...leads, 'Uncertainty', 'Sweep'])
+  })
+
+  it.each(KINDS)(
+    'warns of looking at the Sun where it is a target, and always asks for permission: %s',
+    (kind) => {
+      const markdown = markdownOf(auditOfKind(kind))
+      const isSun = ['equinox', 'noon', 'calendar'].includes(kind)
+      expect(markdown.includes('Never look at the Sun')).toBe(isSun)
+      expect(markdown).toContain('Ask for permission before entering a site.')
+    },
+  )
+
+  it.each(['star', 'vanishing', 'never', 'pair'] as const)(
+    'says nothing of the Earth’s tilt for stars: %s',
+    (kind) => {
+      expect(markdownOf(auditOfKind(kind, { assumptions: [], budget: [] }))).not.toMatch(
+        /Earth’s tilt|[Oo]bliquity|solstice|half the Sun/,
+      )
+    },
+  )
+
+  it.each(['equinox', 'noon', 'moon', 'calendar'] as const)(
+    'says nothing of precession for others: %s',
+    (kind) => {
+      const text = markdownOf(auditOfKind(kind)).replace(/## References[\s\S]*/, '')
+      expect(text).not.toMatch(/precession|[Ss]tars/)
+    },
+  )
+
+  it('cites the catalogue for stars, and the air mass where one rises', () => {
+    expect(markdownOf(auditOfKind('pair'))).toMatch(/Hoffleit, D\. & Warren, W\. H\. 1991/)
+    expect(markdownOf(auditOfKind('pair'))).not.toContain('Rozenberg')
+    expect(markdownOf(auditOfKind('star'))).toMatch(/Rozenberg, G\. V\. 1966/)
+    expect(markdownOf(auditOfKind('moon'))).not.toMatch(/Hoffleit|Rozenberg/)
+  })
+
+  it('has a table of the lines of a calendar, each by itself and all together', () => {
+    const markdown = markdownOf(auditOfKind('calendar'))
+    expect(markdown).toContain('Each line by itself, and all together')
+    expect(markdownOf(auditOfKind('noon'))).not.toContain('Each line by itself')
   })
 })
 

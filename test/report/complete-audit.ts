@@ -1,5 +1,12 @@
 import type { Audit, Outcome, Reproduction, SightlineAudit, SweepStep } from '../../src/audit/audit.ts'
-import { carriedAudit, missedAudit, noneAudit, partsAudit, premiseAudit } from './figures/cases.ts'
+import {
+  carriedAudit,
+  CASES as FIGURE_CASES,
+  missedAudit,
+  noneAudit,
+  partsAudit,
+  premiseAudit,
+} from './figures/cases.ts'
 import { trackOf } from './figures/make-audit.ts'
 
 const CASES: Readonly<Record<Outcome, () => Audit>> = {
@@ -17,7 +24,18 @@ export const OUTCOMES = Object.keys(CASES) as Outcome[]
  * `changes` replaces whole fields.
  */
 export function completeAudit(outcome: Outcome = 'premise', changes: Partial<Audit> = {}): Audit {
-  const audit = CASES[outcome]()
+  return { ...completed(CASES[outcome]()), ...changes }
+}
+
+/** The targets that figures are tried on: cases of figures/cases.ts other than the June solstice sunrise. */
+export const KINDS = ['equinox', 'noon', 'moon', 'star', 'vanishing', 'never', 'pair', 'calendar'] as const
+
+/** Such an audit of another target. */
+export function auditOfKind(kind: (typeof KINDS)[number], changes: Partial<Audit> = {}): Audit {
+  return { ...completed(FIGURE_CASES[kind]!()), ...changes }
+}
+
+function completed(audit: Audit): Audit {
   return {
     ...audit,
     source: 'Thornmere visitor leaflet, third printing, page 4',
@@ -87,19 +105,14 @@ export function completeAudit(outcome: Outcome = 'premise', changes: Partial<Aud
       alternative('upper limb on the horizon', [-9600, 13_900], -9600),
       alternative('centre on the horizon', [], null),
     ],
-    today: [
-      {
-        sightline: 'midsummer',
-        year: 2026.4,
-        azimuth_deg: 59,
-        offset_arcmin: -65,
-        sun_widths: 2.1,
-        offset_cm: 190,
-      },
-    ],
+    today: audit.sightlines.map(({ name, direction_at_asserted_deg: asserted }) => ({
+      ...{ sightline: name, year: 2026.4 },
+      ...(asserted === null
+        ? { direction_deg: null, offset_arcmin: null, sun_widths: null, offset_cm: null }
+        : { direction_deg: 59, offset_arcmin: -65, sun_widths: 2.1, offset_cm: 190 }),
+    })),
     warnings: ['The formula is used outside its range.'],
     references: ['vondrak2011', 'laskar2004', 'newcomb1895'],
-    ...changes,
   }
 }
 
@@ -114,14 +127,15 @@ export function severalLinesAudit(outcome: Outcome = 'premise'): Audit {
     length_m: null,
     air: null,
     drift: null,
-    dwell_days: null,
-    azimuth_at_asserted_deg: null,
+    notes: [],
+    direction_at_asserted_deg: null,
     offset_at_asserted_arcmin: null,
+    closest_in_asserted: null,
   }
   const line = { value: 57.9077, sd: 1 / 60 }
   return {
     ...audit,
-    sightlines: [first!, second],
+    sightlines: [first!, second].map((line) => ({ ...line, sweep: audit.sweep })),
     tracks: [...audit.tracks, { ...trackOf('vondrak2011', line, 0), sightline: 'midwinter' }],
     implied: [
       ...audit.implied,
@@ -134,7 +148,7 @@ export function severalLinesAudit(outcome: Outcome = 'premise'): Audit {
     ],
     today: [
       ...audit.today,
-      { ...audit.today[0]!, sightline: 'midwinter', azimuth_deg: null, offset_arcmin: null },
+      { ...audit.today[0]!, sightline: 'midwinter', direction_deg: null, offset_arcmin: null },
     ],
     reproduction: [
       ...audit.reproduction,
@@ -144,11 +158,13 @@ export function severalLinesAudit(outcome: Outcome = 'premise'): Audit {
 }
 
 function withDrift(line: SightlineAudit): SightlineAudit {
+  if (line.direction_at_asserted_deg === null) return line
   return {
     ...line,
     air: { pressure_hpa: 938.7, temperature_c: 10.8, humidity: 0.5, lapse_k_per_km: 6.5 },
     offset_at_asserted_arcmin: -1.8,
     offset_at_asserted_sd_arcmin: 2.5,
+    closest_in_asserted: { year: -9600, offset_arcmin: -1.2, sd_arcmin: 2.5 },
     drift: {
       arcmin_per_century: -0.41,
       cm_per_century: -1.2,

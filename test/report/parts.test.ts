@@ -5,7 +5,7 @@ import { plainText } from '../../src/report/plain-text.ts'
 import { PARTS } from '../../src/report/template/parts.ts'
 import { TABLES } from '../../src/report/template/tables.ts'
 import { VALUES } from '../../src/report/template/values.ts'
-import { completeAudit, severalLinesAudit } from './complete-audit.ts'
+import { auditOfKind, completeAudit, severalLinesAudit } from './complete-audit.ts'
 
 function part(name: string, audit: Audit): string {
   return PARTS[name]!(audit).map(plainText).join('\n')
@@ -105,13 +105,27 @@ describe('ratios and limits', () => {
   it('gives each limit as an angle and a distance, or its reason', () => {
     const limits = [
       {
-        ...{ against: 'radiocarbon', ratio_3_arcmin: 23.2, ratio_3_cm: 67.5, ratio_3_reason: null },
+        ...{
+          overlaps: false,
+          ratio_3_steady: true,
+          against: 'radiocarbon',
+          ratio_3_arcmin: 23.2,
+          ratio_3_cm: 67.5,
+          ratio_3_reason: null,
+        },
         ...{ other_date_in_95_arcmin: null, other_date_in_95_cm: null },
         ...{ other_date_in_95_reason: 'it lies outside the window', half_bit_arcmin: 0, half_bit_cm: 0 },
         half_bit_reason: null,
       },
       {
-        ...{ against: null, ratio_3_arcmin: null, ratio_3_cm: null, ratio_3_reason: null },
+        ...{
+          overlaps: false,
+          ratio_3_steady: null,
+          against: null,
+          ratio_3_arcmin: null,
+          ratio_3_cm: null,
+          ratio_3_reason: null,
+        },
         ...{ other_date_in_95_arcmin: 0, other_date_in_95_cm: 0, other_date_in_95_reason: null },
         ...{ half_bit_arcmin: 25.8, half_bit_cm: null, half_bit_reason: null },
       },
@@ -120,6 +134,14 @@ describe('ratios and limits', () => {
       ['radiocarbon', '23′ (68 cm)', 'none: it lies outside the window', '0′: at every tolerance'],
       ['none named', 'none', '0′: at every tolerance', '26′'],
     ])
+  })
+
+  it('says of a lead that it is not one at every tolerance', () => {
+    const limit = { ...completeAudit().limits[0]!, ratio_3_arcmin: 12, ratio_3_cm: null }
+    const limits = [{ ...limit, ratio_3_steady: false }]
+    expect(rows('limits', completeAudit('premise', { limits }))[1]![1]).toBe(
+      '12′, but not at every tolerance below that',
+    )
   })
 
   it('names the second window and what it makes of the half-bit limit', () => {
@@ -143,8 +165,8 @@ describe('the track', () => {
   it('tells of each line its target, air, dwell, place and movement', () => {
     expect(part('tracks', severalLinesAudit())).toBe(
       [
-        'midsummer. Target: June solstice sunrise, upper limb on the horizon. The line is 100 m long. Refraction is traced for 939 hPa, 11 °C and 50 % humidity. Around the solstice the Sun’s place on the horizon stays within 1′ of its extreme for 9 days. At the asserted date the target stood at azimuth 57°54′; the line points 1.8′ ± 2.5′ to the left of it. It then moved 25″ a century to the left, which is 1.2 cm at the marker, or 0.14 of the Sun’s width in 1,000 years. Each minute of arc stands for 24 years.',
-        'midwinter. Target: June solstice sunrise, upper limb on the horizon. The refraction is the one the claim file gives. At the asserted date (9701 to 9501 BCE) the target does not reach this altitude at all.',
+        'midsummer. Target: June solstice sunrise, upper limb on the horizon. The line is 100 m long. Refraction is traced for 939 hPa, 11 °C and 50 % humidity. Around the solstice the Sun’s place on the horizon stays within 1′ of its extreme for 9.3 days. At the asserted date the target stood at azimuth 57°54′; the line points 1.8′ ± 2.5′ to the left of it. It then moved 25″ a century to the left, which is 1.2 cm at the marker, or 0.14 of the Sun’s width in 1,000 years. Each minute of arc stands for 24 years.',
+        'midwinter. Target: June solstice sunrise, upper limb on the horizon. The refraction is the one the claim file gives. At the asserted date (9701 to 9501 BCE) there was no December solstice sunset at that altitude.',
       ].join('\n'),
     )
   })
@@ -191,10 +213,12 @@ describe('the track', () => {
       return part('approach', completeAudit('none', { implied }))
     }
     expect(approach(-56)).toBe(
-      'No date in the window or within 10,000 years of it puts the target on the line midsummer. Within the window it came nearest in 7440 BCE, when the line pointed 56′ ± 2.5′ (1.7 times the Sun’s width) to the left of it.',
+      'No date in the window or within 10,000 years of it puts the target exactly on the line midsummer. Within the window it came nearest in 7440 BCE, when the line pointed 56′ ± 2.5′ (1.7 times the Sun’s width) to the left of it.',
     )
     expect(approach(0.001)).toMatch(/when the line pointed at it\.$/)
-    expect(approach(null)).toMatch(/it never stands at that altitude; it came nearest to it in 7440 BCE\.$/)
+    expect(approach(null)).toMatch(
+      /At this latitude there is no June solstice sunrise at that altitude in any year of the window\.$/,
+    )
     const later = { year: 9000, low95: 8000, high95: 10_000, in_window: false, future: true }
     expect(approach(56, [later])).toMatch(
       /^No date in the window puts .* 56′ ± 2\.5′ .* to the right of it\.$/,
@@ -203,12 +227,126 @@ describe('the track', () => {
 
   it('says where the target stands today', () => {
     expect(part('today', severalLinesAudit())).toBe(
-      'Today (2026 CE) the target of midsummer stands at azimuth 59°00′; the line points 1°05′ (2.1 times the Sun’s width, 1.9 m at the marker) to the left of it.\nToday (2026 CE) the target of midwinter does not reach that altitude.',
+      'Today (2026 CE) the target of midsummer stands at azimuth 59°00′; the line points 1°05′ (2.1 times the Sun’s width, 1.9 m at the marker) to the left of it.\nToday (2026 CE) the target of midwinter is not to be seen: there is no December solstice sunset at that altitude.',
     )
   })
 })
 
+describe('the track of other targets', () => {
+  it('tells of a measured altitude what lies above or below it', () => {
+    const audit = auditOfKind('noon')
+    expect(part('tracks', audit)).toContain(
+      'At the asserted date the target stood at altitude 34°35′; the altitude measured lies 1.8′ ± 2.5′ below it. It then moved 25″ a century downwards,',
+    )
+    expect(part('premise', audit)).toContain('about the intended one, as an angle up or down.')
+    expect(rows('lines', audit).slice(0, 2)).toEqual([
+      [
+        ...['Sightline', 'Azimuth', 'Altitude measured', 'Refraction', 'Half the Sun’s width'],
+        ...['Centre’s true altitude', 'Declination'],
+      ],
+      [
+        ...['midsummer', 'south, on the meridian', '34°35′ ± 3′', '1.3′ ± 0.3′', '16.31′'],
+        ...['34°34′ ± 3′', '24°12′ ± 3′'],
+      ],
+    ])
+  })
+
+  it('leaves out the steps that no line has', () => {
+    expect(rows('lines', auditOfKind('star'))[0]).toEqual([
+      ...['Sightline', 'Azimuth', 'Horizon', 'Refraction', 'True altitude', 'Declination'],
+    ])
+    expect(rows('lines', auditOfKind('pair'))).toEqual([
+      ['Sightline', 'Azimuth'],
+      ['midsummer', '359°52′ ± 2′'],
+    ])
+    expect(caption('lines', auditOfKind('pair'))).toMatch(/^The line as measured;/)
+    expect(rows('lines', auditOfKind('moon'))[0]![4]).toBe('Half the Moon’s width')
+  })
+
+  it('marks a step that one line has and another has not', () => {
+    const [star, moon] = [auditOfKind('star'), auditOfKind('moon')]
+    const audit = { ...star, sightlines: [...star.sightlines, ...moon.sightlines] }
+    expect(rows('lines', audit).map((row) => row[4])).toEqual(['Half the Moon’s width', '–', '15.54′'])
+  })
+
+  it('does not speak of air for two stars, nor of a drift where there is none to speak of', () => {
+    expect(part('tracks', auditOfKind('pair'))).not.toContain('efraction')
+    const audit = auditOfKind('equinox')
+    const drift = { ...audit.sightlines[0]!.drift!, arcmin_per_century: 0.001 }
+    const still = { ...audit, sightlines: audit.sightlines.map((line) => ({ ...line, drift })) }
+    expect(part('tracks', still)).toMatch(/ It then all but stood still\.$/)
+  })
+
+  it('names the best year of an asserted date in whose course the target moves on', () => {
+    const audit = auditOfKind('star')
+    const closest_in_asserted = { year: -2451.3, offset_arcmin: 0.4, sd_arcmin: 2.5 }
+    const lines = (offset: number) =>
+      audit.sightlines.map((line) => ({ ...line, offset_at_asserted_arcmin: offset, closest_in_asserted }))
+    expect(part('tracks', { ...audit, sightlines: lines(40) })).toContain(
+      'Of the asserted years the line fits 2452 BCE best; the line points 24″ ± 2.5′ to the right of it as it stood then.',
+    )
+    expect(part('tracks', { ...audit, sightlines: lines(1) })).not.toContain('best')
+  })
+
+  it('says where a star is never to be seen', () => {
+    const audit = auditOfKind('never')
+    expect(part('tracks', audit)).toContain(
+      'At the asserted date (9701 to 9501 BCE) there was no rising of Acrux at that altitude.',
+    )
+    expect(part('approach', audit)).toBe(
+      'No date in the window or within 10,000 years of it puts the target exactly on the line midsummer. At this latitude there is no rising of Acrux at that altitude in any year of the window.',
+    )
+    expect(part('today', audit)).toBe(
+      'Today (2026 CE) the target of midsummer is not to be seen: there is no rising of Acrux at that altitude.',
+    )
+  })
+
+  it('tells that the Moon stands there in some years only', () => {
+    expect(part('today', auditOfKind('moon'))).toMatch(
+      /^Today \(2026 CE\), in a year of such a standstill, the target of midsummer stands at azimuth 59°00′;/,
+    )
+  })
+})
+
+describe('the lines of a calendar', () => {
+  it('has a row for each, and one for all', () => {
+    const audit = auditOfKind('calendar')
+    const [head, ...lines] = rows('each_line', audit)
+    expect(head).toEqual([
+      ...['Sightline', 'Target', 'Built exactly', '95 % dates at 10′', 'Bits at 10′', 'Bits at 1°'],
+      'Ratio to radiocarbon at 10′',
+    ])
+    expect(lines.map(([name]) => name)).toEqual(['midsummer', 'thirty days', 'sixty days', 'all together'])
+    // The fixture's bits are 1.5/(n (1 + τ/20)), its sets 2500 n + 90 τ years to either side of 5001 BCE, its ratios 3/n.
+    expect(lines[1]).toEqual([
+      ...['thirty days', 'sunrise 30 days after the June solstice', expect.any(String)],
+      ...['10,900 BCE to 900 CE', '0.50', '0.19', '1.5'],
+    ])
+    expect(TABLES.each_line!(completeAudit())).toEqual([])
+  })
+
+  it('names the ratio to each of several dates', () => {
+    const audit = auditOfKind('calendar')
+    const second = { ...audit.other_dates[0]!, label: 'pollen' }
+    const several = { ...audit, other_dates: [...audit.other_dates, second] }
+    expect(rows('each_line', several)[1]!.at(-1)).toBe('radiocarbon: 3.0; pollen: –')
+  })
+})
+
 describe('the arithmetic', () => {
+  it('speaks of the model that a target rests on', () => {
+    expect(part('arithmetic', completeAudit())).toContain('a model of the Earth’s tilt')
+    expect(part('arithmetic', auditOfKind('star'))).toContain(
+      'The last step, from where a star stood to a date, depends on a model of precession;',
+    )
+    const both = { ...auditOfKind('star') }
+    both.sightlines = [...both.sightlines, ...auditOfKind('moon').sightlines]
+    expect(part('arithmetic', both)).toMatch(/Earth’s tilt; .* For stars that step depends on/)
+    expect(rows('reproduction', both)[0]).toContain('Model')
+    expect(caption('reproduction', both)).toMatch(/by each model of the Earth’s tilt or of precession\.$/)
+    expect(rows('reproduction', auditOfKind('star'))[0]![0]).toBe('Precession after')
+  })
+
   it('says what there was to redo', () => {
     expect(part('arithmetic', completeAudit('premise', { checks: [], reproduction: [] }))).toBe(
       'The claim file quotes no intermediate results, so there are no steps to redo one by one.',
@@ -255,6 +393,10 @@ describe('readings, budget, assumptions', () => {
     expect(part('budget_check', completeAudit('premise', { budget_check: bent }))).toContain(
       'by 400 years, and in 21 % of the draws no date fits at all. The two part because the track bends there',
     )
+    const lost = { ...check, sampled_sd: null, no_date_share: 1, agree: false }
+    expect(part('budget_check', completeAudit('premise', { budget_check: lost }))).toContain(
+      'Drawn at random from the same errors, the line has no date at all:',
+    )
     expect(part('budget_check', completeAudit('none', { budget_check: null }))).toBe('')
   })
 
@@ -285,7 +427,8 @@ describe('references', () => {
       'children' in list ? list.children.map(plainText) : [],
     )
     expect(lines.map((line) => line.split(/[, ]/)[0])).toEqual([
-      ...['Auer', 'Hohenkerk', 'Joint', 'Kass', 'Kullback', 'Newcomb', 'nobody1900', 'Petrie', 'Vondrák'],
+      ...['Auer', 'Hohenkerk', 'Joint', 'Kass', 'Kullback', 'Laskar', 'Newcomb', 'nobody1900', 'Petrie'],
+      'Vondrák',
     ])
   })
 })

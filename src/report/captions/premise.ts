@@ -1,5 +1,6 @@
 import type { PhrasingContent } from 'mdast'
 import type { Audit } from '../../audit/audit.ts'
+import { premiseYears } from '../figures/premise-years.ts'
 import { phrasing, strong } from '../nodes.ts'
 
 /** Tells a reader who has seen no such figure how to read it. */
@@ -13,12 +14,13 @@ export function premiseCaption(audit: Audit): PhrasingContent[] {
     'tolerance, dark grey holds the dates with 68 % of the weight, all grey those with 95 %. The red band is the ',
     `date asserted${independent(audit)}; the bracket spans the tolerances held plausible`,
     `${hasLimits ? '; flags mark where the conclusion changes' : ''}.`,
+    premiseYears(audit).isPart ? ' Only the part of the window about these dates is drawn.' : '',
     ` ${moral(audit)}`,
   ])
 }
 
 function moral({ outcome, other_dates }: Audit): string {
-  if (outcome === 'none') return 'No date in reach fits; the grey only shows which dates miss the least.'
+  if (outcome === 'none') return 'No date in reach fits; the grey only weighs misses against each other.'
   return other_dates.length > 0
     ? 'Where the grey covers both kinds of band, the dates are not told apart.'
     : 'The wider the grey, the less is told about the date.'

@@ -33,6 +33,10 @@ const DIRECTIONS: readonly (readonly [number, number])[] = [
   [-1, -0.4],
   [1, 0.4],
   [-1, 0.4],
+  [0.1, -1],
+  [-0.1, -1],
+  [0.1, 1],
+  [-0.1, 1],
 ]
 
 /**

@@ -1,16 +1,21 @@
 import type { Audit, DatedLabel, Limit, SweepStep } from '../../audit/audit.ts'
 import { formatArcmin } from '../../quantity/format-angle.ts'
+import { formatYearRange } from '../../quantity/format-year.ts'
+import { listed } from '../../quantity/listed.ts'
 import { dateSets } from '../wording/date-sets.ts'
-import { joinList } from '../wording/join-list.ts'
+import { premiseYears } from './premise-years.ts'
 
 /** What the premise figure shows, in sentences with its figures. */
 export function premiseAlt(audit: Audit): string {
   return [opening(audit), setsSentence(audit), datesSentence(audit)].join(' ')
 }
 
-function opening({ sweep: { steps, window } }: Audit): string {
+function opening(audit: Audit): string {
+  const { steps, window } = audit.sweep
   const widest = formatArcmin(steps.at(-1)?.tolerance_arcmin ?? 0)
-  return `Date against assumed build tolerance, from exact to ${widest}, for the window ${window.printed}.`
+  const { shown, isPart } = premiseYears(audit)
+  const part = isPart ? ` Of the window, ${formatYearRange(...shown, 10)} is drawn.` : ''
+  return `Date against assumed build tolerance, from exact to ${widest}, for the window ${window.printed}.${part}`
 }
 
 /** The 95 % set at tolerance 0 and at both ends of the plausible range. */
@@ -23,7 +28,7 @@ function setsSentence(audit: Audit): string {
     .map((step) => `${tolerance(step)} ${setsInWords(step, audit)}`)
   const lead =
     audit.outcome === 'none'
-      ? 'No date in reach fits the line; the 95 % sets hold the dates that miss it least'
+      ? 'No date in reach fits the line; the 95 % sets hold the dates that weigh most among misses'
       : 'The 95 % set holds'
   return parts.length === 0 ? 'No sets were found.' : `${lead}: ${parts.join('; ')}.`
 }
@@ -34,7 +39,7 @@ function tolerance({ tolerance_arcmin }: SweepStep): string {
 
 function setsInWords({ sets95 }: SweepStep, { sweep: { window } }: Audit): string {
   if (sets95.length === 0) return 'no date'
-  return joinList(sets95.map((stretch) => dateSets([stretch], window)))
+  return listed(sets95.map((stretch) => dateSets([stretch], window)))
 }
 
 function nearestStep(steps: readonly SweepStep[], arcmin: number): SweepStep | undefined {
@@ -56,7 +61,8 @@ function datesSentence(audit: Audit): string {
 
 function comparison({ label, printed }: DatedLabel, limit: Limit | undefined): string {
   if (typeof limit?.ratio_3_arcmin === 'number') {
-    return `it beats ${label} (${printed}) by 3 to 1 up to ${formatArcmin(limit.ratio_3_arcmin)}`
+    const until = limit.ratio_3_steady === false ? 'at some tolerances, last at' : 'up to'
+    return `it beats ${label} (${printed}) by 3 to 1 ${until} ${formatArcmin(limit.ratio_3_arcmin)}`
   }
   return `against ${label} (${printed}), ${limit?.ratio_3_reason ?? 'there is no 3-to-1 limit'}`
 }

@@ -120,7 +120,7 @@ export function windowEnds(
   plot: PremisePlot,
 ): Element[] {
   const stroke = { stroke: PALETTE.ink, strokeWidth: 0.5, strokeDasharray: '4 2' }
-  return [window.from, window.to].map((year) =>
-    line([scales.left, plot.y(year)], [scales.right, plot.y(year)], stroke),
-  )
+  return [window.from, window.to]
+    .filter((year) => plot.years[0] <= year && year <= plot.years[1])
+    .map((year) => line([scales.left, plot.y(year)], [scales.right, plot.y(year)], stroke))
 }

@@ -7,9 +7,11 @@ import { hatch } from './hatch.ts'
 import type { MarginLabel } from './margin-labels.ts'
 import { PALETTE } from './palette.ts'
 import type { PremisePlot } from './premise-layout.ts'
+import { premiseYears } from './premise-years.ts'
 import { shape } from './shape.ts'
 
-type Pairs = readonly (readonly [number, number])[]
+type Pair = readonly [number, number]
+type Pairs = readonly Pair[]
 
 /** Something labelled right of the plot, at the height of a year. */
 export type DatedMarginLabel = Omit<MarginLabel, 'y'> & { year: number }
@@ -23,11 +25,15 @@ export function premiseDates(audit: Audit, plot: PremisePlot): Element[] {
 }
 
 /** A grey ground under the years outside the window. */
-export function outsideGrounds({ sweep: { window } }: Audit, { box, y }: PremisePlot): Element[] {
+export function outsideGrounds({ sweep: { window } }: Audit, { box, yWithin }: PremisePlot): Element[] {
   const { left, right } = box
   const ground = (top: number, bottom: number) =>
     shape('rect', { x: left, y: top, width: right - left, height: bottom - top, fill: PALETTE.outside })
-  return [ground(box.top, y(window.to)), ground(y(window.from), box.bottom)]
+  const ends = [
+    [box.top, yWithin(window.to)],
+    [yWithin(window.from), box.bottom],
+  ] as const
+  return ends.filter(([top, bottom]) => bottom > top).map(([top, bottom]) => ground(top, bottom))
 }
 
 /** Years in which the target stays out of reach of the line's altitude. */
@@ -39,12 +45,13 @@ export function outOfReach(audit: Audit, plot: PremisePlot): Element[] {
 }
 
 function bandOf({ from, to }: { from: number; to: number }, plot: PremisePlot): Box {
-  return { left: plot.box.left, right: plot.box.right, top: plot.y(to), bottom: plot.y(from) }
+  return { left: plot.box.left, right: plot.box.right, top: plot.yWithin(to), bottom: plot.yWithin(from) }
 }
 
 /** What the margin says: the dates, the two sets where they end, the window's ends, years out of reach. */
 export function premiseMarginLabels(audit: Audit): DatedMarginLabel[] {
-  const { window, no_target } = audit.sweep
+  const { shown } = premiseYears(audit)
+  const unreached = within(audit.sweep.no_target, shown)
   return [
     {
       year: middle(audit.asserted),
@@ -57,10 +64,9 @@ export function premiseMarginLabels(audit: Audit): DatedMarginLabel[] {
       lines: [date.label, date.printed],
       strong: true,
     })),
-    ...setLabels(audit),
-    { year: window.to, lines: [`window to ${formatYear(window.to)}`], fill: PALETTE.muted },
-    { year: window.from, lines: [`window from ${formatYear(window.from)}`], fill: PALETTE.muted },
-    ...no_target.slice(0, 1).map(([from, to]) => ({
+    ...setLabels(audit, shown),
+    ...windowLabels(audit, shown),
+    ...unreached.slice(0, 1).map(([from, to]) => ({
       year: (from + to) / 2,
       lines: ['target out of reach'],
       fill: PALETTE.muted,
@@ -68,16 +74,36 @@ export function premiseMarginLabels(audit: Audit): DatedMarginLabel[] {
   ]
 }
 
+/** The window's ends, or where the plot ends before it. */
+function windowLabels({ sweep: { window } }: Audit, [from, to]: Pair): DatedMarginLabel[] {
+  const fill = PALETTE.muted
+  return [
+    window.to > to
+      ? { year: to, lines: ['the window goes on', `to ${formatYear(window.to)}`], fill }
+      : { year: window.to, lines: [`window to ${formatYear(window.to)}`], fill },
+    window.from < from
+      ? { year: from, lines: ['the window begins', `in ${formatYear(window.from)}`], fill }
+      : { year: window.from, lines: [`window from ${formatYear(window.from)}`], fill },
+  ]
+}
+
 /** Each set is labelled where its widest visible part meets the right edge. */
-function setLabels(audit: Audit): DatedMarginLabel[] {
+function setLabels(audit: Audit, shown: Pair): DatedMarginLabel[] {
   const last = audit.sweep.steps.at(-1)
   if (last === undefined) return []
-  const inner = widestMiddle(last.sets68)
-  const outer = widestMiddle(without(last.sets95, last.sets68))
+  const inner = widestMiddle(within(last.sets68, shown))
+  const outer = widestMiddle(within(without(last.sets95, last.sets68), shown))
   return [
     ...(inner === null ? [] : [{ year: inner, lines: ['68 % set'] }]),
     ...(outer === null ? [] : [{ year: outer, lines: ['95 % set'] }]),
   ]
+}
+
+/** As much of each stretch as is shown. */
+function within(pairs: Pairs, [from, to]: Pair): Pairs {
+  return pairs
+    .filter(([low, high]) => low <= to && high >= from)
+    .map(([low, high]) => [Math.max(low, from), Math.min(high, to)])
 }
 
 function middle({ from, to }: DatedLabel): number {

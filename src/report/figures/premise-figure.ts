@@ -59,6 +59,6 @@ function marginOf(scales: PremiseScales, plot: PremisePlot) {
 }
 
 function noteOfNone(scales: PremiseScales) {
-  const content = 'No date in reach fits this line: the sets show only which dates miss it least.'
+  const content = 'No date in reach fits this line: the sets only weigh misses against each other.'
   return text(scales.left, NOTE - 3, content, { weight: 600, fill: PALETTE.ink })
 }

@@ -2,6 +2,7 @@ import { extent } from 'd3-array'
 import { scaleLinear, scaleLog } from 'd3-scale'
 import type { Audit } from '../../audit/audit.ts'
 import type { Box } from './box.ts'
+import { premiseYears } from './premise-years.ts'
 
 /** Where things stand in the premise figure, points. */
 export interface PremiseScales {
@@ -60,15 +61,16 @@ export interface PremisePlot {
   box: Box
   y: (year: number) => number
   years: readonly [number, number]
+  /** Heights in the plot only: what lies beyond the years shown is at its edge. */
+  yWithin: (year: number) => number
 }
 
 const BEYOND = 5
 
 export function premisePlot(audit: Audit, scales: PremiseScales, top: number, height: number): PremisePlot {
   const box = { left: scales.left, right: scales.right, top, bottom: top + height }
-  const dates = [audit.sweep.window, audit.asserted, ...audit.other_dates]
-  const [from, to] = extent(dates.flatMap((date) => [date.from, date.to])) as [number, number]
-  const years: [number, number] = from < to ? [from, to] : [from - 1, to + 1]
-  const scale = scaleLinear(years, [box.bottom - BEYOND, box.top + BEYOND])
-  return { box, y: (year) => scale(year), years }
+  const { shown } = premiseYears(audit)
+  const scale = scaleLinear(shown, [box.bottom - BEYOND, box.top + BEYOND])
+  const yWithin = (year: number) => Math.max(box.top, Math.min(box.bottom, scale(year)))
+  return { box, y: (year) => scale(year), years: shown, yWithin }
 }

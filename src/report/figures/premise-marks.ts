@@ -38,9 +38,11 @@ function assumedFlag(arcmin: number, scales: PremiseScales): FlagLabel {
   return { x: scales.x(arcmin), label, stroke: STROKES.assumed, fill: PALETTE.accent }
 }
 
-function ratio3Flag({ against, ratio_3_arcmin: arcmin }: Limit, scales: PremiseScales): FlagLabel[] {
+function ratio3Flag(limit: Limit, scales: PremiseScales): FlagLabel[] {
+  const { against, ratio_3_arcmin: arcmin, ratio_3_steady } = limit
   if (arcmin === null) return []
-  const where = arcmin > 0 ? `up to ${formatArcmin(arcmin)}` : 'only if exact'
+  const until = ratio_3_steady === false ? 'last at' : 'up to'
+  const where = arcmin > 0 ? `${until} ${formatArcmin(arcmin)}` : 'only if exact'
   const label = `3 to 1 over ${shortName(against)} ${where}`
   return [{ x: scales.x(arcmin), label, stroke: STROKES.ratio3, weight: 600 }]
 }

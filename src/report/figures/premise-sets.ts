@@ -30,7 +30,10 @@ function setShapes(
   scales: PremiseScales,
   plot: PremisePlot,
 ): Element[] {
-  const spansOf = (step: SweepStep) => setsOf(step).map(([from, to]): Span => [plot.y(to), plot.y(from)])
+  const spansOf = (step: SweepStep) =>
+    setsOf(step)
+      .filter(([from, to]) => plot.y(to) < plot.box.bottom && plot.y(from) > plot.box.top)
+      .map(([from, to]): Span => [plot.yWithin(to), plot.yWithin(from)])
   const swept = steps.filter((step) => step.tolerance_arcmin > 0)
   const columns = swept.map((step) => ({ x: scales.x(step.tolerance_arcmin), spans: spansOf(step) }))
   const d = regionPath(columns, THINNEST_SET)

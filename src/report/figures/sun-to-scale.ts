@@ -13,7 +13,7 @@ export interface SunToScale {
   draw: (left: number, top: number) => Element[]
 }
 
-/** The Sun's width on a plot's own scale of azimuth, `diameter` in points. */
+/** The Sun's width on a plot's own scale of directions, `diameter` in points. */
 export function sunToScale(widthArcmin: number, diameter: number, tallest: number): SunToScale {
   const words = ['the Sun,', `${formatArcmin(widthArcmin)} wide,`, 'to scale']
   if (diameter > tallest) {

@@ -1,15 +1,15 @@
 /** Widths in thousandths of the type size: the larger of Source Sans 3 Regular's and Helvetica's (its AFM). */
 const WIDTHS: readonly (readonly [number, string])[] = [
-  [260, "'ijl|′"],
+  [260, "'‘’ijl|′"],
   [280, ' ,.:;I·'],
   [300, '!f'],
   [320, '[]'],
   [340, '()-t{}'],
   [360, '/\\r'],
   [420, '*°'],
-  [440, '"″'],
+  [440, '"“”″'],
   [500, 'J^cksvxyz'],
-  [560, '#$0123456789?L_`abdeghnopqu–'],
+  [560, '#$£0123456789?L_`abdeghnopqu–'],
   [600, '+<=>~−±≤≥×≈'],
   [620, 'FTZ→↑↓'],
   [680, '&ABEKPSVXY'],
@@ -37,6 +37,12 @@ export function textWidth(content: string, size: number, weight: 400 | 600 = 400
   return (thousandths / 1000) * size * (weight === 600 ? SEMIBOLD : 1)
 }
 
+/** Whether the estimate rests on each character's own width, and not on a guess at a script it does not know. */
+export function isWidthKnown(content: string): boolean {
+  const characters = [...content]
+  return characters.length > 0 && characters.every((character) => WIDTH_OF.has(baseOf(character)))
+}
+
 /** The text, or as much of its beginning as fits into `width`, with an ellipsis. */
 export function fitText(content: string, width: number, size: number, weight: 400 | 600 = 400): string {
   if (textWidth(content, size, weight) <= width) return content
@@ -46,7 +52,12 @@ export function fitText(content: string, width: number, size: number, weight: 40
 }
 
 function characterWidth(character: string): number {
-  const known = WIDTH_OF.get(character)
+  const known = WIDTH_OF.get(character) ?? WIDTH_OF.get(baseOf(character))
   if (known !== undefined) return known
   return (character.codePointAt(0) ?? 0) >= 0x1100 ? SQUARE : OTHER
+}
+
+/** A letter without its accents, which add nothing to its width. */
+function baseOf(character: string): string {
+  return character.normalize('NFD').slice(0, 1)
 }

@@ -1,6 +1,6 @@
 import type { Element } from 'hast'
 import type { Audit } from '../../audit/audit.ts'
-import { azimuthTicks } from './azimuth-ticks.ts'
+import { directionTicks } from './direction-ticks.ts'
 import { keepLegible } from './log-ticks.ts'
 import { PALETTE } from './palette.ts'
 import { line, shape, TEXT_SIZE, text } from './shape.ts'
@@ -10,19 +10,20 @@ import { minorYears, yearTicks } from './year-ticks.ts'
 const RULE = { stroke: PALETTE.ink, strokeWidth: 0.6 }
 const FINE = { stroke: PALETTE.ink, strokeWidth: 0.35 }
 const MOST_YEARS = 7
-const MOST_AZIMUTHS = 8
+const MOST_DIRECTIONS = 8
 
-/** Below the plot. */
-export const TRACK_AXIS_HEIGHT = 15
-
-export function trackAxes(plot: TrackPlot, captionRight: number): Element[] {
+export function trackAxes(
+  plot: TrackPlot,
+  measures: 'azimuth' | 'altitude',
+  captionRight: number,
+): Element[] {
   const { left, right, top, bottom } = plot.box
   const [from, to] = plot.years
   const years = keepLegible(yearTicks(from, to, MOST_YEARS), plot.x, TEXT_SIZE)
   return [
     line([left, top], [left, bottom], RULE),
     line([left, bottom], [right, bottom], RULE),
-    ...azimuthTicks(plot.azimuths[0], plot.azimuths[1], MOST_AZIMUTHS).flatMap(({ at, label }) => [
+    ...directionTicks(measures, ...plot.range.shown, MOST_DIRECTIONS).flatMap(({ at, label }) => [
       line([left - 4, plot.y(at)], [left, plot.y(at)], RULE),
       text(left - 6, plot.y(at) + 2.6, label, { anchor: 'end' }),
     ]),
@@ -33,7 +34,7 @@ export function trackAxes(plot: TrackPlot, captionRight: number): Element[] {
       line([plot.x(at), bottom], [plot.x(at), bottom + 4], RULE),
       text(plot.x(at), bottom + 12, label, { anchor: 'middle' }),
     ]),
-    text(1, top - 5.5, 'azimuth', { italic: true, fill: PALETTE.muted }),
+    text(1, top - 5.5, measures, { italic: true, fill: PALETTE.muted }),
     text(captionRight, bottom + 12, 'date, later →', { anchor: 'end', italic: true, fill: PALETTE.muted }),
   ]
 }

@@ -1,19 +1,21 @@
-import { line as polyline } from 'd3-shape'
+import { area, line as polyline } from 'd3-shape'
 import type { Element } from 'hast'
 import type { Track } from '../../audit/audit.ts'
+import { clipToBand } from './clip-to-band.ts'
 import { PALETTE } from './palette.ts'
 import type { Obstacle } from './place-around.ts'
 import { type Attributes, line, shape } from './shape.ts'
-import { azimuthIn, nearLine, type TrackPlot, type TrackSource } from './track-layout.ts'
+import type { TrackPlot } from './track-layout.ts'
+import { directionIn, isJump, nearLine, type TrackSource } from './track-source.ts'
 
 /** Two curves closer than this are one to the eye, points. */
 const VISIBLE = 0.8
 /** A label points to no place nearer to the plot's sides than this. */
 const ROOM = 20
 
-/** The line as measured: a rule at its azimuth, one standard deviation to either side, and two paler. */
-export function measuredBand({ track }: TrackSource, plot: TrackPlot): Element[] {
-  const { value, sd } = track.line_deg
+/** The line as measured: a rule at its direction, one standard deviation to either side, and two paler. */
+export function measuredBand({ tracks }: TrackSource, plot: TrackPlot): Element[] {
+  const { value, sd } = tracks[0].line_deg
   const { left, right } = plot.box
   const band = (times: number, fill: string) => {
     const { top, bottom } = bandAbout(value, sd * times, plot)
@@ -25,76 +27,114 @@ export function measuredBand({ track }: TrackSource, plot: TrackPlot): Element[]
   ]
 }
 
-function bandAbout(value: number, halfDeg: number, plot: TrackPlot): { top: number; bottom: number } {
+/** The heights of a band of directions, as far as the plot shows them. */
+export function bandAbout(value: number, halfDeg: number, plot: TrackPlot): { top: number; bottom: number } {
   return {
     top: Math.max(plot.box.top, plot.y(value + halfDeg)),
     bottom: Math.min(plot.box.bottom, plot.y(value - halfDeg)),
   }
 }
 
-/** The track, and under it the second model's, dashed, where the two can be told apart. */
-export function trackCurves({ track, second }: TrackSource, plot: TrackPlot): Element[] {
-  const widest = second === null ? null : widestDifference(track, second, plot)
+/** One standard deviation of the comparison to either side of each track. */
+export function trackErrors({ tracks }: TrackSource, plot: TrackPlot): Element[] {
+  const { top, bottom } = plot.box
+  const within = (y: number) => Math.max(top, Math.min(bottom, y))
+  return tracks.flatMap((track) => {
+    const directions = nearLine(track)
+    const ground = area<number>()
+      .x((index) => plot.x(track.years[index]!))
+      .y0((index) => within(plot.y(directions[index]! - (track.sd_arcmin[index] ?? 0) / 60)))
+      .y1((index) => within(plot.y(directions[index]! + (track.sd_arcmin[index] ?? 0) / 60)))
+      .digits(2)
+    const d = runsOf(track, plot)
+      .map((run) => ground(run) ?? '')
+      .join('')
+    return d === '' ? [] : [shape('path', { d, fill: PALETTE.ink, fillOpacity: 0.09 })]
+  })
+}
+
+/** The tracks, and under them the second model's, dashed, where the two can be told apart. */
+export function trackCurves(source: TrackSource, plot: TrackPlot): Element[] {
+  const { tracks, seconds } = source
+  const isApart = widestDifference(source, plot) !== null
+  const dashed = { stroke: PALETTE.ink, strokeWidth: 0.8, strokeDasharray: '3 2' }
   return [
-    ...(second === null || widest === null
-      ? []
-      : curve(second, plot, { stroke: PALETTE.ink, strokeWidth: 0.8, strokeDasharray: '3 2' })),
-    ...curve(track, plot, { stroke: PALETTE.ink, strokeWidth: 1.4 }),
+    ...(isApart ? seconds.flatMap((track) => curve(track, plot, dashed)) : []),
+    ...tracks.flatMap((track) => curve(track, plot, { stroke: PALETTE.ink, strokeWidth: 1.4 })),
   ]
 }
 
 function curve(track: Track, plot: TrackPlot, stroke: Attributes): Element[] {
-  const azimuths = nearLine(track)
-  const path = polyline<number>()
-    .defined((index) => azimuths[index] !== null)
-    .x((index) => plot.x(track.years[index]!))
-    .y((index) => plot.y(azimuths[index]!))
-    .digits(2)
-  const d = path(thinned(track, plot)) ?? ''
+  const directions = nearLine(track)
+  const path = polyline<readonly [number, number]>().digits(2)
+  const d = runsOf(track, plot)
+    .map((run) =>
+      run.map((index): [number, number] => [plot.x(track.years[index]!), plot.y(directions[index]!)]),
+    )
+    .flatMap((points) => clipToBand(points, plot.box.top, plot.box.bottom))
+    .map((part) => path(part) ?? '')
+    .join('')
   return d === '' ? [] : [shape('path', { d, fill: 'none', ...stroke })]
 }
 
-/** Every point a point's width apart will do; the ends of stretches without an azimuth are kept. */
-function thinned(track: Track, plot: TrackPlot): number[] {
+/**
+ * The runs of points between years without a direction, and between jumps. Every point a point's width apart will
+ * do; the ends of runs are kept.
+ */
+function runsOf(track: Track, plot: TrackPlot): number[][] {
+  const directions = nearLine(track)
   const perPoint = track.years.length / Math.max(1, plot.box.right - plot.box.left)
   const stride = Math.max(1, Math.floor(perPoint))
-  const isEdge = (index: number) =>
-    (track.azimuth_deg[index] === null) !== (track.azimuth_deg[index + 1] === null) ||
-    (track.azimuth_deg[index] === null) !== (track.azimuth_deg[index - 1] === null)
-  return track.years.map((_, index) => index).filter((index) => index % stride === 0 || isEdge(index))
+  const isBreak = (from: number | null | undefined, to: number | null | undefined) =>
+    from == null || to == null || isJump(from, to)
+  const runs: number[][] = []
+  directions.forEach((direction, index) => {
+    if (direction === null) return
+    const starts = isBreak(directions[index - 1], direction)
+    const ends = isBreak(direction, directions[index + 1])
+    if (starts) runs.push([index])
+    else if (ends || index % stride === 0) runs.at(-1)!.push(index)
+  })
+  return runs
 }
 
-/** Where the second track lies farthest from the first, if one can see it. */
+/** Where a second track lies farthest from its first, if one can see it. */
 export function widestDifference(
-  track: Track,
-  second: Track,
+  { tracks, seconds }: TrackSource,
   plot: TrackPlot,
-): { x: number; y: number } | null {
-  const stride = Math.max(1, Math.floor(second.years.length / 200))
-  const azimuths = nearLine(second)
-  let widest: { x: number; y: number; apart: number } | null = null
-  for (let index = 0; index < second.years.length; index += stride) {
-    const year = second.years[index]!
-    const ours = azimuthIn(track, year)
-    const theirs = azimuths[index] ?? null
-    if (ours === null || theirs === null) continue
-    const apart = Math.abs(plot.y(ours) - plot.y(theirs))
-    const isInner = Math.min(plot.x(year) - plot.box.left, plot.box.right - plot.x(year)) > ROOM
-    if (isInner && apart >= VISIBLE && (widest === null || apart > widest.apart)) {
-      widest = { x: plot.x(year), y: plot.y(theirs), apart }
+): { x: number; y: number; track: Track } | null {
+  let widest: { x: number; y: number; track: Track; apart: number } | null = null
+  for (const second of seconds) {
+    const first = tracks.find(({ branch }) => branch === second.branch) ?? tracks[0]
+    const stride = Math.max(1, Math.floor(second.years.length / 200))
+    const directions = nearLine(second)
+    for (let index = 0; index < second.years.length; index += stride) {
+      const year = second.years[index]!
+      const ours = directionIn(first, year)
+      const theirs = directions[index] ?? null
+      if (ours === null || theirs === null || isJump(ours, theirs)) continue
+      const [x, y] = [plot.x(year), plot.y(theirs)]
+      const apart = Math.abs(plot.y(ours) - y)
+      if (!isInner(x, y, plot) || apart < VISIBLE) continue
+      if (widest === null || apart > widest.apart) widest = { x, y, track: second, apart }
     }
   }
   return widest
 }
 
-/** Small boxes along the track, for labels to keep off. */
+function isInner(x: number, y: number, { box }: TrackPlot): boolean {
+  return Math.min(x - box.left, box.right - x) > ROOM && box.top <= y && y <= box.bottom
+}
+
+/** Small boxes along the part of a track that is drawn, for labels to keep off. */
 export function trackObstacles(track: Track, plot: TrackPlot, weight: number): Obstacle[] {
-  const azimuths = nearLine(track)
+  const directions = nearLine(track)
   const stride = Math.max(1, Math.floor(track.years.length / 150))
   return track.years.flatMap((year, index) => {
-    const azimuth = azimuths[index] ?? null
-    if (azimuth === null || index % stride !== 0) return []
-    const [x, y] = [plot.x(year), plot.y(azimuth)]
+    const direction = directions[index] ?? null
+    if (direction === null || index % stride !== 0) return []
+    const [x, y] = [plot.x(year), plot.y(direction)]
+    if (y < plot.box.top || y > plot.box.bottom) return []
     return [{ left: x - 2, right: x + 2, top: y - 2, bottom: y + 2, weight }]
   })
 }

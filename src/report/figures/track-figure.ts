@@ -2,80 +2,54 @@ import { pairs } from 'd3-array'
 import type { Element } from 'hast'
 import type { Audit, DatedLabel } from '../../audit/audit.ts'
 import { measuredDegrees } from '../wording/measured-angle.ts'
-import { modelLabel } from '../wording/model-label.ts'
 import type { Box } from './box.ts'
 import { assertedBand, independentBand } from './date-band.ts'
-import { type FlagLabel, flagRows } from './flag-row.ts'
-import { marginLabels } from './margin-labels.ts'
-import { outsideNotes } from './outside-notes.ts'
-import { PALETTE } from './palette.ts'
-import { TEXT_SIZE, text } from './shape.ts'
+import { type GroundNote, groundNoteShapes, groundNotes } from './ground-notes.ts'
+import { type MarginGuest, marginLabels } from './margin-labels.ts'
 import { sunToScale } from './sun-to-scale.ts'
 import { type FigureDrawing, svgRoot } from './svg-root.ts'
-import { fitText } from './text-width.ts'
 import { trackAlt } from './track-alt.ts'
-import { outsideGrounds, outsideWindow, TRACK_AXIS_HEIGHT, trackAxes, windowEnds } from './track-axes.ts'
-import { measuredBand, trackCurves } from './track-curves.ts'
+import { outsideGrounds, outsideWindow, trackAxes, windowEnds } from './track-axes.ts'
+import { measuredBand, trackCurves, trackErrors } from './track-curves.ts'
 import { trackLabels } from './track-labels.ts'
-import {
-  nearLine,
-  TRACK_MARGIN,
-  TRACK_WIDTH,
-  type TrackPlot,
-  type TrackSource,
-  trackPlot,
-  trackSource,
-  trackYears,
-} from './track-layout.ts'
-
-const TARGET_HEIGHT = 236
-const LEAST_PLOT = 140
+import { layTrack, TRACK_AXIS_HEIGHT, TRACK_MARGIN, TRACK_WIDTH, type TrackPlot } from './track-layout.ts'
+import { reachHatch } from './track-marks.ts'
+import { trackNames } from './track-names.ts'
+import { yearsOutOfReach } from './track-reach.ts'
+import { type TrackSource, trackSource } from './track-source.ts'
 
 /**
- * Where the target of one sightline stood over time, against the line as measured: azimuth upwards, dates to the
- * right. Points; 440 wide, about 240 high. Throws a RangeError where the audit has no such sightline.
+ * Where the target of one sightline stood over time, against the line as measured: azimuth or altitude upwards, dates
+ * to the right. Points; 440 wide, about 240 high. Throws a RangeError where the audit has no such sightline.
  */
 export function trackFigure(audit: Audit, sightline: string): FigureDrawing {
   const source = trackSource(audit, sightline)
-  const { x } = trackYears(audit, source)
-  const rows = flagRows(dateFlags(audit, x), x(trackYears(audit, source).years[0]), TRACK_WIDTH - 2)
-  const top = Math.max(rows.height, 11) + 1
-  const plotHeight = Math.max(LEAST_PLOT, TARGET_HEIGHT - top - TRACK_AXIS_HEIGHT)
-  const plot = trackPlot(audit, source, top, plotHeight)
+  const { plot, flags } = layTrack(audit, source)
   const outside = outsideWindow(audit, plot)
-  const notes = outsideNotes(source, plot, outside)
+  const unreached = yearsOutOfReach(source)
+  const notes = notesOf(source, plot, outside, unreached)
   const shapes = [
     ...outsideGrounds(outside, plot),
+    ...reachHatch(unreached, plot),
+
     ...measuredBand(source, plot),
+    ...trackErrors(source, plot),
     ...dateBands(audit, plot),
     ...windowEnds(audit, plot),
     ...trackCurves(source, plot),
-    ...notes.map(({ box, content }) => text(box.left, box.bottom - 2, content, { fill: PALETTE.muted })),
+    ...notes.flatMap(groundNoteShapes),
     ...trackLabels(
       audit,
       source,
       plot,
       notes.map(({ box }) => box),
     ),
-    ...rows.draw(top),
-    ...trackAxes(plot, TRACK_MARGIN.right),
-    ...marginShapes(source, plot),
+    ...flags.draw(plot.box.top),
+    ...trackAxes(plot, source.sightline.measures, TRACK_MARGIN.right),
+    ...marginShapes(audit, source, plot),
   ]
-  const size = { width: TRACK_WIDTH, height: Math.ceil(top + plotHeight + TRACK_AXIS_HEIGHT) }
+  const size = { width: TRACK_WIDTH, height: Math.ceil(plot.box.bottom + TRACK_AXIS_HEIGHT) }
   return svgRoot(size, `Where the target of ${sightline} stood over time`, trackAlt(audit, source), shapes)
-}
-
-function dateFlags(audit: Audit, x: (year: number) => number): FlagLabel[] {
-  const flag = (date: DatedLabel, name: string, colour: string): FlagLabel => ({
-    x: x((date.from + date.to) / 2),
-    label: `${fitText(name, 90, TEXT_SIZE)}: ${date.printed}`,
-    stroke: { stroke: colour, strokeWidth: 0.6 },
-    fill: colour,
-  })
-  return [
-    { ...flag(audit.asserted, 'asserted', PALETTE.accent), weight: 600 },
-    ...audit.other_dates.map((date) => flag(date, date.label, PALETTE.ink)),
-  ]
 }
 
 function dateBands(audit: Audit, plot: TrackPlot): Element[] {
@@ -89,36 +63,57 @@ function bandOf({ from, to }: DatedLabel, plot: TrackPlot): Box {
   return { ...plot.box, left: plot.x(from), right: plot.x(to) }
 }
 
-/** Right of the plot: what the band and the curve are, and the Sun on the same scale, away from both. */
-function marginShapes(source: TrackSource, plot: TrackPlot): Element[] {
-  const { sightline, track } = source
+function notesOf(
+  source: TrackSource,
+  plot: TrackPlot,
+  outside: readonly (readonly [number, number])[],
+  unreached: readonly (readonly [number, number])[],
+): GroundNote[] {
+  return groundNotes(source, plot, [
+    ...outside.map((years) => ({ years, names: ['outside the window', 'outside'], isHatched: false })),
+    ...unreached.map((years) => ({
+      years,
+      names: ['target out of reach', 'out of reach'],
+      isHatched: true,
+    })),
+  ])
+}
+
+/** Right of the plot: what the band and the curves are, and the Sun on the same scale, away from them. */
+function marginShapes(audit: Audit, source: TrackSource, plot: TrackPlot): Element[] {
+  const { line_deg } = source.tracks[0]
+  const names = trackNames(source, plot).filter(({ x }) => x === null)
   const labels = [
-    {
-      y: plot.y(track.line_deg.value),
-      lines: ['line as measured', measuredDegrees(track.line_deg)],
-      strong: true,
-    },
-    ...trackEnd(source, plot),
+    { y: plot.y(line_deg.value), lines: ['line as measured', measuredDegrees(line_deg)], strong: true },
+    ...names.map(({ y, lines }) => ({ y, lines, strong: true })),
   ]
-  const width = 2 * sightline.semidiameter_arcmin.value
-  const diameter = plot.y(0) - plot.y(width / 60)
+  const guests = sunGuest(audit, source, plot, labels)
   const { top, bottom } = plot.box
-  const sun = sunToScale(width, diameter, (bottom - top) * 0.6)
-  const y = middleOfWidestGap([top, ...labels.map((label) => label.y), bottom])
-  return marginLabels(labels, { edge: plot.box.right, ...TRACK_MARGIN, top, bottom }, [{ ...sun, y }])
+  return marginLabels(labels, { edge: plot.box.right, ...TRACK_MARGIN, top, bottom }, guests)
+}
+
+function sunGuest(
+  audit: Audit,
+  source: TrackSource,
+  plot: TrackPlot,
+  labels: readonly { y: number }[],
+): MarginGuest[] {
+  const width = sunWidthArcmin(audit, source)
+  if (width === null) return []
+  const { top, bottom } = plot.box
+  const sun = sunToScale(width, plot.y(0) - plot.y(width / 60), (bottom - top) * 0.6)
+  return [{ ...sun, y: middleOfWidestGap([top, ...labels.map((label) => label.y), bottom]) }]
+}
+
+/** The Sun's own width where it is the target; elsewhere its width as the sweep measures tolerances in it. */
+function sunWidthArcmin({ sweep }: Audit, { sightline }: TrackSource): number | null {
+  const { body, semidiameter_arcmin } = sightline
+  if (body === 'sun' && semidiameter_arcmin !== null) return 2 * semidiameter_arcmin.value
+  const step = (sightline.sweep ?? sweep).steps.find(({ tolerance_sun_widths }) => tolerance_sun_widths > 0)
+  return step === undefined ? null : step.tolerance_arcmin / step.tolerance_sun_widths
 }
 
 function middleOfWidestGap(heights: readonly number[]): number {
   const [widest] = pairs([...heights].sort((a, b) => a - b)).sort(([a, b], [c, d]) => d - c - (b - a))
   return widest === undefined ? 0 : (widest[0] + widest[1]) / 2
-}
-
-function trackEnd(
-  { track }: TrackSource,
-  plot: TrackPlot,
-): { y: number; lines: string[]; strong: boolean }[] {
-  const azimuths = nearLine(track)
-  const last = azimuths.findLast((azimuth) => azimuth !== null)
-  if (last === undefined || last === null) return []
-  return [{ y: plot.y(last), lines: ['azimuth of target', modelLabel(track.model)], strong: true }]
 }

@@ -9,9 +9,11 @@ import { PALETTE } from './palette.ts'
 import { costOf, type Obstacle, placeAround } from './place-around.ts'
 import { line, shape, TEXT_SIZE, text } from './shape.ts'
 import { fitText, textWidth } from './text-width.ts'
-import { trackObstacles, widestDifference } from './track-curves.ts'
-import type { TrackPlot, TrackSource } from './track-layout.ts'
+import { bandAbout, trackObstacles, widestDifference } from './track-curves.ts'
+import type { TrackPlot } from './track-layout.ts'
 import { approachEnds, approachMark, crossingMarks } from './track-marks.ts'
+import { trackNames } from './track-names.ts'
+import type { TrackSource } from './track-source.ts'
 
 interface PlotLabel {
   x: number
@@ -25,7 +27,7 @@ const HEIGHT = 8.5
 /** A label that covers more than this gets a plate. */
 const BUSY = 10
 
-/** The marks inside the plot with their labels: crossings, the nearest approach, the second model. */
+/** The marks inside the plot with their labels: crossings, the nearest approach, the curves. */
 export function trackLabels(
   audit: Audit,
   source: TrackSource,
@@ -36,6 +38,7 @@ export function trackLabels(
     ...crossingLabels(source, plot),
     ...approachLabel(source, plot),
     ...secondLabel(source, plot),
+    ...nameLabels(source, plot),
   ]
   const sized = labels.map(({ x, y, lines, weight }) => ({
     x,
@@ -54,11 +57,19 @@ export function trackLabels(
   ]
 }
 
-function crossingLabels({ implied, track }: TrackSource, plot: TrackPlot): PlotLabel[] {
+/** Among many crossings labels stay short and near, if need be on a curve. */
+const MANY_CROSSINGS = 5
+
+function isCrowded({ implied }: TrackSource): boolean {
+  return (implied?.dates.length ?? 0) >= MANY_CROSSINGS
+}
+
+function crossingLabels(source: TrackSource, plot: TrackPlot): PlotLabel[] {
+  const { implied, tracks } = source
   return (implied?.dates ?? []).map((date) => ({
     x: plot.x(date.year),
-    y: plot.y(track.line_deg.value),
-    lines: [`${impliedYear(date)}${date.future ? ' (to come)' : ''}`],
+    y: plot.y(tracks[0].line_deg.value),
+    lines: [impliedYear(date), ...(date.future && !isCrowded(source) ? ['(to come)'] : [])],
     weight: 600,
     fill: PALETTE.ink,
   }))
@@ -76,11 +87,18 @@ function approachLabel(source: TrackSource, plot: TrackPlot): PlotLabel[] {
   return [{ x: ends.x, y: (ends.from + ends.to) / 2, lines, weight: 600, fill: PALETTE.accent }]
 }
 
-function secondLabel({ track, second }: TrackSource, plot: TrackPlot): PlotLabel[] {
-  const widest = second === null ? null : widestDifference(track, second, plot)
-  if (second === null || widest === null) return []
-  const lines = [fitText(modelLabel(second.model), 120, TEXT_SIZE)]
+function secondLabel(source: TrackSource, plot: TrackPlot): PlotLabel[] {
+  const widest = widestDifference(source, plot)
+  if (widest === null) return []
+  const lines = [fitText(modelLabel(widest.track.model), 120, TEXT_SIZE)]
   return [{ x: widest.x, y: widest.y, lines, weight: 400, fill: PALETTE.muted }]
+}
+
+/** The names of the curves that do not end in view, which the margin cannot hold. */
+function nameLabels(source: TrackSource, plot: TrackPlot): PlotLabel[] {
+  return trackNames(source, plot).flatMap(({ x, y, lines }) =>
+    x === null ? [] : [{ x, y, lines, weight: 600, fill: PALETTE.ink }],
+  )
 }
 
 function labelShapes(label: PlotLabel, box: Box): Element[] {
@@ -114,20 +132,28 @@ function plate({ left, right, top, bottom }: Box): Element {
 /** What labels had better not lie on: curves first of all, then the line, the dates, the window's ends. */
 function obstacles(audit: Audit, source: TrackSource, plot: TrackPlot): Obstacle[] {
   const { left, right } = plot.box
-  const rule = plot.y(source.track.line_deg.value)
+  const { value, sd } = source.tracks[0].line_deg
+  const rule = plot.y(value)
   const approach = approachEnds(source, plot)
   const { window } = audit.sweep
   return [
-    ...[source.track, source.second].flatMap((track) =>
-      track === null ? [] : trackObstacles(track, plot, 3),
+    ...[...source.tracks, ...source.seconds].flatMap((track) =>
+      trackObstacles(track, plot, isCrowded(source) ? 0.6 : 3),
     ),
     { left, right, top: rule - 1, bottom: rule + 1, weight: 2 },
+    { left, right, ...bandAbout(value, sd, plot), weight: 0.05 },
+    ...(source.implied?.dates ?? []).map(({ year }) => aboutMark(plot.x(year), rule)),
     ...(approach === null ? [] : [upright(approach.x, approach.x, plot, 2)]),
     ...[audit.asserted, ...audit.other_dates].map(({ from, to }) =>
       upright(plot.x(from), plot.x(to), plot, 1),
     ),
     ...[window.from, window.to].map((year) => upright(plot.x(year), plot.x(year), plot, 0.6)),
   ]
+}
+
+/** Another mark's label had better not stand right above or below this one. */
+function aboutMark(x: number, y: number): Obstacle {
+  return { left: x - 4, right: x + 4, top: y - 14, bottom: y + 14, weight: 0.3 }
 }
 
 function upright(from: number, to: number, { box }: TrackPlot, weight: number): Obstacle {

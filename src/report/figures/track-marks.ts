@@ -1,15 +1,17 @@
 import type { Element } from 'hast'
 import type { ImpliedDate } from '../../audit/audit.ts'
+import { hatch } from './hatch.ts'
 import { PALETTE } from './palette.ts'
 import { line, shape } from './shape.ts'
-import { azimuthIn, type TrackPlot, type TrackSource } from './track-layout.ts'
+import type { TrackPlot } from './track-layout.ts'
+import type { TrackSource } from './track-source.ts'
 
 /** A crossing in the past is a full circle, one still to come an open one. */
-export function crossingMarks({ implied, track }: TrackSource, plot: TrackPlot): Element[] {
+export function crossingMarks({ implied, tracks }: TrackSource, plot: TrackPlot): Element[] {
   const mark = (date: ImpliedDate) =>
     shape('circle', {
       cx: plot.x(date.year),
-      cy: plot.y(track.line_deg.value),
+      cy: plot.y(tracks[0].line_deg.value),
       r: 2.6,
       fill: date.future ? PALETTE.paper : PALETTE.ink,
       stroke: PALETTE.ink,
@@ -18,15 +20,19 @@ export function crossingMarks({ implied, track }: TrackSource, plot: TrackPlot):
   return (implied?.dates ?? []).map(mark)
 }
 
-/** Ends of the shortest distance from the track to the line within the window. */
+/** Ends of the shortest distance from the target to the line within the window. */
 export function approachEnds(
-  { implied, track }: TrackSource,
+  { implied, tracks }: TrackSource,
   plot: TrackPlot,
 ): { x: number; from: number; to: number } | null {
   const nearest = implied?.nearest_approach ?? null
-  const azimuth = nearest === null ? null : azimuthIn(track, nearest.year)
-  if (nearest === null || nearest.offset_arcmin === null || azimuth === null) return null
-  return { x: plot.x(nearest.year), from: plot.y(azimuth), to: plot.y(track.line_deg.value) }
+  if (nearest === null || nearest.offset_arcmin === null) return null
+  const { value } = tracks[0].line_deg
+  return {
+    x: plot.x(nearest.year),
+    from: plot.y(value - nearest.offset_arcmin / 60),
+    to: plot.y(value),
+  }
 }
 
 /** The nearest approach as a measure between track and line. */
@@ -36,4 +42,12 @@ export function approachMark(source: TrackSource, plot: TrackPlot): Element[] {
   const stroke = { stroke: PALETTE.accent, strokeWidth: 1 }
   const cap = (y: number) => line([ends.x - 3, y], [ends.x + 3, y], stroke)
   return [line([ends.x, ends.from], [ends.x, ends.to], stroke), cap(ends.from), cap(ends.to)]
+}
+
+/** Years in which the target has no direction, hatched as in the figure of the sets. */
+export function reachHatch(stretches: readonly (readonly [number, number])[], plot: TrackPlot): Element[] {
+  return stretches
+    .map(([from, to]) => hatch({ ...plot.box, left: plot.x(from), right: plot.x(to) }, 9, true))
+    .filter((d) => d !== '')
+    .map((d) => shape('path', { d, fill: 'none', stroke: PALETTE.rule, strokeWidth: 0.5 }))
 }

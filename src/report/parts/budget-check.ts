@@ -12,7 +12,11 @@ export function budgetCheckPart({ budget_check }: Audit): BlockContent[] {
 
 function sentences({ year, linear_sd, sampled_sd, no_date_share, agree }: BudgetCheck): string {
   const around = formatYear(year, 10)
-  const sums = `Taken together these make ${formatNumber(linear_sd, 2)} years, one standard deviation about ${around}. Drawn at random from the same errors, again and again, the date scatters by ${formatNumber(sampled_sd, 2)} years`
+  const sum = `Taken together these make ${formatNumber(linear_sd, 2)} years, one standard deviation about ${around}.`
+  if (sampled_sd === null) {
+    return `${sum} Drawn at random from the same errors, the line has no date at all: trust the sets of dates above.`
+  }
+  const sums = `${sum} Drawn at random from the same errors, again and again, the date scatters by ${formatNumber(sampled_sd, 2)} years`
   if (agree) return `${sums}: the two routes agree.`
   const lost = no_date_share > 0 ? `, and in ${share(no_date_share)} of the draws no date fits at all` : ''
   return `${sums}${lost}. The two part because the track bends there, which a sum of separate effects cannot follow: trust the sets of dates above.`

@@ -4,16 +4,31 @@ import { formatArcmin } from '../../quantity/format-angle.ts'
 import { paragraph } from '../nodes.ts'
 import { lineOrLines } from '../wording/line-or-lines.ts'
 
+/** Where the line as measured does not fit, what the weights still mean. */
+const CAVEATS: Partial<Record<Audit['outcome'], string>> = {
+  none: ' Here no date fits; sets, ratios and limits then only say how the formula weighs misses against each other.',
+  missed:
+    ' Here the asserted date does not fit at small tolerances; a ratio in its favour there only says that another date misses by more.',
+}
+
 /** What the date rests on besides the line: how closely the builders hit the direction they meant. */
 export function premisePart(audit: Audit): BlockContent[] {
   return [
     paragraph(
       'A line gives a date only together with a premise: how closely the builders hit the direction they ',
       `meant. ${claimsPremise(audit)} The build tolerance below is the standard deviation of the built `,
-      `direction about the intended one, as an angle along the horizon. ${plausible(audit)}`,
+      `direction about the intended one, ${asAngle(audit)}. ${plausible(audit)}`,
     ),
     paragraph(weighing(audit)),
   ]
+}
+
+/** In which plane the tolerance is counted. */
+function asAngle({ sightlines }: Audit): string {
+  const has = (measures: 'azimuth' | 'altitude') => sightlines.some((line) => line.measures === measures)
+  if (!has('altitude')) return 'as an angle along the horizon'
+  if (!has('azimuth')) return 'as an angle up or down'
+  return 'as an angle along the horizon or, for a measured altitude, up or down'
 }
 
 function claimsPremise({ assumed_precision_arcmin }: Audit): string {
@@ -35,10 +50,7 @@ function weighing(audit: Audit): string {
     ? 'as the claim file has it'
     : 'this program’s own, as the claim file names none'
   const several = audit.sightlines.length > 1 ? ' All sightlines are taken together.' : ''
-  const none =
-    audit.outcome === 'none'
-      ? ' Here no date fits; sets, ratios and limits then only say which dates miss it by less.'
-      : ''
+  const none = CAVEATS[audit.outcome] ?? ''
   return [
     `For each tolerance, every date in the window (${window.printed}, ${whose}) is weighed by how well the sky of `,
     `that date fits ${lineOrLines(audit, 'the line', 'the lines')}; before that, all count alike.${several}${none} `,

@@ -1,32 +1,38 @@
 import type { BlockContent } from 'mdast'
-import type { Audit, Today } from '../../audit/audit.ts'
+import type { Audit, SightlineAudit, Today } from '../../audit/audit.ts'
 import { formatDegrees } from '../../quantity/format-angle.ts'
 import { formatCm } from '../../quantity/format-length.ts'
 import { formatYear } from '../../quantity/format-year.ts'
 import { paragraph } from '../nodes.ts'
-import { offsetFromLine } from '../wording/offset-from-line.ts'
+import { noEvent } from '../wording/no-event.ts'
+import { offsetFromLine, whatPoints } from '../wording/offset-from-line.ts'
 import { sunWidthShare } from '../wording/sun-width-share.ts'
 
 /** Where each line's target stands in the year of the audit. */
 export function todayPart(audit: Audit): BlockContent[] {
-  return audit.today.map((today) => {
+  return audit.today.flatMap((today) => {
     const line = audit.sightlines.find(({ name }) => name === today.sightline)
-    return paragraph(sentence(today, line?.length_m == null ? 'at 100 m' : 'at the marker'))
+    return line === undefined ? [] : [paragraph(sentence(today, line))]
   })
 }
 
 function sentence(
-  { sightline, year, azimuth_deg, offset_arcmin, sun_widths, offset_cm }: Today,
-  place: string,
+  { sightline, year, direction_deg, offset_arcmin, sun_widths, offset_cm }: Today,
+  line: SightlineAudit,
 ): string {
   const when = `Today (${formatYear(Math.floor(year))})`
-  if (azimuth_deg === null || offset_arcmin === null) {
-    return `${when} the target of ${sightline} does not reach that altitude.`
+  if (direction_deg === null || offset_arcmin === null) {
+    return `${when} the target of ${sightline} is not to be seen: there is ${noEvent(line)}.`
   }
-  const shares = [
+  const also = [
     ...(sun_widths === null ? [] : [sunWidthShare(sun_widths)]),
-    ...(offset_cm === null ? [] : [`${formatCm(Math.abs(offset_cm))} ${place}`]),
+    ...(offset_cm === null
+      ? []
+      : [`${formatCm(Math.abs(offset_cm))} ${line.length_m === null ? 'at 100 m' : 'at the marker'}`]),
   ]
-  const where = offsetFromLine(offset_arcmin, null, shares)
-  return `${when} the target of ${sightline} stands at azimuth ${formatDegrees(azimuth_deg, 'minute')}; the line points ${where}.`
+  const { measures, body } = line
+  const where = offsetFromLine({ arcmin: offset_arcmin, sdArcmin: null, measures, also })
+  // The years of a standstill come and go: the audit's own need not be one.
+  const then = body === 'moon' ? `${when}, in a year of such a standstill,` : when
+  return `${then} the target of ${sightline} stands at ${measures} ${formatDegrees(direction_deg, 'minute')}; ${whatPoints(measures, 'now')} ${where}.`
 }

@@ -23,8 +23,9 @@ export function limitsTable(audit: Audit): Table[] {
   ]
 }
 
-function ratio3({ ratio_3_arcmin, ratio_3_cm, ratio_3_reason }: Limit): string {
-  return limitCell(ratio_3_arcmin, ratio_3_cm, ratio_3_reason)
+function ratio3({ ratio_3_arcmin, ratio_3_cm, ratio_3_reason, ratio_3_steady }: Limit): string {
+  const limit = limitCell(ratio_3_arcmin, ratio_3_cm, ratio_3_reason)
+  return ratio_3_steady === false ? `${limit}, but not at every tolerance below that` : limit
 }
 
 function otherIn95({ other_date_in_95_arcmin, other_date_in_95_cm, other_date_in_95_reason }: Limit): string {

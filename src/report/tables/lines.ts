@@ -1,32 +1,77 @@
 import type { Table } from 'mdast'
-import type { Audit, SightlineAudit } from '../../audit/audit.ts'
-import { table } from '../nodes.ts'
+import type { Audit, SightlineAudit, Value } from '../../audit/audit.ts'
+import { type Column, table } from '../nodes.ts'
 import { measuredArcmin, measuredDegrees } from '../wording/measured-angle.ts'
 
-/** From each built line to a declination, step by step. */
+/** Stands where a line has no such step. */
+const NONE = '–'
+
+/** From each built line to a declination, step by step; a step that no line has is left out. */
 export function linesTable(audit: Audit): Table[] {
-  if (audit.sightlines.length === 0) return []
+  const { sightlines } = audit
+  if (sightlines.length === 0) return []
   return [
     table<SightlineAudit>(
-      ['From the line to a declination; each ± is one standard deviation, the builders’ own error left out.'],
       [
-        { head: 'Sightline', cell: (line) => line.name, width: 1.3 },
-        { head: 'Azimuth', cell: (line) => measuredDegrees(line.azimuth_deg), width: 1.5 },
-        { head: 'Horizon', cell: (line) => measuredDegrees(line.altitude_deg), width: 1.3 },
-        { head: 'Refraction', cell: (line) => measuredArcmin(line.refraction_arcmin), width: 1.3 },
-        {
-          head: 'Half the Sun’s width',
-          cell: (line) => measuredArcmin(line.semidiameter_arcmin),
-          width: 1.3,
-        },
-        {
-          head: 'Centre’s true altitude',
-          cell: (line) => measuredDegrees(line.centre_altitude_deg),
-          width: 1.4,
-        },
-        { head: 'Declination', cell: (line) => measuredDegrees(line.declination_deg), width: 1.4 },
+        sightlines.every(({ declination_deg }) => declination_deg === null)
+          ? 'The line as measured; each ± is one standard deviation, the builders’ own error left out.'
+          : 'From the line to a declination; each ± is one standard deviation, the builders’ own error left out.',
       ],
-      audit.sightlines,
+      columnsFor(sightlines).filter(({ cell }) => sightlines.some((line) => cell(line) !== NONE)),
+      sightlines,
     ),
   ]
+}
+
+function columnsFor(lines: readonly SightlineAudit[]): Column<SightlineAudit>[] {
+  return [
+    { head: 'Sightline', cell: (line) => line.name, width: 1.3 },
+    { head: 'Azimuth', cell: azimuth, width: 1.5 },
+    { head: altitudeHead(lines), cell: altitude, width: 1.3 },
+    { head: 'Refraction', cell: refraction, width: 1.3 },
+    { head: discHead(lines), cell: ({ semidiameter_arcmin: half }) => arcmin(half), width: 1.3 },
+    { head: trueAltitudeHead(lines), cell: ({ centre_altitude_deg: deg }) => degrees(deg), width: 1.4 },
+    { head: 'Declination', cell: ({ declination_deg: deg }) => degrees(deg), width: 1.4 },
+  ]
+}
+
+/** An altitude is measured on the meridian, where the azimuth is no result. */
+function azimuth({ measures, azimuth_deg }: SightlineAudit): string {
+  if (measures === 'azimuth') return measuredDegrees(azimuth_deg)
+  return azimuth_deg.value === 0 ? 'north, on the meridian' : 'south, on the meridian'
+}
+
+/** The direction of two stars one above the other does not depend on height or air. */
+function altitude({ body, altitude_deg }: SightlineAudit): string {
+  return body === 'two stars' ? NONE : measuredDegrees(altitude_deg)
+}
+
+function refraction({ body, refraction_arcmin }: SightlineAudit): string {
+  return body === 'two stars' ? NONE : measuredArcmin(refraction_arcmin)
+}
+
+function arcmin(value: Value | null): string {
+  return value === null ? NONE : measuredArcmin(value)
+}
+
+function degrees(value: Value | null): string {
+  return value === null ? NONE : measuredDegrees(value)
+}
+
+function altitudeHead(lines: readonly SightlineAudit[]): string {
+  const measures = new Set(lines.map((line) => line.measures))
+  if (measures.size > 1) return 'Horizon, or altitude measured'
+  return measures.has('altitude') ? 'Altitude measured' : 'Horizon'
+}
+
+function discHead(lines: readonly SightlineAudit[]): string {
+  const bodies = new Set(lines.map(({ body }) => body).filter((body) => body === 'sun' || body === 'moon'))
+  if (bodies.size > 1) return 'Half the disc’s width'
+  return bodies.has('moon') ? 'Half the Moon’s width' : 'Half the Sun’s width'
+}
+
+function trueAltitudeHead(lines: readonly SightlineAudit[]): string {
+  return lines.some(({ semidiameter_arcmin }) => semidiameter_arcmin !== null)
+    ? 'Centre’s true altitude'
+    : 'True altitude'
 }

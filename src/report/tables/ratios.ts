@@ -21,13 +21,16 @@ export function ratiosTable(audit: Audit): Table[] {
       [
         `How many times better the asserted date (${audit.asserted.printed}) fits ${lineOrLines(audit, 'the line', 'the lines')} `,
         'than each independent date does; a figure below 1 favours the independent date. The words are those of Kass & Raftery (1995).',
+        audit.outcome === 'none' || audit.outcome === 'missed'
+          ? ' Where neither date fits, the figure only compares misses.'
+          : '',
       ],
       [
         {
           head: 'Build tolerance',
           cell: (step) => formatArcmin(step.tolerance_arcmin),
           align: 'right',
-          width: 1,
+          width: audit.other_dates.length > 2 ? 3 : 1,
         },
         ...against,
       ],

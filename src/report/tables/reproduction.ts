@@ -3,8 +3,9 @@ import type { Audit, Reproduction } from '../../audit/audit.ts'
 import { groupThousands } from '../../quantity/format-number.ts'
 import { formatYear } from '../../quantity/format-year.ts'
 import { type Column, table } from '../nodes.ts'
+import { bodiesOf } from '../wording/bodies.ts'
 
-/** The date that each obliquity model gives, and where that leaves its author's stated range. */
+/** The date that each model of obliquity or precession gives, and where that leaves its author's stated range. */
 export function reproductionTable(audit: Audit): Table[] {
   if (audit.reproduction.length === 0) return []
   const isMixed = new Set(audit.reproduction.map((row) => `${row.from} ${row.sightline}`)).size > 1
@@ -13,11 +14,11 @@ export function reproductionTable(audit: Audit): Table[] {
   return [
     table<Reproduction>(
       [
-        `The date nearest the asserted one (${audit.asserted.printed}),${origin} by each model of the Earth’s tilt.`,
+        `The date nearest the asserted one (${audit.asserted.printed}),${origin} by each model${ofWhat(audit)}.`,
       ],
       [
         ...(isMixed ? [from] : []),
-        { head: 'Obliquity after', cell: (row) => row.label, width: 1.2 },
+        { head: modelHead(audit), cell: (row) => row.label, width: 1.2 },
         { head: 'Date', cell: ({ year }) => (year === null ? 'none' : formatYear(year)), width: 1 },
         {
           head: 'Against the asserted date',
@@ -34,6 +35,17 @@ export function reproductionTable(audit: Audit): Table[] {
       audit.reproduction,
     ),
   ]
+}
+
+function ofWhat(audit: Audit): string {
+  const { tilt, stars } = bodiesOf(audit)
+  return [tilt ? ' of the Earth’s tilt' : '', stars ? ' of precession' : ''].filter(Boolean).join(' or')
+}
+
+function modelHead(audit: Audit): string {
+  const { tilt, stars } = bodiesOf(audit)
+  if (tilt && stars) return 'Model'
+  return stars ? 'Precession after' : 'Obliquity after'
 }
 
 function printOrigin({ from, sightline }: Reproduction, { sightlines }: Audit): string {

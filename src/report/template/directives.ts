@@ -20,7 +20,8 @@ import { VALUES } from './values.ts'
  *
  * Conditions of `when`: `has` and `lacks` name one thing or several, parted by spaces, that must all be there,
  * or all be missing; `outcome` names the outcomes for which it holds. What stands in a `when` or a `panel` may
- * hold further ones: the outer fence then needs more colons than the inner.
+ * hold further ones: the outer fence then needs more colons than the inner. Lists that only a `when` parts become
+ * one list.
  */
 export const DIRECTIVES: Readonly<Record<string, DirectiveRule>> = {
   part: { form: 'leaf', mayHaveLabel: false, attributes: { of: oneOf(PARTS) } },

@@ -1,4 +1,4 @@
-import type { BlockContent, DefinitionContent, ListItem, PhrasingContent, Root, Table } from 'mdast'
+import type { BlockContent, DefinitionContent, List, ListItem, PhrasingContent, Root, Table } from 'mdast'
 import type { Audit } from '../../audit/audit.ts'
 import type { Figure, Panel } from '../document.ts'
 import { conditionsHold } from './conditions.ts'
@@ -18,9 +18,30 @@ export interface Rendering {
 type Block = Root['children'][number]
 type Flow = BlockContent | DefinitionContent
 
-/** Renders the blocks of a template that has no problems; a block may give none, one or several. */
+/**
+ * Renders the blocks of a template that has no problems; a block may give none, one or several. Lists that only the
+ * fence of a `when` parts become one list.
+ */
 export function renderBlocks(blocks: readonly Block[], rendering: Rendering): Flow[] {
-  return blocks.flatMap((block) => renderBlock(block, rendering))
+  const rendered: Flow[] = []
+  let isAfterWhen = false
+  for (const block of blocks) {
+    const isWhen = block.type === 'containerDirective' && block.name === 'when'
+    const [first, ...rest] = renderBlock(block, rendering)
+    const last = rendered.at(-1)
+    if (first !== undefined) {
+      if ((isWhen || isAfterWhen) && last?.type === 'list' && runsOn(last, first)) {
+        rendered[rendered.length - 1] = { ...last, children: [...last.children, ...first.children] }
+      } else rendered.push(first)
+      rendered.push(...rest)
+    }
+    isAfterWhen = isWhen
+  }
+  return rendered
+}
+
+function runsOn(list: List, next: Flow): next is List {
+  return next.type === 'list' && next.ordered === list.ordered
 }
 
 function renderBlock(block: Block, rendering: Rendering): Flow[] {

@@ -5,6 +5,7 @@ import { assumptionsTable } from '../tables/assumptions.ts'
 import { budgetTable } from '../tables/budget.ts'
 import { checksTable } from '../tables/checks.ts'
 import { datesTable } from '../tables/dates.ts'
+import { eachLineTable } from '../tables/each-line.ts'
 import { limitsTable } from '../tables/limits.ts'
 import { linesTable } from '../tables/lines.ts'
 import { premiseTable } from '../tables/premise.ts'
@@ -19,6 +20,7 @@ export const TABLES: Readonly<Record<string, (audit: Audit) => Table[]>> = {
   budget: budgetTable,
   checks: checksTable,
   dates: datesTable,
+  each_line: eachLineTable,
   limits: limitsTable,
   lines: linesTable,
   premise: premiseTable,

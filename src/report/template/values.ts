@@ -1,6 +1,6 @@
 import type { Audit } from '../../audit/audit.ts'
 import { formatArcmin, formatDegrees } from '../../quantity/format-angle.ts'
-import { joinList } from '../wording/join-list.ts'
+import { listed } from '../../quantity/listed.ts'
 
 /** What `:value{of="…"}` may name: a few words for the middle of a sentence. To add one, add a row. */
 export const VALUES: Readonly<Record<string, (audit: Audit) => string>> = {
@@ -12,7 +12,7 @@ export const VALUES: Readonly<Record<string, (audit: Audit) => string>> = {
   plausible_precision: ({ plausible }) =>
     `${formatArcmin(plausible.low_arcmin)} to ${formatArcmin(plausible.high_arcmin)}`,
   second_window: (audit) => audit.second_window.window.printed,
-  sightlines: (audit) => joinList(audit.sightlines.map((line) => line.name)),
+  sightlines: (audit) => listed(audit.sightlines.map((line) => line.name)),
   source: (audit) => audit.source ?? 'no source named',
   statement: (audit) => audit.statement,
   'structure.latitude': ({ structure }) => latitude(structure.latitude_deg),

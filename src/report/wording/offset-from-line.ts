@@ -1,18 +1,29 @@
 import { formatArcmin } from '../../quantity/format-angle.ts'
 import { sideOfLine } from './side-of-line.ts'
 
+/** The line less its target, and what else is known of that. */
+export interface Offset {
+  arcmin: number
+  sdArcmin: number | null
+  measures: 'azimuth' | 'altitude'
+  /** Stands in brackets after the figure. */
+  also?: readonly string[]
+}
+
 /**
- * Where the line points as seen from its target, for a sentence: `1.8′ ± 2.5′ to the left of it`, or `at it` where
- * the two print as one. `also` stands in brackets after the figure.
+ * Where the line points as seen from its target, for a sentence: `1.8′ ± 2.5′ to the left of it`, `5′ above it`, or
+ * `at it` where the two print as one.
  */
-export function offsetFromLine(
-  offsetArcmin: number,
-  sdArcmin: number | null,
-  also: readonly string[] = [],
-): string {
-  const side = sideOfLine(offsetArcmin)
+export function offsetFromLine({ arcmin, sdArcmin, measures, also = [] }: Offset): string {
+  const side = sideOfLine(arcmin, measures)
   if (side === null) return 'at it'
   const sd = sdArcmin === null ? '' : ` ± ${formatArcmin(sdArcmin)}`
   const shares = also.length === 0 ? '' : ` (${also.join(', ')})`
-  return `${formatArcmin(Math.abs(offsetArcmin))}${sd}${shares} to the ${side} of it`
+  return `${formatArcmin(Math.abs(arcmin))}${sd}${shares} ${side} it`
+}
+
+/** What is held against the target, with its verb: `the line points`, `the altitude measured lies`. */
+export function whatPoints(measures: 'azimuth' | 'altitude', when: 'now' | 'then'): string {
+  if (measures === 'altitude') return `the altitude measured ${when === 'now' ? 'lies' : 'lay'}`
+  return `the line ${when === 'now' ? 'points' : 'pointed'}`
 }

@@ -3,8 +3,16 @@ import { describe, expect, it } from 'vitest'
 import type { Audit } from '../../../src/audit/audit.ts'
 import { premiseFigure } from '../../../src/report/figures/premise-figure.ts'
 import { trackFigure } from '../../../src/report/figures/track-figure.ts'
-import { impliedOf, makeShapedAudit, type Sets, stepAt, trackOf } from './make-audit.ts'
-import { badNumbers, overlappingTexts, textsOf, textsOutside } from './read-drawing.ts'
+import { courseOf, impliedOf, makeShapedAudit, type Sets, stepAt, trackOf } from './make-audit.ts'
+import {
+  badNumbers,
+  linesOf,
+  overlappingTexts,
+  polygonsOf,
+  shapesOf,
+  textsOf,
+  textsOutside,
+} from './read-drawing.ts'
 
 fc.configureGlobal({ seed: 1977 })
 
@@ -102,6 +110,76 @@ describe('any audit', () => {
     )
   })
 })
+
+/** Any course of a target: a wave that may go round and round, or vanish below some level. */
+const course = fc
+  .record({
+    middle: fc.double({ min: -400, max: 400, noNaN: true }),
+    swing: fc.oneof(fc.double({ min: 0, max: 250, noNaN: true }), fc.constant(0)),
+    period: fc.double({ min: 3000, max: 60_000, noNaN: true }),
+    level: fc.double({ min: -1.5, max: 1.2, noNaN: true }),
+  })
+  .map(({ middle, swing, period, level }) => (year: number) => {
+    const phase = Math.sin((year / period) * 2 * Math.PI)
+    return phase < level ? null : middle + swing * phase
+  })
+
+const otherTarget = fc
+  .record({
+    base: audit,
+    courses: fc.array(course, { minLength: 1, maxLength: 3 }),
+    second: fc.option(course),
+    measures: fc.constantFrom('azimuth', 'altitude' as const),
+    body: fc.constantFrom('sun', 'moon', 'star', 'two stars' as const),
+    asserted: fc.option(fc.double({ min: 0, max: 360, noNaN: true })),
+    sd: fc.double({ min: 0, max: 600, noNaN: true }),
+    crossings: fc.array(year, { maxLength: 12 }),
+  })
+  .map(({ base, courses, second, measures, body, asserted, sd, crossings }): Audit => {
+    const line = base.tracks[0]!.line_deg
+    const names = ['March equinox', 'Kochab above', 'x'.repeat(30)]
+    const tracks = courses.map((direction, branch) =>
+      courseOf('vondrak2011', line, direction, {
+        ...{ branch, sd, branch_words: courses.length > 1 ? names[branch]! : null },
+      }),
+    )
+    const short = second === null ? [] : [courseOf('p03', line, second, { from: -5000, to: 10_000 })]
+    return {
+      ...base,
+      tracks: [...tracks, ...short],
+      implied: [impliedOf(crossings, crossings.length > 0 ? null : base.implied[0]!.nearest_approach)],
+      sightlines: base.sightlines.map((each) => ({
+        ...each,
+        ...{ measures, body, direction_at_asserted_deg: asserted },
+        semidiameter_arcmin: body === 'sun' || body === 'moon' ? each.semidiameter_arcmin : null,
+      })),
+    }
+  })
+
+describe('any other target', () => {
+  it('gives a track figure without bad numbers, small type, texts that overlap or curves beyond the plot', () => {
+    fc.assert(
+      fc.property(otherTarget, (each) => {
+        const { drawing } = trackFigure(each, 'midsummer')
+        checkFigure(drawing)
+        expect(strayHeights(drawing)).toEqual([])
+      }),
+      { numRuns: 120 },
+    )
+  })
+})
+
+/** Heights of curves and grounds outside the plot. */
+function strayHeights(drawing: ReturnType<typeof premiseFigure>['drawing']): number[] {
+  const axis = linesOf(drawing).find(({ x1, x2, y1, y2 }) => x1 === 40 && x2 === 40 && y2 - y1 > 100)!
+  return shapesOf(drawing, 'path')
+    .filter(
+      ({ properties }) => Number(properties.strokeWidth) >= 0.8 || Number(properties.fillOpacity) === 0.09,
+    )
+    .flatMap(({ properties }) => polygonsOf(String(properties.d)).flat())
+    .map(([, y]) => y)
+    .filter((y) => y < axis.y1 - 0.01 || y > axis.y2 + 0.01)
+}
 
 function checkFigure(drawing: ReturnType<typeof premiseFigure>['drawing']): void {
   expect(badNumbers(drawing)).toEqual([])

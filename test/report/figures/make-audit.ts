@@ -33,6 +33,8 @@ export interface Shape {
   tracks?: readonly Track[]
   implied?: readonly Implied[]
   measuredLength?: boolean
+  /** What the sightline has otherwise than a June solstice sunrise. */
+  sightline?: Partial<SightlineAudit>
 }
 
 const SWEPT = Array.from({ length: 90 }, (_, i) => 0.5 * 600 ** (i / 89))
@@ -66,7 +68,7 @@ export function makeShapedAudit(shape: Shape = {}): Audit {
     summary: [],
     findings: [],
     assumptions: [],
-    sightlines: [sightlineOf(line)],
+    sightlines: [{ ...sightlineOf(line), ...shape.sightline }],
     tracks: shape.tracks ?? [trackOf('vondrak2011', line, 0), trackOf('laskar2004', line, 1)],
     implied: shape.implied ?? [impliedOf(crossings(line.value))],
     checks: [],
@@ -132,7 +134,9 @@ function middlePart([from, to]: readonly [number, number]): [number, number] {
 
 const NO_LIMIT: Limit = {
   against: null,
+  overlaps: false,
   ratio_3_arcmin: null,
+  ratio_3_steady: null,
   other_date_in_95_arcmin: null,
   half_bit_arcmin: null,
   ratio_3_cm: null,
@@ -155,6 +159,8 @@ function windowOf([from, to]: readonly [number, number]): Window {
 function sightlineOf(line: { value: number; sd: number }): SightlineAudit {
   return {
     name: 'midsummer',
+    body: 'sun',
+    measures: 'azimuth',
     event: 'June solstice sunrise',
     target: 'June solstice sunrise, upper limb on the horizon',
     azimuth_deg: line,
@@ -165,11 +171,14 @@ function sightlineOf(line: { value: number; sd: number }): SightlineAudit {
     declination_deg: { value: 24.2, sd: 0.05 },
     air: null,
     length_m: 100,
-    azimuth_at_asserted_deg: 57.9077,
+    direction_at_asserted_deg: 57.9077,
     offset_at_asserted_arcmin: 0,
     offset_at_asserted_sd_arcmin: 2.5,
+    closest_in_asserted: { year: -9600, offset_arcmin: 0, sd_arcmin: 2.5 },
     drift: null,
-    dwell_days: 9,
+    notes: [
+      'Around the solstice the Sun’s place on the horizon stays within 1′ of its extreme for 9.3 days.',
+    ],
     sweep: null,
   }
 }
@@ -179,15 +188,34 @@ const PERIOD = 41_000
 
 /** A wave of 41,000 years with its least azimuth about 7400 BCE, as the obliquity has it; `late` shifts it a little. */
 export function trackOf(model: string, line: { value: number; sd: number }, late: number): Track {
-  const years = Array.from({ length: 843 }, (_, i) => -30_000 + 50 * i)
   const azimuth = (year: number) => azimuthOf(year) + late * 0.03 * Math.max(0, (-4000 - year) / 14_000) ** 2
+  return courseOf(model, line, azimuth)
+}
+
+/** A track by any course of directions, over the years that all tracks have, or over part of them. */
+export function courseOf(
+  model: string,
+  line: { value: number; sd: number },
+  direction: (year: number) => number | null,
+  {
+    from = -30_000,
+    to = 12_100,
+    sd = 2.5,
+    ...rest
+  }: Partial<Track> & { from?: number; to?: number; sd?: number } = {},
+): Track {
+  const years = Array.from({ length: Math.round((to - from) / 50) + 1 }, (_, i) => from + 50 * i)
+  const directions = years.map(direction)
   return {
     sightline: 'midsummer',
     model,
     years,
-    azimuth_deg: years.map(azimuth),
-    sd_arcmin: years.map(() => 2.5),
+    branch: 0,
+    branch_words: null,
+    direction_deg: directions.map((deg) => (deg === null ? null : ((deg % 360) + 360) % 360)),
+    sd_arcmin: directions.map((deg) => (deg === null ? null : sd)),
     line_deg: line,
+    ...rest,
   }
 }
 
@@ -214,4 +242,35 @@ export function impliedOf(years: readonly number[], approach: Implied['nearest_a
     }),
   )
   return { sightline: 'midsummer', model: 'vondrak2011', dates, nearest_approach: approach }
+}
+
+/** Where a course of directions crosses a line, to the year; directions less than 90° off it. */
+export function yearsOnLine(direction: (year: number) => number | null, lineDeg: number): number[] {
+  const offset = (year: number) => {
+    const deg = direction(year)
+    return deg === null ? null : ((((deg - lineDeg) % 360) + 540) % 360) - 180
+  }
+  const years = Array.from({ length: 42_100 }, (_, i) => i - 30_000)
+  return years.filter((year) => {
+    const [before, after] = [offset(year), offset(year + 1)]
+    if (before === null || after === null || Math.abs(before) > 90) return false
+    return before === 0 || before * after < 0
+  })
+}
+
+/** Stretches about some years, each so long to either side; those that touch are one. */
+export function stretchesAbout(
+  years: readonly number[],
+  half: number,
+  [from, to]: readonly [number, number],
+): Sets {
+  const merged: [number, number][] = []
+  for (const year of years.toSorted((a, b) => a - b)) {
+    const [low, high] = [Math.max(from, year - half), Math.min(to, year + half)]
+    if (high <= low) continue
+    const last = merged.at(-1)
+    if (last !== undefined && low <= last[1]) last[1] = Math.max(last[1], high)
+    else merged.push([low, high])
+  }
+  return merged
 }

@@ -7,6 +7,7 @@ import {
   CASES,
   carriedAudit,
   missedAudit,
+  narrowAudit,
   noneAudit,
   partsAudit,
   premiseAudit,
@@ -205,7 +206,7 @@ describe('the figure where nothing fits', () => {
     const audit = noneAudit()
     const { drawing, alt } = premiseFigure(audit)
     const { y } = scalesFromTicks(drawing, audit)
-    textOf(drawing, 'No date in reach fits this line: the sets show only which dates miss it least.')
+    textOf(drawing, 'No date in reach fits this line: the sets only weigh misses against each other.')
     textOf(drawing, 'target out of reach')
     const hatching = shapesOf(drawing, 'path').find(({ properties }) => properties.stroke === PALETTE.rule)!
     const heights = polygonsOf(String(hatching.properties.d))
@@ -226,6 +227,42 @@ describe('the alternative text', () => {
     const [title, desc] = drawing.children as Element[]
     expect([title!.tagName, desc!.tagName]).toEqual(['title', 'desc'])
     expect(desc!.children).toEqual([{ type: 'text', value: alt }])
+  })
+})
+
+describe('dates and sets that fill little of the window', () => {
+  const audit = narrowAudit()
+  const { drawing, alt } = premiseFigure(audit)
+
+  it('are shown with the part of the window about them', () => {
+    const { y } = scalesFromTicks(drawing, audit)
+    // The earliest and the latest of the dates and of the sets at 15′ and less: 102 years about 2492 and 2440 BCE.
+    const [low, high] = [-2593, -2337]
+    const frame = linesOf(drawing).find(({ x1, x2 }) => x1 === 52 && x2 === 52)!
+    expect(frame.y1).toBeLessThan(y(high))
+    expect(frame.y2).toBeGreaterThan(y(low))
+    expect(y(low) - y(high)).toBeGreaterThan((frame.y2 - frame.y1) / 2)
+    textOf(drawing, 'the window goes on')
+    textOf(drawing, 'in 20,001 BCE')
+    expect(alt).toContain('Of the window, 2670 to 2260 BCE is drawn.')
+  })
+
+  it('have nothing drawn beyond the plot', () => {
+    const frame = linesOf(drawing).find(({ x1, x2 }) => x1 === 52 && x2 === 52)!
+    const heights = shapesOf(drawing, 'path')
+      .filter(({ properties }) => [PALETTE.set95, PALETTE.set68].includes(String(properties.fill) as never))
+      .flatMap(({ properties }) => polygonsOf(String(properties.d)).flat())
+      .map(([, y]) => y)
+    expect(Math.min(...heights)).toBeGreaterThanOrEqual(frame.y1 - 0.01)
+    expect(Math.max(...heights)).toBeLessThanOrEqual(frame.y2 + 0.01)
+    for (const { y1, y2 } of linesOf(drawing).filter(({ x1 }) => x1 === 52)) {
+      expect(Math.max(y1, y2)).toBeLessThanOrEqual(frame.y2 + 0.01)
+    }
+  })
+
+  it('fill the whole window where a plausible tolerance lets them', () => {
+    const wide = premiseFigure({ ...audit, plausible: { ...audit.plausible, high_arcmin: 120 } }).drawing
+    textOf(wide, 'window from 20,001 BCE')
   })
 })
 

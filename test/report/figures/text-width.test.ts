@@ -1,7 +1,7 @@
 import { createRequire } from 'node:module'
 import PDFDocument from 'pdfkit'
 import { describe, expect, it } from 'vitest'
-import { fitText, textWidth } from '../../../src/report/figures/text-width.ts'
+import { fitText, isWidthKnown, textWidth } from '../../../src/report/figures/text-width.ts'
 
 const require = createRequire(import.meta.url)
 const FACES = '@expo-google-fonts/source-sans-3'
@@ -17,6 +17,7 @@ const LINES = [
   'The quick brown fox jumps over the lazy dog; 0123456789',
   'WILLIAM MILLFIELD, (EARL) & Sons: “£”',
   '57°54′28″ ± 1.2′',
+  'Ávila, Öland, Çatal, Łódź, Île, Ñandú',
 ]
 
 // The fonts' own advance widths, read from the font files: Source Sans 3 and the standard Helvetica (Adobe's AFM).
@@ -41,6 +42,15 @@ describe('textWidth', () => {
       )
     },
   )
+})
+
+describe('isWidthKnown', () => {
+  it('holds for Latin letters with their accents, and not for scripts without a table', () => {
+    expect(isWidthKnown('Öland: 57°54′ ± 1.2′')).toBe(true)
+    expect(isWidthKnown('𓉔')).toBe(false)
+    expect(isWidthKnown('Ωρίων')).toBe(false)
+    expect(isWidthKnown('')).toBe(false)
+  })
 })
 
 describe('fitText', () => {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { azimuthTicks } from '../../../src/report/figures/azimuth-ticks.ts'
+import { directionTicks } from '../../../src/report/figures/direction-ticks.ts'
 import {
   keepLegible,
   lengthTicks,
@@ -76,9 +76,9 @@ describe('lengthTicks and ratioTicks', () => {
   })
 })
 
-describe('azimuthTicks', () => {
+describe('directionTicks', () => {
   it('are whole parts of a degree, printed within the circle', () => {
-    expect(azimuthTicks(57.6, 59.2, 8).map(({ label }) => label)).toEqual([
+    expect(directionTicks('azimuth', 57.6, 59.2, 8).map(({ label }) => label)).toEqual([
       '57°45′',
       '58°00′',
       '58°15′',
@@ -86,13 +86,22 @@ describe('azimuthTicks', () => {
       '58°45′',
       '59°00′',
     ])
-    expect(azimuthTicks(-2.5, 3, 8).map(({ label }) => label)).toEqual([
+    expect(directionTicks('azimuth', -2.5, 3, 8).map(({ label }) => label)).toEqual([
       '358°',
       '359°',
       '0°',
       '1°',
       '2°',
       '3°',
+    ])
+  })
+
+  it('are altitudes with their sign, up to the zenith', () => {
+    expect(directionTicks('altitude', -12, 103, 8).map(({ label }) => label)).toEqual([
+      ...['0°', '15°', '30°', '45°', '60°', '75°', '90°'],
+    ])
+    expect(directionTicks('altitude', -1.2, 0.4, 5).map(({ label }) => label)).toEqual([
+      ...['−1°00′', '−0°30′', '0°00′'],
     ])
   })
 })

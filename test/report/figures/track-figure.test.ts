@@ -2,8 +2,20 @@ import type { Element } from 'hast'
 import { describe, expect, it } from 'vitest'
 import { PALETTE } from '../../../src/report/figures/palette.ts'
 import { trackFigure } from '../../../src/report/figures/track-figure.ts'
-import { missedAudit, noneAudit, partsAudit, premiseAudit } from './cases.ts'
-import { impliedOf, makeShapedAudit, trackOf } from './make-audit.ts'
+import {
+  equinoxAudit,
+  missedAudit,
+  moonAudit,
+  neverAudit,
+  noneAudit,
+  noonAudit,
+  pairAudit,
+  partsAudit,
+  premiseAudit,
+  starAudit,
+  vanishingAudit,
+} from './cases.ts'
+import { courseOf, impliedOf, makeShapedAudit, trackOf } from './make-audit.ts'
 import { linesOf, polygonsOf, shapesOf, textOf, textsOf } from './read-drawing.ts'
 
 /** A figure's two scales, found from the ticks it prints. */
@@ -142,7 +154,8 @@ describe('a crossing still to come', () => {
         .filter(({ r }) => r === 2.6)
         .map(({ fill }) => fill),
     ).toEqual([PALETTE.ink, PALETTE.paper])
-    textOf(drawing, '4000 CE (to come)')
+    textOf(drawing, '4000 CE')
+    textOf(drawing, '(to come)')
     expect(alt).toContain('4000 CE (outside the window, in the future)')
   })
 })
@@ -168,9 +181,9 @@ describe('hard cases', () => {
   it('breaks the curve where the target has no azimuth', () => {
     const line = { value: 58, sd: 0.1 }
     const whole = trackOf('vondrak2011', line, 0)
-    const azimuth_deg = whole.azimuth_deg.map((deg, index) => (index > 300 && index < 500 ? null : deg))
+    const direction_deg = whole.direction_deg.map((deg, index) => (index > 300 && index < 500 ? null : deg))
     const { drawing } = trackFigure(
-      makeShapedAudit({ lineDeg: line, tracks: [{ ...whole, azimuth_deg }] }),
+      makeShapedAudit({ lineDeg: line, tracks: [{ ...whole, direction_deg }] }),
       'midsummer',
     )
     const d = String(
@@ -183,9 +196,9 @@ describe('hard cases', () => {
   it('carries a track across north without a jump', () => {
     const line = { value: 359.9, sd: 0.1 }
     const whole = trackOf('vondrak2011', line, 0)
-    const azimuth_deg = whole.azimuth_deg.map((deg) => (deg! - 59.3 + 360) % 360)
+    const direction_deg = whole.direction_deg.map((deg) => (deg! - 59.3 + 360) % 360)
     const { drawing } = trackFigure(
-      makeShapedAudit({ lineDeg: line, tracks: [{ ...whole, azimuth_deg }], implied: [] }),
+      makeShapedAudit({ lineDeg: line, tracks: [{ ...whole, direction_deg }], implied: [] }),
       'midsummer',
     )
     const d = String(
@@ -213,5 +226,182 @@ describe('hard cases', () => {
   it('includes an asserted date outside the window', () => {
     const { drawing } = trackFigure(missedAudit(), 'midsummer')
     textOf(drawing, 'asserted: 10,551 to 10,451 BCE')
+  })
+})
+
+/** The drawn tracks, each as its runs of points. */
+function curvesOf(drawing: Element): [number, number][][][] {
+  return shapesOf(drawing, 'path')
+    .filter(({ properties }) => Number(properties.strokeWidth) === 1.4)
+    .map(({ properties }) => polygonsOf(String(properties.d)))
+}
+
+/** Top and bottom of the plot, from its axis. */
+function plotOf(drawing: Element): { top: number; bottom: number } {
+  const axis = linesOf(drawing).find(({ x1, x2, y1, y2 }) => x1 === 40 && x2 === 40 && y2 - y1 > 100)!
+  return { top: axis.y1, bottom: axis.y2 }
+}
+
+describe('a star that crosses the line eight times', () => {
+  const audit = starAudit()
+  const { drawing, alt } = trackFigure(audit, 'midsummer')
+  const { top, bottom } = plotOf(drawing)
+
+  it('has a mark and a label for each crossing', () => {
+    const dates = audit.implied[0]!.dates
+    expect(dates.length).toBe(8)
+    expect(circles(drawing).filter(({ r }) => r === 2.6).length).toBe(8)
+    expect(
+      textsOf(drawing).filter(({ content }) => /^[\d,]+ B?CE$/.test(content) && content !== '1 CE').length,
+    ).toBe(8 + 4)
+    expect(alt.match(/\d B?CE( \(|,| and|\.)/g)!.length).toBeGreaterThanOrEqual(8)
+  })
+
+  it('is drawn without a stroke from one side of north to the other', () => {
+    const [curve] = curvesOf(drawing)
+    // 5.5° of the fixture's 62° sine at most pass in 141 years, a point of the scale of dates: about 35 points.
+    for (const run of curve!) {
+      const steps = run.slice(1).map(([x, y], index) => [x - run[index]![0], Math.abs(y - run[index]![1])])
+      for (const [, rise] of steps) expect(rise).toBeLessThan(40)
+    }
+  })
+
+  it('is cut where the plot ends, and shows the line, the asserted date’s place and every crossing', () => {
+    const points = curvesOf(drawing).flat(2)
+    for (const [, y] of points) {
+      expect(y).toBeGreaterThanOrEqual(top - 0.01)
+      expect(y).toBeLessThanOrEqual(bottom + 0.01)
+    }
+    expect(curvesOf(drawing)[0]!.length).toBeGreaterThan(3)
+    // The asserted place, 64°, is in the plot; half of the swing, down to −60°, is not.
+    const labels = textsOf(drawing).map(({ content }) => content)
+    expect(labels).toContain('60°')
+    expect(labels).not.toContain('330°')
+  })
+
+  it('shows where a second model parts, and ends with it', () => {
+    const [dashed] = shapesOf(drawing, 'path').filter(
+      ({ properties }) => properties.strokeDasharray === '3 2',
+    )
+    const xs = polygonsOf(String(dashed!.properties.d))
+      .flat()
+      .map(([x]) => x)
+    const scales = scalesFromTicks(drawing)
+    expect(Math.min(...xs)).toBeGreaterThanOrEqual(scales.x(-5000) - 0.1)
+    expect(Math.max(...xs)).toBeLessThanOrEqual(scales.x(10_000) + 0.1)
+    textOf(drawing, 'IAU 2006 (P03)')
+  })
+
+  it('has the Sun as a yardstick although it is no target', () => {
+    // The fixture's sweep takes 32.4′ for the Sun's width.
+    textOf(drawing, '32′ wide,')
+    expect(circles(drawing).filter(({ r }) => r !== 2.6).length).toBe(1)
+  })
+})
+
+describe('several branches of one target', () => {
+  it('are each drawn and named', () => {
+    const { drawing, alt } = trackFigure(equinoxAudit(), 'midsummer')
+    expect(curvesOf(drawing).length).toBe(2)
+    textOf(drawing, 'March equinox')
+    textOf(drawing, 'September equinox')
+    expect(alt).toContain('Each has its curve: March equinox and September equinox.')
+  })
+
+  it('are named inside the plot where they do not end in view', () => {
+    const { drawing } = trackFigure(pairAudit(), 'midsummer')
+    expect(curvesOf(drawing).length).toBe(2)
+    const names = ['Kochab above', 'Mizar above'].map((name) => textOf(drawing, name))
+    expect(names.map(({ x }) => x > 345)).toEqual([true, false])
+    expect(circles(drawing).filter(({ r }) => r === 2.6).length).toBe(pairAudit().implied[0]!.dates.length)
+  })
+})
+
+describe('a target that vanishes', () => {
+  it('has a curve for each time it is seen, and hatched years between', () => {
+    const { drawing, alt } = trackFigure(vanishingAudit(), 'midsummer')
+    expect(curvesOf(drawing)[0]!.length).toBe(3)
+    const notes = textsOf(drawing).filter(({ content }) => content.endsWith('out of reach'))
+    expect(notes.length).toBe(2)
+    expect(alt).toContain('There is no rising of Acrux at that altitude from ')
+  })
+
+  it('is out of reach only where no branch of it is seen', () => {
+    const line = { value: 20, sd: 0.1 }
+    const until = (year: number) => (year < 0 ? 21 : null)
+    const from = (year: number) => (year > -5000 ? 19 : null)
+    const tracks = [until, from].map((direction, branch) =>
+      courseOf('vondrak2011', line, direction, { branch, branch_words: `${branch}` }),
+    )
+    const { drawing } = trackFigure(makeShapedAudit({ lineDeg: line, tracks }), 'midsummer')
+    expect(textsOf(drawing).filter(({ content }) => content.endsWith('out of reach'))).toEqual([])
+  })
+
+  it('has no curve where it is never seen, and says so', () => {
+    const { drawing, alt } = trackFigure(neverAudit(), 'midsummer')
+    expect(curvesOf(drawing)).toEqual([])
+    textOf(drawing, 'target out of reach')
+    textOf(drawing, 'line as measured')
+    expect(alt).toContain('There is no rising of Acrux at that altitude in any of these years.')
+    expect(alt).not.toContain('meet')
+  })
+})
+
+describe('a measured altitude', () => {
+  it('has an axis of altitudes', () => {
+    const { drawing, alt } = trackFigure(noonAudit(), 'midsummer')
+    textOf(drawing, 'altitude')
+    textOf(drawing, 'altitude of target')
+    expect(textsOf(drawing).some(({ content }) => content.includes('azimuth'))).toBe(false)
+    expect(alt).toMatch(/^Altitude of the target of midsummer, December solstice noon, centre, from /)
+  })
+})
+
+describe('the ground about a track', () => {
+  it('is one standard deviation of the comparison to either side', () => {
+    const audit = moonAudit()
+    const { drawing } = trackFigure(audit, 'midsummer')
+    const { perDegree } = scalesFromTicks(drawing)
+    const ground = shapesOf(drawing, 'path').find(
+      ({ properties }) => Number(properties.fillOpacity) === 0.09,
+    )!
+    const [polygon] = polygonsOf(String(ground.properties.d))
+    const inPlot = polygon!.filter(([, y]) => y > plotOf(drawing).top + 1 && y < plotOf(drawing).bottom - 1)
+    const at = (x: number) => inPlot.filter(([px]) => px === x).map(([, y]) => y)
+    const heights = inPlot.map(([x]) => at(x)).filter((ys) => ys.length === 2)
+    expect(heights.length).toBeGreaterThan(50)
+    // The fixture's standard deviation is 11′.
+    for (const [a, b] of heights) expect(Math.abs(a! - b!)).toBeCloseTo((2 * 11 * perDegree) / 60, 1)
+  })
+})
+
+describe('the stretch of directions', () => {
+  it('is never so small that a course at rest looks like a swing', () => {
+    const line = { value: 90, sd: 0.05 }
+    const tracks = [courseOf('vondrak2011', line, (year) => 90 + year / 1e7)]
+    const audit = makeShapedAudit({ lineDeg: line, tracks, implied: [impliedOf([0])] })
+    const { drawing } = trackFigure(audit, 'midsummer')
+    const heights = curvesOf(drawing)
+      .flat(2)
+      .map(([, y]) => y)
+    expect(Math.max(...heights) - Math.min(...heights)).toBeLessThan(2)
+  })
+
+  it('breaks a curve opposite the line', () => {
+    const line = { value: 10, sd: 0.1 }
+    // Round the whole circle once in 30,000 years.
+    const tracks = [courseOf('vondrak2011', line, (year) => (year / 30_000) * 360)]
+    const audit = makeShapedAudit({
+      lineDeg: line,
+      tracks,
+      implied: [impliedOf([833], { year: 833, offset_arcmin: 9600, sd_arcmin: 3, sun_widths: 1 })],
+    })
+    const { drawing } = trackFigure(audit, 'midsummer')
+    const runs = curvesOf(drawing)[0]!
+    expect(runs.length).toBeGreaterThan(1)
+    for (const run of runs) {
+      const rises = run.slice(1).map(([, y], index) => Math.abs(y - run[index]![1]))
+      expect(Math.max(...rises)).toBeLessThan(5)
+    }
   })
 })

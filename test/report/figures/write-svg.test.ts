@@ -26,11 +26,18 @@ describe('writeSvg', () => {
         '<desc>Says 3 &#x3C; 5.</desc>',
         '<rect x="0" y="0" width="100" height="50" fill="#ffffff"/>',
         '<line x1="0.33" y1="0" x2="50" y2="20" stroke="#000000" stroke-width="0.5" stroke-dasharray="4 2"/>',
-        '<text x="10" y="20" text-anchor="end" font-size="7.5" font-weight="600" fill="#1a1a1a">57°54′ &#x3C;b>"&#x26;</text>',
+        // 1.1 (semibold) × 7.5 points × 6.08, the sum of the widths of the twelve characters in text-width.ts.
+        '<text x="10" y="20" text-anchor="end" font-size="7.5" font-weight="600" fill="#1a1a1a" textLength="50.16" lengthAdjust="spacingAndGlyphs">57°54′ &#x3C;b>"&#x26;</text>',
         '</svg>',
         '',
       ].join('\n'),
     )
+  })
+
+  it('leaves a text of unknown width to the face it is set in', () => {
+    const { drawing: unknown } = svgRoot({ width: 100, height: 50 }, 'A', 'B', [text(10, 20, '𓉔𓉔')])
+    expect(writeSvg(unknown)).toContain('>𓉔𓉔</text>')
+    expect(writeSvg(unknown)).not.toContain('textLength')
   })
 
   it('leaves the drawing as it was', () => {

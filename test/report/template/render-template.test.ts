@@ -89,6 +89,17 @@ describe('page, panel, when', () => {
     expect(blocks(`:::when{${condition}}\ntext\n:::`)).toEqual(shown ? [paragraph('text')] : [])
   })
 
+  it('joins lists that only a `when` parts, whether it holds or not', () => {
+    const template = '- a\n\n:::when{has="sun"}\n- b\n:::\n\n:::when{has="moon"}\n- c\n:::\n\n- d'
+    expect(blocks(template).map((list) => ('children' in list ? list.children.map(plainText) : []))).toEqual([
+      ['a', 'b', 'd'],
+    ])
+    expect(blocks('- a\n\n1. b').length).toBe(2)
+    expect(blocks('- a\n\n:::when{has="sun"}\n1. b\n:::').length).toBe(2)
+    expect(blocks('- a\n\n:::when{has="sun"}\ntext\n:::\n\n- d').length).toBe(3)
+    expect(blocks('- a\n\n<!-- two lists -->\n\n* b').length).toBe(2)
+  })
+
   it('reports what is wrong inside a `when` that this audit leaves out', () => {
     const { tree, problems } = renderTemplate(':::when{outcome="none"}\n::part{of="x"}\n:::', completeAudit())
     expect(tree).toBeNull()

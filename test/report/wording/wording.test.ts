@@ -1,10 +1,11 @@
 import { describe, expect, it } from 'vitest'
+import { listed } from '../../../src/quantity/listed.ts'
 import { dateSets } from '../../../src/report/wording/date-sets.ts'
 import { fixed } from '../../../src/report/wording/fixed.ts'
-import { joinList } from '../../../src/report/wording/join-list.ts'
 import { measuredArcmin, measuredDegrees } from '../../../src/report/wording/measured-angle.ts'
 import { modelLabel } from '../../../src/report/wording/model-label.ts'
-import { offsetFromLine } from '../../../src/report/wording/offset-from-line.ts'
+import { noEvent } from '../../../src/report/wording/no-event.ts'
+import { offsetFromLine, whatPoints } from '../../../src/report/wording/offset-from-line.ts'
 import { ratioFigure } from '../../../src/report/wording/ratio-figure.ts'
 import { sunWidthShare } from '../../../src/report/wording/sun-width-share.ts'
 import { yearStep } from '../../../src/report/wording/year-step.ts'
@@ -68,9 +69,29 @@ describe('angles and shifts', () => {
   })
 
   it('tells the side on which the line points, for who looks along it', () => {
-    expect(offsetFromLine(30, 2.5, ['87 cm'])).toBe('30′ ± 2.5′ (87 cm) to the right of it')
-    expect(offsetFromLine(-30, null)).toBe('30′ to the left of it')
-    expect(offsetFromLine(0.005, 2.5)).toBe('at it')
+    const azimuth = { measures: 'azimuth', sdArcmin: 2.5 } as const
+    expect(offsetFromLine({ ...azimuth, arcmin: 30, also: ['87 cm'] })).toBe(
+      '30′ ± 2.5′ (87 cm) to the right of it',
+    )
+    expect(offsetFromLine({ ...azimuth, arcmin: -30, sdArcmin: null })).toBe('30′ to the left of it')
+    expect(offsetFromLine({ ...azimuth, arcmin: 0.005 })).toBe('at it')
+    expect(whatPoints('azimuth', 'now')).toBe('the line points')
+  })
+
+  it('tells whether a measured altitude lies above or below its target', () => {
+    const altitude = { measures: 'altitude', sdArcmin: null } as const
+    expect(offsetFromLine({ ...altitude, arcmin: 30 })).toBe('30′ above it')
+    expect(offsetFromLine({ ...altitude, arcmin: -30 })).toBe('30′ below it')
+    expect(whatPoints('altitude', 'then')).toBe('the altitude measured lay')
+  })
+
+  it('names what is not to be seen', () => {
+    const star = { body: 'star', measures: 'azimuth', event: 'rising of Acrux' } as const
+    expect(noEvent(star)).toBe('no rising of Acrux at that altitude')
+    const culmination = { body: 'star', measures: 'altitude', event: 'lower culmination of Vega' } as const
+    expect(noEvent(culmination)).toBe('no lower culmination of Vega above the horizon')
+    const pair = { body: 'two stars', measures: 'azimuth', event: 'alignment of Kochab and Mizar' } as const
+    expect(noEvent(pair)).toBe('no alignment of Kochab and Mizar')
   })
 
   it('holds a shift against the Sun', () => {
@@ -88,7 +109,7 @@ describe('angles and shifts', () => {
 
 describe('words', () => {
   it('joins lists', () => {
-    expect([[], ['a'], ['a', 'b'], ['a', 'b', 'c']].map(joinList)).toEqual(['', 'a', 'a and b', 'a, b and c'])
+    expect([[], ['a'], ['a', 'b'], ['a', 'b', 'c']].map(listed)).toEqual(['', 'a', 'a and b', 'a, b and c'])
   })
 
   it('names the obliquity models as the audit does', () => {
