@@ -3,7 +3,8 @@ import { cpSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { createRequire } from 'node:module'
 import { dirname, join } from 'node:path'
 import { fileURLToPath } from 'node:url'
-import { build, transformSync } from 'esbuild'
+import { build } from 'esbuild'
+import { mitLicence } from './mit-licence.mjs'
 
 const root = fileURLToPath(new URL('..', import.meta.url))
 const require = createRequire(import.meta.url)
@@ -13,6 +14,7 @@ rmSync(out, { recursive: true, force: true })
 mkdirSync(out, { recursive: true })
 const { metafile } = await bundle(entries.length > 0 ? entries : ['src/bin.ts', 'src/index.ts'])
 writeFileSync(join(out, 'LICENCES.txt'), licencesOf(metafile))
+await writeSchema()
 await copyFonts()
 
 /** All chunks stand beside `fonts/`, which the program looks for next to itself. */
@@ -56,8 +58,14 @@ function licenceOf(folder) {
   const text = ['LICENSE', 'LICENSE.md', 'license', 'LICENSE.txt', 'LICENCE']
     .map((file) => readOr(join(root, folder, file), ''))
     .find(Boolean)
-  const holder = author?.name ?? author ?? 'its authors'
-  return `${heading}\n${'-'.repeat(heading.length)}\n${text ?? `Copyright ${holder}; the package brings no licence text.`}`
+  return `${heading}\n${'-'.repeat(heading.length)}\n${text ?? licenceWithoutFile({ name, license, author })}`
+}
+
+/** Some packages state MIT and their author in package.json, and bring no file; any other licence is for a person to see to. */
+function licenceWithoutFile({ name, license, author }) {
+  const holder = author?.name ?? author
+  if (license !== 'MIT' || !holder) throw new Error(`${name} brings no licence text`)
+  return mitLicence(holder)
 }
 
 function readOr(path, otherwise) {
@@ -68,11 +76,22 @@ function readOr(path, otherwise) {
   }
 }
 
+/** The shape of a claim file, for editors. */
+async function writeSchema() {
+  const { CLAIM_SCHEMA } = await moduleOf('src/claim/claim-schema.ts')
+  writeFileSync(join(out, 'claim.schema.json'), `${JSON.stringify(CLAIM_SCHEMA, null, 2)}\n`)
+}
+
+/** What a source file exports. */
+async function moduleOf(path) {
+  const options = { absWorkingDir: root, entryPoints: [path], bundle: true, format: 'esm', write: false }
+  const { outputFiles } = await build(options)
+  return import(`data:text/javascript,${encodeURIComponent(outputFiles[0].text)}`)
+}
+
 /** The faces that reports are set in, and their licences. */
 async function copyFonts() {
-  const source = readFileSync(join(root, 'src/report/fonts/font-faces.ts'), 'utf8')
-  const { code } = transformSync(source, { loader: 'ts', format: 'esm' })
-  const { FONT_FACES } = await import(`data:text/javascript,${encodeURIComponent(code)}`)
+  const { FONT_FACES } = await moduleOf('src/report/fonts/font-faces.ts')
   const fonts = join(out, 'fonts')
   mkdirSync(fonts)
   for (const { package: name, folder, file, licence } of Object.values(FONT_FACES)) {

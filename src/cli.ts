@@ -3,7 +3,7 @@ import { auditFile, outputStem } from './cli/audit-file.ts'
 import { type Command, readCommandLine } from './cli/command-line.ts'
 import { type Console, EXIT } from './cli/console.ts'
 import { fileTrouble } from './cli/file-trouble.ts'
-import { findTemplate } from './cli/find-template.ts'
+import { findTemplate, templateTrouble } from './cli/find-template.ts'
 import { HELP } from './cli/help.ts'
 import { readClaimFile } from './cli/read-claim-file.ts'
 import { VERSION } from './version.ts'
@@ -47,7 +47,7 @@ async function audit(command: Extract<Command, { name: 'audit' }>, console: Cons
     return await worst(command.files, (file) => auditFile(file, command, template, console))
   } catch (error) {
     if ((error as NodeJS.ErrnoException).code === undefined) throw error
-    console.stderr.write(fileTrouble(error, 'read', command.template))
+    console.stderr.write(templateTrouble(error, command.template))
     return EXIT.fileTrouble
   }
 }

@@ -1,6 +1,8 @@
 export type { Audit } from './audit/audit.ts'
 export { type AuditContext, makeAudit } from './audit/make-audit.ts'
+export { findStar } from './audit/star-names.ts'
 export type { Claim } from './claim/claim.ts'
+export { CLAIM_SCHEMA as claimSchema } from './claim/claim-schema.ts'
 export { formatProblem } from './claim/format-problem.ts'
 export { newClaim } from './claim/new-claim.ts'
 export { readClaim } from './claim/read-claim.ts'

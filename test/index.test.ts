@@ -3,7 +3,9 @@ import * as library from '../src/index.ts'
 
 test('the library exports these and no others', () => {
   expect(Object.keys(library).sort()).toEqual([
+    'claimSchema',
     'figuresOf',
+    'findStar',
     'formatProblem',
     'makeAudit',
     'newClaim',

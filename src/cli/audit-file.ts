@@ -43,7 +43,7 @@ export async function auditFile(
   try {
     await writeFiles(files)
   } catch (error) {
-    console.stderr.write(fileTrouble(error, 'write', out ?? dirname(path)))
+    console.stderr.write(fileTrouble(error, 'write', (error as NodeJS.ErrnoException).path ?? stem))
     return EXIT.fileTrouble
   }
   for (const file of files.filter((file) => !file.path.endsWith('.svg')))

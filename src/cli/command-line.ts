@@ -17,9 +17,9 @@ export interface CommandLineError {
 }
 
 const OPTIONS = {
-  as: { type: 'string' },
-  template: { type: 'string' },
-  out: { type: 'string' },
+  as: { type: 'string', multiple: true },
+  template: { type: 'string', multiple: true },
+  out: { type: 'string', multiple: true },
   help: { type: 'boolean', short: 'h' },
   version: { type: 'boolean' },
 } as const
@@ -57,6 +57,9 @@ function parse(argv: readonly string[]) {
 }
 
 function commandOf(command: string, files: string[], values: Values): Command | CommandLineError {
+  if (files.includes('-')) {
+    return { error: '`-` is not read as the standard input; save the claim as a file, and name that' }
+  }
   switch (command) {
     case 'audit':
       return files.length === 0 ? noFile(command) : auditOf(files, values)
@@ -82,15 +85,26 @@ function withoutOptions(values: Values, command: Command): Command | CommandLine
 }
 
 function auditOf(files: string[], values: Values): Command | CommandLineError {
-  const words = (values.as ?? 'pdf,md').split(',').map((word) => word.trim())
+  const device = files.find((file) => /^\/(?:dev|proc)\//.test(file))
+  if (device !== undefined) {
+    return {
+      error: `\`${device}\` has no place beside it for the audit; save the claim as a file, and name that`,
+    }
+  }
+  const twice = (['template', 'out'] as const).find((option) => (values[option]?.length ?? 0) > 1)
+  if (twice !== undefined) return { error: `\`--${twice}\` stands there more than once` }
+  const asked = values.as?.join(',') ?? 'pdf,md'
+  const words = asked.split(',').map((word) => word.trim())
   const wrong = words.find((word) => !FORMATS.includes(word as Format))
   if (wrong !== undefined) {
     return {
-      error: `\`--as ${values.as}\`: \`${wrong}\` is not a format; write pdf, md or json, with commas between`,
+      error: `\`--as ${asked}\`: \`${wrong}\` is not a format; write pdf, md or json, with commas between`,
     }
   }
   const formats = [...new Set(words as Format[])]
-  return { name: 'audit', files, formats, template: values.template ?? 'audit', out: values.out ?? null }
+  const [template = 'audit'] = values.template ?? []
+  const [out = null] = values.out ?? []
+  return { name: 'audit', files, formats, template, out }
 }
 
 function optionName(word: string): string {

@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto'
 import { readFile } from 'node:fs/promises'
+import { findStar } from '../audit/star-names.ts'
 import type { Claim } from '../claim/claim.ts'
 import { formatProblem } from '../claim/format-problem.ts'
 import { readClaim } from '../claim/read-claim.ts'
@@ -23,7 +24,7 @@ export async function readClaimFile(path: string, console: Console): Promise<Cla
     return { status: EXIT.fileTrouble }
   }
   const text = new TextDecoder('utf-8', { ignoreBOM: false }).decode(bytes)
-  const { claim, problems } = readClaim(text)
+  const { claim, problems } = readClaim(text, { findStar })
   for (const problem of problems) console.stderr.write(`${formatProblem(problem, text, path, console)}\n`)
   if (claim === null) return { status: EXIT.claimHasErrors }
   return {

@@ -31,6 +31,11 @@ describe('the command line', () => {
     [['audit', 'a.yaml', '--az', 'pdf'], /no option `--az`; did you mean `--as`\?/],
     [['audit', 'a.yaml', '--as', 'pdf,docx'], /`docx` is not a format; write pdf, md or json/],
     [['check', 'a.yaml', '--out', 'x'], /`--out` goes with `audit`/],
+    [['audit', '-'], /`-` is not read as the standard input/],
+    [['check', '-'], /`-` is not read as the standard input/],
+    [['audit', '/dev/stdin'], /`\/dev\/stdin` has no place beside it for the audit/],
+    [['audit', 'a.yaml', '--out', 'x', '--out', 'y'], /`--out` stands there more than once/],
+    [['audit', 'a.yaml', '--as', 'pdf', '--as', 'docx'], /`docx` is not a format/],
     [['audit', 'a/x.yaml', 'b/x.yaml', '--out', 'o'], /would overwrite/],
   ])('%j is refused with status 2', async (argv, message) => {
     const { status, stdout, stderr } = await run(...(argv as string[]))
@@ -122,12 +127,36 @@ describe('audit', () => {
   test('a place that cannot be written is status 3, and leaves nothing behind', async () => {
     const folder = await newFolder()
     const path = await claimIn(folder)
-    // A folder stands where the PDF belongs, so the renaming fails after all was written.
-    await mkdir(join(folder, 'out', 'court.audit.md'), { recursive: true })
-    const { status, stderr } = await run('audit', path, '--out', join(folder, 'out'), '--as', 'md')
+    // A folder stands where the Markdown belongs, which is written after the PDF.
+    const place = join(folder, 'out', 'court.audit.md')
+    await mkdir(place, { recursive: true })
+    const { status, stdout, stderr } = await run('audit', path, '--out', join(folder, 'out'))
     expect(status).toBe(3)
-    expect(stderr).toMatch(/cannot write/)
-    expect((await filesIn(join(folder, 'out'))).filter((name) => name.endsWith('.part'))).toEqual([])
+    expect(stdout).toBe('')
+    expect(stderr).toBe(`datestone: cannot write ${place}: it is a folder\n`)
+    expect(await filesIn(join(folder, 'out'))).toEqual(['court.audit.md'])
+  })
+
+  test('a file in the place of the output folder is told as such', async () => {
+    const folder = await newFolder()
+    const path = await claimIn(folder)
+    const { status, stderr } = await run('audit', path, '--out', path, '--as', 'json')
+    expect(status).toBe(3)
+    expect(stderr).toMatch(/court\.audit\.json: a part of its path is not a folder/)
+  })
+
+  test('--as given twice asks for both', async () => {
+    const folder = await newFolder()
+    const path = await claimIn(folder)
+    expect((await run('audit', path, '--as', 'pdf', '--as', 'json')).status).toBe(0)
+    expect(await filesIn(folder)).toEqual(['court.audit.json', 'court.audit.pdf', 'court.yaml'])
+  })
+
+  test('a claim file may name its schema for an editor', async () => {
+    const folder = await newFolder()
+    const named = `# yaml-language-server: $schema=dist/claim.schema.json\n${claimText()}`
+    const { status, stderr } = await run('check', await claimIn(folder, named))
+    expect({ status, stderr }).toEqual({ status: 0, stderr: '' })
   })
 
   test('an own template is used; one with errors is told at its line, and nothing is written', async () => {
@@ -158,6 +187,13 @@ describe('audit', () => {
     const { status, stderr } = await run('audit', SAMPLE, '--template', 'nowhere.md')
     expect(status).toBe(3)
     expect(stderr).toMatch(/cannot read nowhere\.md/)
+    expect(stderr).not.toMatch(/did you mean/)
+  })
+
+  test('a misspelt built-in template is told with the right name', async () => {
+    const { status, stderr } = await run('audit', SAMPLE, '--template', 'audti')
+    expect(status).toBe(3)
+    expect(stderr).toMatch(/cannot read audti: .*; did you mean the built-in template `audit`\?\n$/)
   })
 
   test('bytes that are not UTF-8 are an error with a place', async () => {
@@ -216,7 +252,20 @@ describe('new', () => {
 })
 
 describe('the samples', () => {
-  test.each(['thornmere', 'averholt', 'corvane', 'ostrel'])('%s has no problems', async (name) => {
+  test.each([
+    'thornmere',
+    'averholt',
+    'corvane',
+    'ostrel',
+    'keldane',
+    'orrin',
+    'ilmarra',
+    'tavesh',
+    'brackwater',
+    'syrane',
+    'hathmere',
+    'velahar',
+  ])('%s has no problems', async (name) => {
     const { status, stderr } = await run('check', SAMPLE.replace('thornmere', name))
     expect({ status, stderr }).toEqual({ status: 0, stderr: '' })
   })
