@@ -1,6 +1,7 @@
 import type { Claim } from '../claim/claim.ts'
 import { crossingYears } from '../inference/implied-dates.ts'
 import type { Assumption } from './audit.ts'
+import { auditBudget } from './audit-budget.ts'
 import { middle, nearestYear } from './dated-label.ts'
 import { YEARS_BEYOND_WINDOW } from './defaults.ts'
 import type { Gap } from './gap.ts'
@@ -55,12 +56,13 @@ function rank({ effect_years, vanishes }: Weighed): number {
 }
 
 function weigh(
-  { what, said, used, basis, change, instead }: Gap,
+  { what, said, used, basis, change, instead, budgetSource }: Gap,
   base: number | null,
   dateOf: (inputs: SightlineInputs) => number | null,
   inputs: SightlineInputs,
 ): Weighed {
   const row = { what, said: said === 'unknown' ? ('unknown' as const) : ('omitted' as const), used, basis }
+  if (budgetSource !== undefined) return ownError(row, budgetSource, base, inputs)
   if (change === null) return { ...row, effect_years: null, effect_of: instead ?? '', vanishes: false }
   if (base === null) {
     return {
@@ -76,4 +78,20 @@ function weigh(
   const vanishes = dates.some((date) => date === null)
   const effectOf = vanishes ? `${change.words}; in one of these cases no date fits any more` : change.words
   return { ...row, effect_years: largest, effect_of: effectOf, vanishes }
+}
+
+/** The effect of an error of this program's own is its standard deviation in the budget of the date. */
+function ownError(
+  row: Pick<Assumption, 'what' | 'said' | 'used' | 'basis'>,
+  source: string,
+  base: number | null,
+  inputs: SightlineInputs,
+): Weighed {
+  const rows = base === null ? [] : auditBudget(inputs, base).filter((held) => held.source === source)
+  const effect = rows.length === 0 ? null : Math.hypot(...rows.map(({ sd }) => sd))
+  const effectOf =
+    base === null
+      ? 'one standard deviation; no date fits this line exactly'
+      : 'one standard deviation of the date'
+  return { ...row, effect_years: effect, effect_of: effectOf, vanishes: false }
 }

@@ -9,6 +9,8 @@ export interface Gap {
   basis: string
   /** What the effect is of; null where the gap moves no date. */
   change: { words: string; of: (inputs: SightlineInputs) => SightlineInputs[] } | null
+  /** An error that this program adds of its own: its name in the budget, which tells its effect. */
+  budgetSource?: string
   /** Where it moves no date: what it moves instead. */
   instead?: string
 }

@@ -6,6 +6,7 @@ import { choicesOf } from './choices-of.ts'
 import type { Gap } from './gap.ts'
 import { airGaps } from './gaps-of-air.ts'
 import { directionGaps } from './gaps-of-direction.ts'
+import { gapsOfTarget } from './gaps-of-target.ts'
 import { readingsOf } from './readings-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 
@@ -15,6 +16,7 @@ export function gapsOfLine(claim: Claim, sightline: Sightline, inputs: Sightline
   return [
     ...(inputs.measures === 'azimuth' && usesHorizon(inputs) ? horizonGaps(sightline, inputs, of) : []),
     ...targetGaps(sightline, inputs, of),
+    ...gapsOfTarget(inputs, of),
     ...directionGaps(claim, sightline, inputs, of),
     ...(inputs.target.body === 'two stars' ? [] : refractionGaps(claim, inputs, of)),
     modelGap(inputs),

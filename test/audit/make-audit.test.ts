@@ -202,6 +202,36 @@ describe('what a claim leaves open', () => {
   })
 })
 
+describe('the errors that this program gives a target of its own', () => {
+  const own = (changes: Record<string, string>) =>
+    auditOf(claimText(changes)).assumptions.map(({ what }) => what)
+
+  test.each([
+    [{ target: '{body: sun, event: equinox, sense: midway in days, at: rising, disc: centre}' }, /half day/],
+    [{ target: '{body: moon, event: northern major standstill, at: rising, disc: centre}' }, /wobble/],
+    [
+      { target: '{body: moon, event: northern major standstill, at: rising, disc: centre}' },
+      /Moon’s distance/,
+    ],
+    [{ target: '{body: Sirius, at: rising}' }, /the star catalogue/],
+    [
+      {
+        target: '{bodies: [Kochab, Mizar], event: one above the other}',
+        sightlines: '{one: {azimuth: 0°10′ ± 2′}}',
+      },
+      /place of Mizar/,
+    ],
+  ] as const)('%j', (changes, what) => {
+    expect(own(changes).join('; ')).toMatch(what)
+  })
+
+  test('have the effect that the budget tells', () => {
+    const audit = auditOfSample('brackwater')
+    const row = audit.assumptions.find(({ what }) => what.includes('wobble'))!
+    expect(row.effect_years).toBeCloseTo(audit.budget.find(({ source }) => source === row.what)!.sd, 9)
+  })
+})
+
 describe('a printed chain of results', () => {
   // One slip is counted once: with the azimuth wrong in print, the declination is redone from the printed azimuth.
   test('each step is redone from the printed step before it', () => {

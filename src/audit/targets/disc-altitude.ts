@@ -4,6 +4,9 @@ import { centreAltitudeDeg, horizonAboveCentreArcmin } from '../../site/centre-a
 import { refractionAtHorizon } from '../refraction-at.ts'
 import type { SightlineInputs } from '../sightline-inputs.ts'
 
+/** Name of the error of the Moon's distance in the budget. */
+export const MOON_DISTANCE = 'the Moon’s distance'
+
 /** A body with a disc: half its width, and its horizontal parallax. */
 export interface DiscBody {
   semidiameter: (year: number) => { arcmin: number; sdArcmin: number }
@@ -31,7 +34,7 @@ export function discAltitude(
         { source: 'altitude of the horizon', sdDeg: horizonSd },
         { source: 'refraction of the day', sdDeg: inputs.refractionSdArcmin / 60 },
         ...(sdArcmin > 0 ? [{ source: 'the Sun’s size', sdDeg: sdArcmin / 60 }] : []),
-        ...(nearness !== 0 ? [{ source: 'the Moon’s distance', sdDeg: nearness / 60 }] : []),
+        ...(nearness !== 0 ? [{ source: MOON_DISTANCE, sdDeg: nearness / 60 }] : []),
       ],
     }
   }

@@ -15,6 +15,9 @@ import { obliquityErrors } from './obliquity-errors.ts'
 import { SUN_MODELS } from './sun.ts'
 import type { TargetModel } from './target-model.ts'
 
+/** Name of the wobble's error in the budget. */
+export const MOON_WOBBLE = 'the wobble of the Moon’s path'
+
 /** The Moon at a standstill, rising or setting. */
 export function moonTarget(
   inputs: SightlineInputs,
@@ -32,7 +35,7 @@ export function moonTarget(
     deg: standstillDeclinationDeg(year, event, inputs.model),
     errors: [
       ...obliquityErrors(year, standstill.side === 'northern' ? 1 : -1),
-      { source: 'the wobble of the Moon’s path', sdDeg: MOON_WOBBLE_SD_ARCMIN / 60 },
+      { source: MOON_WOBBLE, sdDeg: MOON_WOBBLE_SD_ARCMIN / 60 },
     ],
   })
   const words = `${event} ${at === 'rising' ? 'moonrise' : 'moonset'}`

@@ -12,6 +12,11 @@ import type { TargetModel } from './target-model.ts'
 
 type Upper = 'first' | 'second'
 
+/** Name of a star's own error in the budget. */
+export function placeOf(star: string): string {
+  return `the catalogue’s place of ${star}`
+}
+
 /** Two stars one above the other: a direction near north. */
 export function starPairTarget(
   inputs: SightlineInputs,
@@ -63,7 +68,7 @@ function branchOf(
         const place = places[i]!
         const acrossDeg = sd / Math.max(1e-6, Math.cos(place.decDeg * DEG))
         const moved = (by: StarPlace) => (i === 0 ? azimuth(by, second) : azimuth(first, by))
-        const source = `the catalogue’s place of ${labelOfStar(star)}`
+        const source = placeOf(labelOfStar(star))
         return [
           ...effect(source, moved({ ...place, decDeg: place.decDeg + sd })),
           ...effect(source, moved({ ...place, raDeg: place.raDeg + acrossDeg })),

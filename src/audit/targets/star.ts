@@ -20,6 +20,9 @@ type SettledStar = Extract<SettledTarget, { body: 'star' }>
 /** Models of precession that a date of a star can be had from. */
 export const STAR_MODELS: readonly ObliquityModelName[] = ['vondrak2011', 'p03']
 
+/** Name of the catalogue's error in the budget. */
+export const STAR_CATALOGUE = 'the star catalogue'
+
 /** A star rising or setting where it is seen, or on the meridian. */
 export function starTarget(inputs: SightlineInputs, target: SettledStar): TargetModel {
   const { star, at } = target
@@ -62,7 +65,7 @@ export function declinationOf(inputs: SightlineInputs, star: Star): (year: numbe
   return (year) => ({
     deg: deg(year),
     errors: [
-      { source: 'the star catalogue', sdDeg: starDeclinationSdDeg(star, year) },
+      { source: STAR_CATALOGUE, sdDeg: starDeclinationSdDeg(star, year) },
       { source: 'nutation', sdDeg: NUTATION_SD_DEG },
     ],
   })

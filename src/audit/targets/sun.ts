@@ -33,6 +33,9 @@ import type { TargetModel } from './target-model.ts'
 
 type SettledSun = Extract<SettledTarget, { body: 'sun' }>
 
+/** Name of the error in the budget that any day but a solstice has. */
+export const HALF_DAY = 'the half day by which a rising can miss its moment'
+
 /** Models of the obliquity that a date of the Sun can be had from. */
 export const SUN_MODELS: readonly ObliquityModelName[] = [
   'vondrak2011',
@@ -164,15 +167,9 @@ function uncertain(
       ? 0
       : (Math.cos(obliquity * DEG) * Math.sin(day.longitudeDeg * DEG)) / Math.cos(day.declinationDeg * DEG)
     const errors = [...obliquityErrors(year, isSolstice(event) ? hemisphere(event.name) : per)]
-    if (!isSolstice(event)) errors.push({ source: halfDayWords(event), sdDeg: day.declinationSdDeg })
+    if (!isSolstice(event)) errors.push({ source: HALF_DAY, sdDeg: day.declinationSdDeg })
     return { deg: day.declinationDeg, errors: errors.filter(({ sdDeg }) => sdDeg !== 0) }
   }
-}
-
-function halfDayWords(event: SettledSunEvent): string {
-  return event.name === 'equinox' && event.sense === 'midway in direction'
-    ? 'half a day’s way of the Sun'
-    : 'the half day by which a rising can miss its moment'
 }
 
 function isSolstice(event: SettledSunEvent): event is { name: SolsticeEvent } {
