@@ -1,5 +1,6 @@
 import { wrap180 } from '../quantity/degrees.ts'
 import { altitudeRangeDeg, type HorizonCrossing, horizonCrossing } from '../site/horizontal.ts'
+import { rememberLast } from './remember-last.ts'
 import type { Branch, CurvePiece, Prediction } from './sight.ts'
 
 /** A value in degrees with the standard deviations of its sources of error. */
@@ -29,17 +30,18 @@ const PIECES_OF_CUT = 128
 
 /** The azimuth at which a body crosses an altitude, year by year. */
 export function horizonBranch(target: HorizonTarget): Branch {
+  const stateIn = rememberLast((year) => stateOf(target, year))
   return {
     predict: (year) => {
-      const state = stateOf(target, year)
+      const state = stateIn(year)
       return state?.crossing == null ? null : predictionOf(state, state.crossing)
     },
     curve: (year) => {
-      const state = stateOf(target, year)
+      const state = stateIn(year)
       return state === null ? [] : curveOf(target, state)
     },
     shortfallDeg: (year) => {
-      const state = stateOf(target, year)
+      const state = stateIn(year)
       if (state === null) return null
       const { low, high } = altitudeRangeDeg(state.declination.deg, target.latitudeDeg)
       return Math.max(0, low - state.altitude.deg, state.altitude.deg - high)

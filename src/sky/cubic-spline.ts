@@ -9,12 +9,13 @@ export function cubicSpline(points: readonly (readonly [number, number])[]): (x:
   const xs = Float64Array.from(points, (p) => p[0])
   const ys = Float64Array.from(points, (p) => p[1])
   const curvatures = secondDerivatives(xs, ys)
+  const segmentOf = segmentFinder(xs)
   return (x) => {
-    const i = segmentOf(xs, x)
+    const i = segmentOf(x)
     const width = xs[i + 1]! - xs[i]!
     const right = (x - xs[i]!) / width
     const left = 1 - right
-    const bend = (left ** 3 - left) * curvatures[i]! + (right ** 3 - right) * curvatures[i + 1]!
+    const bend = (left * left - 1) * left * curvatures[i]! + (right * right - 1) * right * curvatures[i + 1]!
     return left * ys[i]! + right * ys[i + 1]! + (width * width * bend) / 6
   }
 }
@@ -36,8 +37,18 @@ function secondDerivatives(xs: Float64Array, ys: Float64Array): Float64Array {
   return result
 }
 
-/** Index of the segment that holds x, by bisection; the outer segments reach on. */
-function segmentOf(xs: Float64Array, x: number): number {
+/** Finds the segment that holds x; the outer segments reach on. Tables in equal steps need no search. */
+function segmentFinder(xs: Float64Array): (x: number) => number {
+  const first = xs[0]!
+  const step = xs[1]! - first
+  const last = xs.length - 2
+  if (xs.every((x, i) => x === first + i * step)) {
+    return (x) => Math.min(last, Math.max(0, Math.floor((x - first) / step)))
+  }
+  return (x) => bisected(xs, x)
+}
+
+function bisected(xs: Float64Array, x: number): number {
   let low = 0
   let high = xs.length - 1
   while (high - low > 1) {

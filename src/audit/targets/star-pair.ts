@@ -1,3 +1,4 @@
+import { rememberLast } from '../../inference/remember-last.ts'
 import type { Branch, Prediction, PredictionError } from '../../inference/sight.ts'
 import { DEG, wrap180, wrap360 } from '../../quantity/degrees.ts'
 import { azimuthOneAboveOtherDeg } from '../../sky/above-one-another.ts'
@@ -6,7 +7,6 @@ import { labelOfStar } from '../../sky/star-catalogue.ts'
 import { starDeclinationSdDeg } from '../../sky/star-error.ts'
 import { type StarPlace, starTrack } from '../../sky/star-place.ts'
 import type { SettledTarget, SightlineInputs } from '../sightline-inputs.ts'
-import { rememberLast } from './remember-last.ts'
 import { STAR_MODELS, starWarnings } from './star.ts'
 import type { TargetModel } from './target-model.ts'
 

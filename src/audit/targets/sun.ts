@@ -1,4 +1,5 @@
 import { horizonBranch, type Uncertain } from '../../inference/horizon-branch.ts'
+import { rememberLast } from '../../inference/remember-last.ts'
 import type { Branch } from '../../inference/sight.ts'
 import { DEG } from '../../quantity/degrees.ts'
 import { formatArcmin } from '../../quantity/format-angle.ts'
@@ -28,7 +29,6 @@ import { discWords } from '../words.ts'
 import { type DiscBody, discAltitude } from './disc-altitude.ts'
 import { meridianBranch } from './meridian-branch.ts'
 import { obliquityErrors } from './obliquity-errors.ts'
-import { rememberLast } from './remember-last.ts'
 import type { TargetModel } from './target-model.ts'
 
 type SettledSun = Extract<SettledTarget, { body: 'sun' }>
