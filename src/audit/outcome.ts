@@ -1,3 +1,4 @@
+import { distinctSights } from '../inference/distinct-sights.ts'
 import { bestFit, type Fit, isFit } from '../inference/fit.ts'
 import type { Sight } from '../inference/sight.ts'
 import { lnRatio, type SweepGround } from '../inference/sweep.ts'
@@ -26,9 +27,10 @@ export function verdictOf(facts: {
 }): Verdict {
   const { sights, dates, ground, limits, plausibleArcmin } = facts
   const { asserted, window } = dates
-  if (!isFit(bestFit(sights, asserted), sights.length)) {
+  const lines = distinctSights(sights)
+  if (!isFit(bestFit(lines, asserted), lines.length)) {
     const reach = { from: window.from - YEARS_BEYOND_WINDOW, to: window.to + YEARS_BEYOND_WINDOW }
-    const isNowhere = !isFit(bestFit(sights, reach, REACH_STEP), sights.length)
+    const isNowhere = !isFit(bestFit(lines, reach, REACH_STEP), lines.length)
     const step = isNowhere ? REACH_STEP : undefined
     return {
       outcome: isNowhere ? 'none' : 'missed',

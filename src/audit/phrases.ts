@@ -42,17 +42,22 @@ export function datesOutside({ dates }: Implied, window: Window): string | null 
 }
 
 function inWords(dates: Implied['dates'], most: number): string | null {
-  const years = dates.map(({ year, future }) => `${aboutYear(year)}${future ? ', in the future' : ''}`)
+  const years = dates.map(({ year, future }) => `${aboutYear(year)}${future ? ' (to come)' : ''}`)
   return years.length === 0 ? null : listedShort([...new Set(years)], most)
 }
 
+/** Bits below which all dates weigh alike. */
+const ALL_ALIKE = 0.002
+
 /** A set of dates in words; where the window's edge cuts it, open towards that side. */
 export function setInWords(
-  step: Pick<SweepStep, 'sets95' | 'open_low' | 'open_high'>,
+  step: Pick<SweepStep, 'sets95' | 'open_low' | 'open_high'> & { bits?: number },
   window: Window,
 ): string {
-  const { sets95, open_low, open_high } = step
+  const { sets95, open_low, open_high, bits } = step
   if (sets95.length === 0) return 'none'
+  // Where all dates weigh alike, which of them make up 95 % is chance.
+  if (bits !== undefined && bits < ALL_ALIKE) return `any date of the window, ${window.printed}`
   if (sets95.length === 1 && open_low && open_high) return `any date of the window, ${window.printed}`
   const last = sets95.length - 1
   return listedShort(

@@ -26,7 +26,7 @@ export function listWarnings(
   const { dates, lines } = settled
   return [
     ...readingWarnings,
-    ...beyondOrbit(dates.asserted),
+    ...(isOfSun(lines) ? beyondOrbit(dates.asserted) : []),
     ...beyondFormula(claim, dates.asserted),
     ...lines.flatMap(refractionParts),
     ...new Set(lines.flatMap((line) => targetModel(line).warnings)),
@@ -35,7 +35,7 @@ export function listWarnings(
       ...nearMeridian(line, dates),
       ...reversed(line, dates),
     ]),
-    ...datesBeyondOrbit(implied),
+    ...(isOfSun(lines) ? datesBeyondOrbit(implied) : []),
     ...unreached(sweep),
     ...(lines.length > 1 ? [SEVERAL] : []),
   ]
@@ -128,6 +128,10 @@ function unreached({ no_target }: Sweep) {
     4,
   )
   return [
-    `In ${stretches} the target is not to be seen at that altitude; these years have no weight, or only what errors of altitude give them.`,
+    `In ${stretches} the target does not come to that altitude; these years have no weight, or only what errors of altitude give them.`,
   ]
+}
+
+function isOfSun(lines: readonly SightlineInputs[]): boolean {
+  return lines.some(({ target }) => target.body === 'sun')
 }

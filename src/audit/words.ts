@@ -15,7 +15,8 @@ export function inThreeMeasures(arcmin: number, cm: number, distanceM: number, s
   return `${formatArcmin(arcmin)} (${place}, ${widthsInWords(sunWidths)})`
 }
 
-function widthsInWords(sunWidths: number): string {
+/** `0.38 of the Sun’s width`. */
+export function widthsInWords(sunWidths: number): string {
   const figure = formatNumber(sunWidths, 2)
   return sunWidths < 1.05 ? `${figure} of the Sun’s width` : `${figure} times the Sun’s width`
 }

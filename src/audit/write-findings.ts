@@ -103,7 +103,7 @@ function dates({ implied }: Facts): Finding {
       return `${name}${listed([...new Set(years)])}.`
     }
     if (nearest_approach?.offset_arcmin == null)
-      return `${name}none; it is not to be seen at that altitude in any year of the window.`
+      return `${name}none; it does not come about in any year of the window.`
     return `${name}none; nearest in ${aboutYear(nearest_approach.year)}, ${formatArcmin(Math.abs(nearest_approach.offset_arcmin))} away.`
   })
   return {

@@ -20,6 +20,8 @@ export interface NearestApproach {
 /** Step of the search, years: no target of the Sun turns round and back within it. */
 const STEP = 20
 const YEAR_PRECISION = 1e-4
+/** Far below any error: 0.004″. */
+const LEVEL_DEG = 1e-6
 /** Two azimuths further apart than this in one step are a jump across north, not a crossing. */
 const JUMP_DEG = 90
 
@@ -106,8 +108,17 @@ function edgeOfReach(sight: Sight, branch: Branch, before: TrackPoint, after: Tr
   return reached
 }
 
+/** A track that does not move at all crosses nothing: what there is of it is rounding. */
+function isLevel(track: readonly TrackPoint[]): boolean {
+  const offsets = track.flatMap(({ offset }) => (offset === null ? [] : [offset]))
+  const low = offsets.reduce((a, b) => Math.min(a, b), Infinity)
+  const high = offsets.reduce((a, b) => Math.max(a, b), -Infinity)
+  return high - low < LEVEL_DEG
+}
+
 function crossings(sight: Sight, branch: Branch, track: readonly TrackPoint[]): number[] {
   const years: number[] = []
+  if (isLevel(track)) return years
   for (let i = 1; i < track.length; i++) {
     const before = track[i - 1]!
     const after = track[i]!

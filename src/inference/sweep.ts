@@ -1,4 +1,5 @@
 import { type DateSample, lnAverageWeight, sampleDates } from './date-sample.ts'
+import { distinctSights } from './distinct-sights.ts'
 import { crossingYears, dateSdYears } from './implied-dates.ts'
 import { bits, posterior } from './posterior.ts'
 import type { Sight } from './sight.ts'
@@ -32,13 +33,14 @@ const COARSEST = 10
 const FINEST = 1
 const STEPS_PER_SD = 4
 
-/** Holds the lines against their targets over the window and over each date that the claim names. */
+/** Holds the lines against their targets over the window and over each date that the claim names; each line once. */
 export function prepareSweep(
-  sights: readonly Sight[],
+  lines: readonly Sight[],
   window: Stretch,
   asserted: Stretch,
   others: readonly Stretch[],
 ): SweepGround {
+  const sights = distinctSights(lines)
   const step = gridStep(sights, window)
   const sample = ({ from, to }: Stretch) => sampleDates(sights, from, to, step)
   return {

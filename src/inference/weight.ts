@@ -63,7 +63,7 @@ function lnOfSeveral(lines: readonly Straight[], toleranceDeg: number): number {
 /**
  * Squared distance of several lines from their targets in units of their joint errors, dᵀ Σ⁻¹ d, and the logarithm of
  * the determinant of Σ, by Cholesky's factors L Lᵀ of the covariance. Lines share the errors of north and of the
- * obliquity; lines on one axis share their build error and their survey; a line that stands there twice shares all.
+ * obliquity; lines on one axis share their build error and their survey.
  */
 function whitened(
   lines: readonly Straight[],
@@ -98,10 +98,7 @@ function covariance(a: Straight, b: Straight, toleranceDeg: number): number {
 
 function axisCovariance(a: Straight, b: Straight, toleranceDeg: number): number {
   if (a.axis === null || a.axis !== b.axis) return 0
-  // Only one and the same comparison comes out the same to the last digit.
-  const isTwice = a.offsetDeg === b.offsetDeg && a.variance === b.variance
-  const common = isTwice ? a.variance : Math.min(a.measuredVariance, b.measuredVariance)
-  return toleranceDeg ** 2 + common
+  return toleranceDeg ** 2 + Math.min(a.measuredVariance, b.measuredVariance)
 }
 
 /**

@@ -42,18 +42,21 @@ export function momentsOneAboveOther(
 
 /**
  * Azimuth in degrees, −180 to 180, at which two stars stand one above the other while a given one is the upper; null
- * where that does not happen above a level horizon. Where it happens twice a day, the one nearer to north.
+ * where that does not happen above a level horizon. Where it happens twice a day, the one nearer to a
+ * direction, north unless another is given: in the far south both may be up.
  */
 export function azimuthOneAboveOtherDeg(
   first: StarPlace,
   second: StarPlace,
   latitudeDeg: number,
   above: 'first' | 'second',
+  nearDeg = 0,
 ): number | null {
   const azimuths = momentsOneAboveOther(first, second, latitudeDeg)
     .filter((moment) => moment.above === above && Math.min(...moment.altitudesDeg) > 0)
     .map((moment) => moment.azimuthDeg)
-  return azimuths.sort((a, b) => Math.abs(a) - Math.abs(b))[0] ?? null
+  const distance = (azimuth: number) => Math.abs(wrap180(azimuth - nearDeg))
+  return azimuths.sort((a, b) => distance(a) - distance(b))[0] ?? null
 }
 
 function vectorOf({ raDeg, decDeg }: StarPlace): Vector {

@@ -36,7 +36,7 @@ function factsOf(text: string): SummaryFacts {
 }
 
 const OTHERS = '[{label: a, date: 300 CE}, {label: b, date: 400 CE}, {label: c, date: 500 to 600 CE}]'
-const SUN = (changes: Readonly<Record<string, string | null>>) => ({
+const WITHIN = (changes: Readonly<Record<string, string | null>>) => ({
   window: '6000 BCE to 1000 CE',
   ...changes,
 })
@@ -47,20 +47,20 @@ const sunset = 'target: {body: sun, event: june solstice, at: setting}'
 
 /** Claims of each outcome, with targets of each kind, one line or several, and much or little left unknown. */
 const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null>>])[] = [
-  ['open', SUN({})],
-  ['open', SUN({ structure: place('65.4° N'), sightlines: '{a: {azimuth: 3° ± 30′, horizon: 0° ± 1′}}' })],
+  ['open', WITHIN({})],
+  ['open', WITHIN({ structure: place('65.4° N'), sightlines: '{a: {azimuth: 3° ± 30′, horizon: 0° ± 1′}}' })],
   [
     'open',
-    SUN({ target: '{body: sun, event: equinox, at: setting}', sightlines: '{a: {azimuth: 270°40′}}' }),
+    WITHIN({ target: '{body: sun, event: equinox, at: setting}', sightlines: '{a: {azimuth: 270°40′}}' }),
   ],
-  ['premise', SUN({ other_dates: OTHERS })],
+  ['premise', WITHIN({ other_dates: OTHERS })],
   [
     'premise',
-    SUN({ other_dates: OTHERS, points: POINTS, sightlines: '{a: {from: p, to: q, horizon: 30′}}' }),
+    WITHIN({ other_dates: OTHERS, points: POINTS, sightlines: '{a: {from: p, to: q, horizon: 30′}}' }),
   ],
   [
     'premise',
-    SUN({
+    WITHIN({
       other_dates: OTHERS,
       points: POINTS,
       sightlines: `{a: {from: p, to: q, horizon: 30′}, b: {from: p, to: r, horizon: 30′, ${sunset}}}`,
@@ -69,11 +69,15 @@ const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null
   ],
   [
     'carried',
-    SUN({ other_dates: OTHERS, plausible_precision: '1′ to 2′', atmosphere: '{refraction_uncertainty: 1′}' }),
+    WITHIN({
+      other_dates: OTHERS,
+      plausible_precision: '1′ to 2′',
+      atmosphere: '{refraction_uncertainty: 1′}',
+    }),
   ],
   [
     'carried',
-    SUN({
+    WITHIN({
       other_dates: OTHERS,
       points: POINTS,
       sightlines: `{a: {from: p, to: q, horizon: 30′}, b: {from: p, to: r, horizon: 30′, ${sunset}}}`,
@@ -83,17 +87,18 @@ const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null
   ],
   [
     'carried',
-    SUN({
+    WITHIN({
       structure: place('30° N'),
       target: '{bodies: [Kochab, Mizar], event: one above the other}',
       sightlines: '{a: {azimuth: 0° ± 2′}}',
       asserted_date: '2467 BCE ± 10',
+      window: '3000 BCE to 1000 BCE',
       other_dates: OTHERS,
     }),
   ],
   [
     'missed',
-    SUN({
+    WITHIN({
       target: '{body: sun, event: june solstice, at: rising, disc: unknown}',
       sightlines: '{a: {azimuth: 51°18′ ± 2′, horizon: 30′ ± 1′}}',
       atmosphere: '{refraction_uncertainty: 1′}',
@@ -101,7 +106,7 @@ const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null
   ],
   [
     'missed',
-    SUN({
+    WITHIN({
       points: POINTS.replace('63.6 m, unc', '61 m, unc').replace('63.6 m}', '61 m}'),
       target: '{body: sun, event: june solstice, at: rising, disc: unknown}',
       sightlines: `{a: {from: p, to: q, horizon: 30′ ± 1′}, b: {from: p, to: r, horizon: 30′ ± 1′, ${sunset}}}`,
@@ -111,7 +116,7 @@ const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null
   ],
   [
     'missed',
-    SUN({
+    WITHIN({
       structure: place('26.5° N'),
       target: '{body: Sirius, at: rising}',
       sightlines: '{a: {azimuth: 113° ± 2′}, b: {azimuth: 113°02′ ± 2′}, c: {azimuth: 113°01′ ± 2′}}',
@@ -120,7 +125,7 @@ const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null
   ],
   [
     'missed',
-    SUN({
+    WITHIN({
       structure: place('34° N'),
       target: '{body: Thuban, at: upper culmination}',
       sightlines: '{a: {altitude: 36° ± 2′}}',
@@ -129,7 +134,7 @@ const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null
   ],
   [
     'none',
-    SUN({
+    WITHIN({
       structure: place('47° N'),
       target: '{body: sun, event: december solstice, at: setting, disc: unknown}',
       sightlines: '{a: {azimuth: 228° ± 2′}, b: {azimuth: 228°30′ ± 2′}}',
@@ -137,7 +142,7 @@ const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null
   ],
   [
     'none',
-    SUN({
+    WITHIN({
       structure: place('70° N'),
       target: '{body: moon, event: southern major standstill, at: rising}',
       sightlines: '{a: {azimuth: 170° ± 2′}}',
@@ -145,7 +150,7 @@ const CLAIMS: readonly (readonly [Outcome, Readonly<Record<string, string | null
   ],
   [
     'none',
-    SUN({
+    WITHIN({
       target: '{body: sun, day: 45 days before december solstice, at: rising}',
       sightlines: '{a: {azimuth: 95° ± 2′}, b: {azimuth: 250° ± 2′}, c: {azimuth: 100° ± 2′}}',
     }),

@@ -61,7 +61,7 @@ describe('the dates of a line', () => {
 
   test('in the window and outside it, the nearest first and those to come named', () => {
     expect(datesInWindow(implied)).toBe('about 2000 BCE and about 1000 BCE')
-    expect(datesOutside(implied, WINDOW)).toBe('about 4000 CE, in the future and 1 more')
+    expect(datesOutside(implied, WINDOW)).toBe('about 4000 CE (to come) and 1 more')
   })
 })
 

@@ -283,17 +283,6 @@ describe('lines between the same two points', () => {
     // A hundredth of a degree more or less of 2°.
     expectWithin(lnRatio(pair(0), pair(2), 2), one, 0.01, 'nepers')
   })
-
-  test('of which one stands there twice share all, its target’s errors too', () => {
-    for (const tolerance of [0, 0.1, 1]) {
-      const [near, far] = [onAxis(0.1, 0.05, 0.2), onAxis(0.9, 0.05, 0.2)]
-      const want = lnRatio([near], [far], tolerance)
-      expectWithin(lnRatio([near, near], [far, far], tolerance), want, 1e-3 * want, 'nepers', tolerance)
-      const others = straight(0.3, 0.1)
-      const beside = lnRatio([near, others, near], [far, others, far], tolerance)
-      expectWithin(beside, want, 1e-3 * want, 'nepers', tolerance)
-    }
-  })
 })
 
 describe('the squared deviation', () => {

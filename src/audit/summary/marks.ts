@@ -1,4 +1,5 @@
 import { datesInWindow, datesOutside, setInWords } from '../phrases.ts'
+import { sourcesOf } from './sources-of.ts'
 import type { SummaryFacts } from './summary-facts.ts'
 
 /** Bits below which a line, built exactly, is said to tell nothing of its date. */
@@ -9,16 +10,19 @@ export function marks(facts: SummaryFacts): string {
   const { implied, sightlines, sweep, window, northTaken } = facts
   const exact = sweep.steps[0]!
   const allowed = setInWords(exact, window)
-  const survey = `survey${northTaken ? ' (its north taken as true)' : ''}, horizon and air`
+  const survey = sourcesOf(sightlines[0]!).replace(
+    'survey',
+    northTaken ? 'survey (its north taken as true)' : 'survey',
+  )
   if (sightlines.length > 1) return marksBriefly(facts)
   const { event } = sightlines[0]!
   const inside = datesInWindow(implied[0]!)
   const outside = datesOutside(implied[0]!, window)
   if (inside !== null) {
-    const beyond = outside === null ? '' : ` (outside the window also of ${outside})`
+    const beyond = outside === null ? '' : `, and outside the window of ${outside}`
     return `Built exactly, the line marks the ${event} of ${inside}${beyond}; ${survey} leave, at 95 %, ${allowed}.`
   }
-  if (exact.bits < TELLS_NOTHING) {
+  if (exact.bits < TELLS_NOTHING && sweep.no_target.length === 0) {
     return `Even built exactly, the line tells nothing of its date: within the error of ${survey} the ${event} stands there in all years of the window alike.`
   }
   const where = outside === null ? 'in no year' : `only of ${outside}, outside the window;`

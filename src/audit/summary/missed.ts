@@ -1,11 +1,12 @@
-import { formatArcmin } from '../../quantity/format-angle.ts'
 import { formatYear } from '../../quantity/format-year.ts'
 import { listed } from '../../quantity/listed.ts'
 import type { SightlineAudit } from '../audit.ts'
 import { datesInWindow, datesOutside, setInWords, sideOf } from '../phrases.ts'
 import { fitting } from './fitting.ts'
-import { threeMeasures } from './parts.ts'
+import { whyNever } from './never.ts'
+import { giveOrTake, reversedWords, threeMeasures } from './parts.ts'
 import { shortened } from './shortened.ts'
+import { sourcesOf } from './sources-of.ts'
 import { NOT_DECIDED, type SummaryFacts } from './summary-facts.ts'
 
 /** Dates fit, but the asserted one is not among them. */
@@ -34,10 +35,9 @@ function miss(facts: SummaryFacts, line: SightlineAudit): string {
   const opening = `As measured, ${nameOf(facts, line)} misses the asserted date, ${asserted.printed}.`
   const closest = line.closest_in_asserted
   if (closest === null)
-    return `${opening} In none of these years was the ${line.event} to be seen at that altitude.`
+    return `${opening} In none of these years did the ${line.event} come about: ${whyNever(line)}.`
   const year = asserted.to - asserted.from < 1 ? 'Then' : `At its nearest, in ${formatYear(closest.year)},`
-  const sd = formatArcmin(closest.sd_arcmin)
-  return `${opening} ${year} the ${line.event} stood ${threeMeasures(facts, Math.abs(closest.offset_arcmin))} ${sideOf(closest.offset_arcmin, line.measures)}, give or take ${sd} (one standard deviation) for survey, horizon and air.`
+  return `${opening} ${year} the ${line.event} stood ${threeMeasures(facts, Math.abs(closest.offset_arcmin))} ${sideOf(closest.offset_arcmin, line.measures)}${giveOrTake(line, closest.sd_arcmin)}.${reversedWords(closest.offset_arcmin)}`
 }
 
 /** What this rests on that the claim does not say, and how else it might be read. */
@@ -64,10 +64,10 @@ function exactDates({ implied, window }: SummaryFacts, index: number): string {
   return `Built exactly, it marks that event in ${inside}${outside === null ? '' : `, and outside the window in ${outside}`}.`
 }
 
-function builders({ closest_in_asserted }: SightlineAudit): string {
-  return closest_in_asserted === null
+function builders(line: SightlineAudit): string {
+  return line.closest_in_asserted === null
     ? ''
-    : 'For the asserted date the builders must have been off by about that much, unless survey, horizon or air are further out than stated.'
+    : `For the asserted date the builders must have been off by about that much, unless ${sourcesOf(line).replace(' and ', ' or ')} are further out than stated.`
 }
 
 function usualErrors({ atOffset, window, sightlines }: SummaryFacts): string {

@@ -1,9 +1,9 @@
-import { formatArcmin } from '../../quantity/format-angle.ts'
 import { formatYearRange } from '../../quantity/format-year.ts'
 import { YEARS_BEYOND_WINDOW } from '../defaults.ts'
 import { aboutYear, sideOf } from '../phrases.ts'
 import { takenAs } from './missed.ts'
-import { threeMeasures } from './parts.ts'
+import { whyNever } from './never.ts'
+import { giveOrTake, reversedWords, threeMeasures } from './parts.ts'
 import { shortened } from './shortened.ts'
 import type { SummaryFacts } from './summary-facts.ts'
 
@@ -17,18 +17,19 @@ export function none(facts: SummaryFacts): string[] {
     ]
   }
   const index = worst(facts)
-  const { event, measures, name } = sightlines[index]!
+  const line = sightlines[index]!
+  const { event, measures, name } = line
   const which = sightlines.length > 1 ? `the line ${shortened(name)}` : 'the line'
   const near = implied[index]!.nearest_approach
   if (near === null || near.offset_arcmin === null || near.sd_arcmin === null) {
     return [
-      `No date fits ${which}. At this latitude the ${event} is not to be seen at that altitude in any year of ${window.printed}. ${takenAs(facts, index)}`.trim(),
+      `No date fits ${which}. At this latitude the ${event} does not come about in any year of ${window.printed}: ${whyNever(line)}. ${takenAs(facts, index)}`.trim(),
       'Either the line was meant for something else, or latitude, horizon or target are not as stated. This audit does not decide which.',
     ]
   }
   const years = formatYearRange(window.from - YEARS_BEYOND_WINDOW, window.to + YEARS_BEYOND_WINDOW)
   return [
-    `No date fits ${which}. From ${years} the ${event} never stands on it. In the window it came nearest in ${aboutYear(near.year)}, and then stood ${threeMeasures(facts, Math.abs(near.offset_arcmin))} ${sideOf(near.offset_arcmin, measures)}, give or take ${formatArcmin(near.sd_arcmin)} (one standard deviation) for survey, horizon and air. ${takenAs(facts, index)}`.trim(),
+    `No date fits ${which}. From ${years} the ${event} never stands on it. In the window it came nearest in ${aboutYear(near.year)}, and then stood ${threeMeasures(facts, Math.abs(near.offset_arcmin))} ${sideOf(near.offset_arcmin, measures)}${giveOrTake(line, near.sd_arcmin)}.${reversedWords(near.offset_arcmin)} ${takenAs(facts, index)}`.trim(),
     'For any date at all the builders must have been off by about that much or more; or the line was meant for something else; or survey, horizon or target are not as stated. This audit does not decide which.',
   ]
 }

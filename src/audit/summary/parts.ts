@@ -1,20 +1,40 @@
 import { formatArcmin } from '../../quantity/format-angle.ts'
-import type { Limit, SweepStep } from '../audit.ts'
+import type { Limit, SightlineAudit, SweepStep } from '../audit.ts'
 import { middle } from '../dated-label.ts'
 import { centimetres, sunWidths } from '../measures.ts'
 import { leadsUpTo, rivalLimits } from '../outcome.ts'
 import { labelled } from '../phrases.ts'
 import { yardstickSemidiameterArcmin } from '../sun-yardstick.ts'
-import { inThreeMeasures } from '../words.ts'
+import { inThreeMeasures, widthsInWords } from '../words.ts'
 import { grammarOf } from './grammar.ts'
 import { shortened } from './shortened.ts'
+import { sourcesOf } from './sources-of.ts'
 import type { SummaryFacts } from './summary-facts.ts'
+
+/** Beyond 45° neither hands nor Suns help to picture an angle. */
+const LARGEST_PICTURED_ARCMIN = 45 * 60
+
+/** Beyond this no standard deviation means anything: the direction turns round in it. */
+const LARGEST_TOLD_SD_ARCMIN = 20 * 60
+
+/** `, give or take 9′ (one standard deviation) for survey, horizon and air`; close to the meridian no such thing. */
+export function giveOrTake(line: SightlineAudit, sdArcmin: number): string {
+  if (sdArcmin > LARGEST_TOLD_SD_ARCMIN) return ', so close to the meridian that no error of it can be told'
+  return `, give or take ${formatArcmin(sdArcmin)} (one standard deviation) for ${sourcesOf(line)}`
+}
+
+/** A line that points the opposite way most likely has its ends, or rising and setting, exchanged. */
+export function reversedWords(offsetArcmin: number): string {
+  return Math.abs(offsetArcmin) < 90 * 60 ? '' : ' Are its ends exchanged, or rising and setting?'
+}
 
 /** `24′ (71 cm at 99.9 m, 0.74 of the Sun’s width)`. */
 export function threeMeasures({ sweep, sightlines, asserted }: SummaryFacts, arcmin: number): string {
   const { measures, altitude_deg } = sightlines[0]!
   const semidiameter = yardstickSemidiameterArcmin(middle(asserted))
   const widths = sunWidths(arcmin, semidiameter, measures === 'azimuth' ? altitude_deg.value : 0)
+  if (arcmin > LARGEST_PICTURED_ARCMIN) return formatArcmin(arcmin)
+  if (measures === 'altitude') return `${formatArcmin(arcmin)} (${widthsInWords(widths)})`
   return inThreeMeasures(arcmin, centimetres(arcmin, sweep.marker), sweep.marker.distance_m, widths)
 }
 

@@ -17,25 +17,33 @@ export interface MeridianTarget {
 export function meridianBranch(inputs: SightlineInputs, target: MeridianTarget): Branch {
   const refraction = refractionAtHorizon(inputs)
   const parallax = refraction.lessParallax ? 0 : target.parallaxArcsec
+  const apparent = (year: number) => {
+    const declination = target.declination(year)
+    if (declination === null) return null
+    const { deg, per } = meridianAltitude(target.culmination, declination.deg, inputs.latitudeDeg)
+    const topocentric = deg - (parallax / 3600) * Math.cos(deg * DEG)
+    const directionDeg = topocentric + (refraction.arcmin + target.aboveCentreArcmin(year)) / 60
+    return { directionDeg, per, errors: declination.errors }
+  }
   return {
     predict: (year) => {
-      const declination = target.declination(year)
-      if (declination === null) return null
-      const { deg, per } = meridianAltitude(target.culmination, declination.deg, inputs.latitudeDeg)
-      const topocentric = deg - (parallax / 3600) * Math.cos(deg * DEG)
-      const directionDeg = topocentric + (refraction.arcmin + target.aboveCentreArcmin(year)) / 60
-      if (directionDeg < 0) return null
+      const seen = apparent(year)
+      if (seen === null || seen.directionDeg < 0) return null
       return {
-        directionDeg,
+        directionDeg: seen.directionDeg,
         errors: [
           { source: 'refraction of the day', effectDeg: inputs.refractionSdArcmin / 60, shared: false },
-          ...declination.errors.map(({ source, sdDeg, shared }) => ({
+          ...seen.errors.map(({ source, sdDeg, shared }) => ({
             source,
-            effectDeg: per * sdDeg,
+            effectDeg: seen.per * sdDeg,
             shared: shared === true,
           })),
         ],
       }
+    },
+    shortfallDeg: (year) => {
+      const seen = apparent(year)
+      return seen === null ? null : Math.max(0, -seen.directionDeg)
     },
   }
 }

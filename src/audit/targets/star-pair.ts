@@ -24,10 +24,7 @@ export function starPairTarget(
 ): TargetModel {
   const names = stars.map(labelOfStar)
   const uppers: Upper[] = above === null ? ['first', 'second'] : [above === 0 ? 'first' : 'second']
-  const order =
-    above === null
-      ? `${names[0]} and ${names[1]}, one above the other`
-      : `${names[above]} above ${names[1 - above]}`
+  const order = above === null ? `${names[0]} and ${names[1]}` : `${names[above]} above ${names[1 - above]}`
   const event = `alignment of ${order}`
   return {
     event,
@@ -54,7 +51,7 @@ function branchOf(
   const matrixIn = rememberLast(matrix)
   const tracks = stars.map((star) => starTrack(star, matrixIn))
   const azimuth = (first: StarPlace, second: StarPlace) =>
-    azimuthOneAboveOtherDeg(first, second, inputs.latitudeDeg, upper)
+    azimuthOneAboveOtherDeg(first, second, inputs.latitudeDeg, upper, inputs.measuredDeg)
   return {
     predict: (year): Prediction | null => {
       const places = tracks.map((track) => track(year))
