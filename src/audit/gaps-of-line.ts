@@ -9,23 +9,19 @@ import { directionGaps } from './gaps-of-direction.ts'
 import { gapsOfTarget } from './gaps-of-target.ts'
 import { readingsOf } from './readings-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
+import { usesHorizon } from './uses-horizon.ts'
 
 /** What one sightline leaves open, in the order of the claim file. */
 export function gapsOfLine(claim: Claim, sightline: Sightline, inputs: SightlineInputs): Gap[] {
   const of = claim.sightlines.length > 1 ? ` of ${sightline.name}` : ''
   return [
-    ...(inputs.measures === 'azimuth' && usesHorizon(inputs) ? horizonGaps(sightline, inputs, of) : []),
+    ...(usesHorizon(inputs) ? horizonGaps(sightline, inputs, of) : []),
     ...targetGaps(sightline, inputs, of),
     ...gapsOfTarget(inputs, of),
     ...directionGaps(claim, sightline, inputs, of),
     ...(inputs.target.body === 'two stars' ? [] : refractionGaps(claim, inputs, of)),
     modelGap(inputs),
   ]
-}
-
-/** A star sighted at a stated altitude, and two stars one above the other, need no horizon. */
-function usesHorizon({ target }: SightlineInputs): boolean {
-  return target.body !== 'two stars' && !(target.body === 'star' && target.sighted.by === 'altitude')
 }
 
 function modelGap(inputs: SightlineInputs): Gap {

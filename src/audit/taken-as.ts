@@ -6,6 +6,7 @@ import { readingsOf } from './readings-of.ts'
 import { sightOf } from './sight-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 import type { TakenAs } from './summary/summary-facts.ts'
+import { usesHorizon } from './uses-horizon.ts'
 
 /** What the claim leaves open of a line's target and horizon, and with which readings the line fits a date. */
 export function takenAs(
@@ -30,6 +31,6 @@ export function takenAs(
           },
         ]
   })
-  const isLevel = line.measures === 'azimuth' && isUnstated(horizonDeg) && line.target.body !== 'two stars'
+  const isLevel = usesHorizon(line) && isUnstated(horizonDeg)
   return isLevel ? [...ofTarget, { what: 'the horizon', used: 'level', fitsWith: [] }] : ofTarget
 }

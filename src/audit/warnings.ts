@@ -124,7 +124,7 @@ function datesBeyondOrbit(implied: readonly Implied[]) {
 function unreached({ no_target }: Sweep) {
   if (no_target.length === 0) return []
   const stretches = listedShort(
-    no_target.map(([from, to]) => formatYearRange(from, to, 10)),
+    no_target.map(([from, to]) => formatYearRange(from, to)),
     4,
   )
   return [
