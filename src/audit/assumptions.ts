@@ -11,7 +11,7 @@ import { sightOf } from './sight-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 
 /** Step in which the effect of a change is looked for, years. */
-const STEP = 40
+const STEP = 80
 
 /**
  * Everything the claim leaves out and the engine filled in, with its effect on the implied date nearest the asserted

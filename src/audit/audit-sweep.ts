@@ -22,7 +22,7 @@ export interface SweepDates {
 
 /** Tolerances that every table prints, and the run that the figure draws between them, arcminutes. */
 const TABLE_ARCMIN = [0, 1, 2, 5, 10, 20, 30, 60, 120]
-const DRAWN_ARCMIN = Array.from({ length: 90 }, (_, i) => 0.5 * 600 ** (i / 89))
+const DRAWN_ARCMIN = Array.from({ length: 60 }, (_, i) => 0.5 * 600 ** (i / 59))
 
 export function groundOf(sights: readonly Sight[], { window, asserted, others }: SweepDates): SweepGround {
   return prepareSweep(sights, window, asserted, others)

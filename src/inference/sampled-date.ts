@@ -10,7 +10,7 @@ export interface SampledDate {
   noDateShare: number
 }
 
-const DRAWS = 2000
+const DRAWS = 1000
 const STEP = 40
 /** Any number does; fixed so that the same claim gives the same audit. */
 const SEED = 20

@@ -22,7 +22,7 @@ export function yearAxis(plot: PremisePlot): Element[] {
       line([left - 4, plot.y(at)], [left, plot.y(at)], RULE),
       text(left - 6, plot.y(at) + 2.6, label, { anchor: 'end' }),
     ]),
-    text(1, top - 5.5, 'date, later ↑', { italic: true, fill: PALETTE.muted }),
+    text(1, top - 5.5, 'date, later up', { fill: PALETTE.muted }),
   ]
 }
 
@@ -41,7 +41,7 @@ export function toleranceAxes(audit: Audit, scales: PremiseScales, plot: Premise
     text(scales.x(0), bottom + SCALE_ROWS.tolerance, 'exact', { anchor: 'middle' }),
     ...tickRow(ticks, scales.x, bottom, SCALE_ROWS.tolerance),
     caption('build tolerance', scales, bottom + SCALE_ROWS.tolerance, true),
-    text(1, bottom + SCALE_ROWS.tolerance, 'earlier ↓', { italic: true, fill: PALETTE.muted }),
+    text(1, bottom + SCALE_ROWS.tolerance, 'earlier down', { fill: PALETTE.muted }),
     ...secondScale(
       audit.sweep.steps,
       (step) => step.tolerance_cm,

@@ -34,8 +34,8 @@ export function trackAxes(
       line([plot.x(at), bottom], [plot.x(at), bottom + 4], RULE),
       text(plot.x(at), bottom + 12, label, { anchor: 'middle' }),
     ]),
-    text(1, top - 5.5, measures, { italic: true, fill: PALETTE.muted }),
-    text(captionRight, bottom + 12, 'date, later →', { anchor: 'end', italic: true, fill: PALETTE.muted }),
+    text(1, top - 5.5, measures, { fill: PALETTE.muted }),
+    text(captionRight, bottom + 12, 'date, later →', { anchor: 'end', fill: PALETTE.muted }),
   ]
 }
 

@@ -33,7 +33,7 @@ export function figureStrip(node: Figure, column: Column, shape: Shaper): Strip 
 }
 
 function captionStrips(node: Figure, column: Column, parent: Tag, shape: Shaper): Strip[] {
-  const label = plainRun(`Figure ${node.number}\u2002`, TEXT.caption, TEXT.caption.strong)
+  const label = plainRun(`Figure ${node.number}\u00a0\u00a0`, TEXT.caption, TEXT.caption.strong)
   const runs = [label, ...inlineRuns(node.children, TEXT.caption)]
   const lines = linesOfRuns(runs, TEXT.caption, column.width, shape)
   return lineStrips(lines, TEXT.caption, column.left, { role: 'Caption', parent })

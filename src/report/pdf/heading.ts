@@ -24,7 +24,7 @@ export function setHeading(node: Heading, column: Column, setting: Setting): Str
   const isTitle = node === setting.title
   const { style, above, below } = headingLook(node, isTitle)
   const number = setting.numberOf(node)
-  const label = number === '' ? [] : [plainRun(`${number}\u2002`, style)]
+  const label = number === '' ? [] : [plainRun(`${number}\u00a0\u00a0`, style)]
   const runs = [...label, ...inlineRuns(node.children, style)]
   const lines = linesOfRuns(runs, style, isTitle ? column.width : column.measure, setting.shape)
   const tag: Tag = { role: `H${node.depth}`, parent: column.tag }

@@ -84,7 +84,7 @@ function captionStrips(node: Table, column: Column, table: Tag, shape: Shaper): 
   const { number, caption } = node.data ?? {}
   if (!caption) return []
   const label =
-    number === undefined ? [] : [plainRun(`Table ${number}\u2002`, TEXT.caption, TEXT.caption.strong)]
+    number === undefined ? [] : [plainRun(`Table ${number}\u00a0\u00a0`, TEXT.caption, TEXT.caption.strong)]
   const runs = [...label, ...inlineRuns(caption, TEXT.caption)]
   const lines = linesOfRuns(runs, TEXT.caption, column.width, shape)
   const strips = lineStrips(lines, TEXT.caption, column.left, { role: 'Caption', parent: table })

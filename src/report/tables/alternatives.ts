@@ -1,7 +1,7 @@
 import type { Table } from 'mdast'
 import type { Alternative, Audit } from '../../audit/audit.ts'
 import { formatYear } from '../../quantity/format-year.ts'
-import { type Column, emphasis, type Phrase, table } from '../nodes.ts'
+import { type Column, type Phrase, table } from '../nodes.ts'
 
 /** The claim with one open choice at a time made otherwise. */
 export function alternativesTable(audit: Audit): Table[] {
@@ -23,7 +23,7 @@ export function alternativesTable(audit: Audit): Table[] {
 }
 
 function printValue({ value, is_claims }: Alternative): Phrase[] {
-  return is_claims ? [`${value} `, emphasis('(as in this audit)')] : [value]
+  return is_claims ? [value, ' (as in this audit)'] : [value]
 }
 
 function printYear(year: number | null): string {

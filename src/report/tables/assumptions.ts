@@ -1,7 +1,7 @@
 import type { Table } from 'mdast'
 import type { Assumption, Audit } from '../../audit/audit.ts'
 import { formatNumber } from '../../quantity/format-number.ts'
-import { emphasis, type Phrase, table } from '../nodes.ts'
+import { type Phrase, table } from '../nodes.ts'
 
 /** What the claim file leaves open and the program filled in, in the audit's order: largest effect first. */
 export function assumptionsTable(audit: Audit): Table[] {
@@ -23,7 +23,7 @@ export function assumptionsTable(audit: Audit): Table[] {
 }
 
 function printWhat({ what, said }: Assumption): Phrase[] {
-  return said === 'unknown' ? [what, ' ', emphasis('(said to be unknown)')] : [what]
+  return said === 'unknown' ? [what, ' (said to be unknown)'] : [what]
 }
 
 function printEffect({ effect_years, effect_of }: Assumption): string {

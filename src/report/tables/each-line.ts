@@ -2,7 +2,7 @@ import type { Table } from 'mdast'
 import type { Audit, SightlineAudit, Sweep, SweepStep } from '../../audit/audit.ts'
 import { formatArcmin } from '../../quantity/format-angle.ts'
 import { formatYear } from '../../quantity/format-year.ts'
-import { type Column, emphasis, type Phrase, table } from '../nodes.ts'
+import { type Column, type Phrase, table } from '../nodes.ts'
 import { dateSets } from '../wording/date-sets.ts'
 import { fixed } from '../wording/fixed.ts'
 import { impliedByOwnModel } from '../wording/implied-by-own-model.ts'
@@ -32,7 +32,7 @@ export function eachLineTable(audit: Audit): Table[] {
           : ' The ratio tells how many times better the asserted date fits than the independent one.',
       ],
       [
-        { head: 'Sightline', cell: ({ line }) => line?.name ?? emphasis('all together'), width: 1.2 },
+        { head: 'Sightline', cell: ({ line }) => line?.name ?? 'all together', width: 1.2 },
         { head: 'Target', cell: ({ line }) => line?.event ?? '–', width: 1.8 },
         { head: 'Built exactly', cell: (row) => exactDates(row, audit), width: 1.6 },
         {
