@@ -12,7 +12,7 @@ export type LimitReason = 'never' | 'always' | 'outside'
 /** Tolerances at which a condition is tried before its change is narrowed down: 0, then 0.25′ to 300′. */
 const SCAN = [
   0,
-  ...Array.from({ length: 100 }, (_, i) => 0.25 * (LARGEST_TOLERANCE_ARCMIN / 0.25) ** (i / 99)),
+  ...Array.from({ length: 50 }, (_, i) => 0.25 * (LARGEST_TOLERANCE_ARCMIN / 0.25) ** (i / 49)),
 ]
 const PRECISION_ARCMIN = 0.005
 
