@@ -1,12 +1,11 @@
 import { nearestOffset } from '../inference/comparison.ts'
 import { bestFit } from '../inference/fit.ts'
 import { driftDegPerYear } from '../inference/implied-dates.ts'
-import type { Branch } from '../inference/sight.ts'
-import { wrap180 } from '../quantity/degrees.ts'
 import { declinationDeg } from '../site/horizontal.ts'
 import type { Drift, SightlineAudit, Sweep, Value } from './audit.ts'
 import { middle } from './dated-label.ts'
 import { centimetres, markerOf, sunWidths } from './measures.ts'
+import { nearestBranch } from './nearest-branch.ts'
 import { refractionAt, refractionAtHorizon } from './refraction-at.ts'
 import { sightOf } from './sight-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
@@ -44,7 +43,7 @@ export function auditSightline(
     offset_at_asserted_arcmin: offset === null ? null : offset.offsetDeg * 60,
     offset_at_asserted_sd_arcmin: offset === null ? null : offset.sdDeg * 60,
     closest_in_asserted: closestIn(inputs, asserted),
-    drift: driftOf(inputs, target.branches, year),
+    drift: driftOf(inputs, year),
     notes: target.notes(year),
     sweep,
   }
@@ -111,13 +110,9 @@ function airOf({ refraction }: SightlineInputs): SightlineAudit['air'] {
 }
 
 /** Of the branch that stands nearest to the line in that year. */
-function driftOf(inputs: SightlineInputs, branches: readonly Branch[], year: number): Drift | null {
+function driftOf(inputs: SightlineInputs, year: number): Drift | null {
   const sight = sightOf(inputs)
-  const distance = (branch: Branch) => {
-    const prediction = branch.predict(year)
-    return prediction === null ? Infinity : Math.abs(wrap180(sight.measuredDeg - prediction.directionDeg))
-  }
-  const branch = branches.reduce((best, each) => (distance(each) < distance(best) ? each : best))
+  const branch = nearestBranch(sight, year)
   const perYear = driftDegPerYear(sight, branch, year)
   if (perYear === null || perYear === 0) return null
   const arcminPerYear = perYear * 60

@@ -26,6 +26,3 @@ export const DEFAULTS = {
 
 /** Years beyond the window in which dates are still looked for, and named as outside it. */
 export const YEARS_BEYOND_WINDOW = 10_000
-
-/** A target within so many standard deviations of the line fits it: 95 % of a normal distribution. */
-export const FITS_WITHIN_SD = 1.96
