@@ -1,8 +1,8 @@
 import { describe, expect, test } from 'vitest'
 import { wrap180 } from '../../src/quantity/degrees.ts'
-import { lineDirection } from '../../src/site/line-direction.ts'
-import { seededRandom } from '../inference/seeded-random.ts'
+import { lineDirection, type SurveyedPoint } from '../../src/site/line-direction.ts'
 import { expectWithin } from '../published/expect-within.ts'
+import { DRAWS, drawPoint, drawSurveys, meanProduct, SAMPLING_ERROR } from './sampled-survey.ts'
 
 const point = (eastM: number, northM: number, sdM = 0) => ({ eastM, northM, sdM })
 
@@ -32,18 +32,40 @@ describe('lineDirection', () => {
     expectWithin(sdDeg * 60, 3, 1e-6, 'arcmin')
   })
 
-  // 20,000 surveys: the standard deviation found has a sampling error of 1/√(2·20,000) = 0.5 %.
   test.each([
     [point(3, 4, 0.1), point(40, 61, 0.2)],
     [point(0, 0, 0.05), point(-1, 200, 0.02)],
   ])('has the scatter of a survey made again and again', (from, to) => {
     const { azimuthDeg, sdDeg } = lineDirection(from, to)
-    const { normal } = seededRandom(11)
-    const measured = ({ eastM, northM, sdM }: ReturnType<typeof point>) =>
-      point(eastM + sdM * normal(), northM + sdM * normal())
-    const errors = Array.from({ length: 20_000 }, () =>
-      wrap180(lineDirection(measured(from), measured(to)).azimuthDeg - azimuthDeg),
+    const errors = drawSurveys(11, (random) =>
+      wrap180(lineDirection(drawPoint(from, random), drawPoint(to, random)).azimuthDeg - azimuthDeg),
     )
-    expectWithin(Math.hypot(...errors) / Math.sqrt(errors.length) / sdDeg, 1, 4 * 0.005, 'of the deviation')
+    const ratio = Math.sqrt(meanProduct(errors, errors)) / sdDeg
+    expectWithin(ratio, 1, 4 * SAMPLING_ERROR, 'of the deviation')
   })
+
+  // Two lines without a point in common share only the error of north: ρ = s_n²/√((s_n² + s₁²)(s_n² + s₂²)), which is
+  // s_n²/(s_n² + s²) where both are alike. A correlation found from N draws is good to (1 − ρ²)/√N.
+  test.each([
+    [point(0, 0, 0.05), point(0, 100, 0.05), point(30, 0, 0.05), point(130, 0, 0.05), 0.04],
+    [point(0, 0, 0.05), point(30, 40, 0.1), point(5, 5, 0.02), point(-80, 60, 0.02), 0.1],
+  ])(
+    'correlates with another line by the error of their north',
+    (from, to, otherFrom, otherTo, northSdDeg) => {
+      const [one, other] = [lineDirection(from, to), lineDirection(otherFrom, otherTo)]
+      const errors = drawSurveys(12, (random) => {
+        const north = northSdDeg * random.normal()
+        const error = (start: SurveyedPoint, end: SurveyedPoint, exactDeg: number) =>
+          wrap180(
+            lineDirection(drawPoint(start, random), drawPoint(end, random)).azimuthDeg + north - exactDeg,
+          )
+        return [error(from, to, one.azimuthDeg), error(otherFrom, otherTo, other.azimuthDeg)] as const
+      })
+      const [first, second] = [errors.map(([error]) => error), errors.map(([, error]) => error)]
+      const found =
+        meanProduct(first, second) / Math.sqrt(meanProduct(first, first) * meanProduct(second, second))
+      const want = northSdDeg ** 2 / (Math.hypot(northSdDeg, one.sdDeg) * Math.hypot(northSdDeg, other.sdDeg))
+      expectWithin(found, want, (4 * (1 - want ** 2)) / Math.sqrt(DRAWS), 'of correlation')
+    },
+  )
 })
