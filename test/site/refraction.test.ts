@@ -3,6 +3,7 @@ import { describe, expect, test } from 'vitest'
 import { DEG } from '../../src/quantity/degrees.ts'
 import { type Air, standardPressureHpa, standardTemperatureC } from '../../src/site/air.ts'
 import { refractionArcmin } from '../../src/site/refraction.ts'
+import { saturatedVapourPressureHpa } from '../../src/site/vapour-pressure.ts'
 import { expectWithin } from '../published/expect-within.ts'
 import { readTable } from '../published/read-table.ts'
 import { traceRay } from './trace-ray.ts'
@@ -106,6 +107,42 @@ describe('a constant of refraction by another program', () => {
       0.05 * Math.abs(want),
       'arcmin',
     )
+  })
+})
+
+// Birch & Downs 1994, Metrologia 31, 315 (from memory), for air at 20 °C: σ = 1/λ in 1/µm, f the vapour pressure in Pa.
+describe('the refractive index by a national laboratory', () => {
+  const square = 1 / 0.574 ** 2
+  const humid = { ...dry(20, 1013.25), humidity: 1 }
+  /** n − 1 as two degrees from the zenith show it: R = (n − 1)(1 − β) tan z, with β = 0.00125 for the curved Earth. */
+  const refractivity = (air: Air) =>
+    ((refractionArcmin(88, air, 45) / 60) * DEG) / Math.tan(2 * DEG) / (1 - 0.00125)
+
+  test('is that of dry air', () => {
+    const at15 = (8342.54 + 2406147 / (130 - square) + 15998 / (38.9 - square)) * 1e-8
+    // Printed for air at 15 °C and 101,325 Pa; the program's constants are some 0.015 % higher.
+    expectWithin(refractivity(dry(15, 1013.25)) / at15, 1, 2e-4, 'of it')
+  })
+
+  test('is that of humid air, but for the difference of two sources', () => {
+    const pascal = 100 * saturatedVapourPressureHpa(20, 1013.25)
+    const effect = refractivity(dry(20, 1013.25)) - refractivity(humid)
+    const measured = pascal * (3.7345 - 0.0401 * square) * 1e-10
+    // Hohenkerk & Sinclair take the 5.5e−8 per torr at 0 °C of the IUGG's resolution of 1963 (from memory), whatever
+    // the colour. That is 6.4 % more at 20 °C; the shape of the humid air adds 0.1 % to what the rays show.
+    const resolved = ((5.5e-8 * pascal) / 133.322) * (273.15 / 293.15)
+    expectWithin(effect / resolved, 1, 0.003, 'of it')
+    expectWithin(effect / measured, 1.064, 0.003, 'of it')
+    // On the whole index that comes to 0.02 %.
+    expectWithin((effect - measured) / refractivity(humid), 0, 2.1e-4, 'of the index')
+  })
+
+  test('leaves the horizon within 0.03′', () => {
+    const effect = refractionArcmin(0, humid, 45) - refractionArcmin(0, dry(20, 1013.25), 45)
+    expectWithin(effect, traceRay(0, humid, 45) - traceRay(0, dry(20, 1013.25), 45), 0.002, 'arcmin')
+    // All of the vapour takes 0.37′ off, since it thins out faster than the air; 6.4 % of that is 0.024′.
+    expect(effect).toBeLessThan(0)
+    expectWithin(0.064 * effect, 0, 0.03, 'arcmin')
   })
 })
 
