@@ -1,4 +1,5 @@
-import { DEG, wrap180 } from '../quantity/degrees.ts'
+import { DEG, wrap180, wrap360 } from '../quantity/degrees.ts'
+import { horizontalPlace } from './horizontal-place.ts'
 import type { Vector } from './long-term-poles.ts'
 import type { StarPlace } from './star-place.ts'
 import { cross, unit } from './vector.ts'
@@ -10,6 +11,8 @@ export interface OneAboveOther {
   above: 'first' | 'second'
   /** True altitudes of the first and the second star; below 0 where one has set. */
   altitudesDeg: readonly [number, number]
+  /** Local sidereal time of the moment as an angle, 0 to 360. */
+  siderealDeg: number
 }
 
 /**
@@ -36,7 +39,8 @@ export function momentsOneAboveOther(
     if (Math.abs(wrap180(one.azimuthDeg - other.azimuthDeg)) > 90) return []
     const above = one.altitudeDeg > other.altitudeDeg ? 'first' : 'second'
     const { azimuthDeg } = above === 'first' ? other : one
-    return [{ azimuthDeg, above, altitudesDeg: [one.altitudeDeg, other.altitudeDeg] as const }]
+    const altitudesDeg = [one.altitudeDeg, other.altitudeDeg] as const
+    return [{ azimuthDeg, above, altitudesDeg, siderealDeg: wrap360(siderealDeg) }]
   })
 }
 
@@ -62,17 +66,4 @@ export function azimuthOneAboveOtherDeg(
 function vectorOf({ raDeg, decDeg }: StarPlace): Vector {
   const [ra, dec] = [raDeg * DEG, decDeg * DEG]
   return [Math.cos(dec) * Math.cos(ra), Math.cos(dec) * Math.sin(ra), Math.sin(dec)]
-}
-
-/** Azimuth and true altitude of a star at a local sidereal time given as an angle; degrees. */
-function horizontalPlace({ raDeg, decDeg }: StarPlace, siderealDeg: number, latitudeDeg: number) {
-  const hourAngle = (siderealDeg - raDeg) * DEG
-  const [dec, phi] = [decDeg * DEG, latitudeDeg * DEG]
-  const west = Math.cos(dec) * Math.sin(hourAngle)
-  const north = Math.sin(dec) * Math.cos(phi) - Math.cos(dec) * Math.cos(hourAngle) * Math.sin(phi)
-  const up = Math.sin(dec) * Math.sin(phi) + Math.cos(dec) * Math.cos(hourAngle) * Math.cos(phi)
-  return {
-    azimuthDeg: Math.atan2(-west, north) / DEG,
-    altitudeDeg: Math.atan2(up, Math.hypot(west, north)) / DEG,
-  }
 }
