@@ -1,9 +1,15 @@
+import { POINT_FORMS } from './read/read-breadth.ts'
 import { DISC_PARTS } from './read/read-disc.ts'
+import { ELLIPSOID_NAMES } from './read/read-ellipsoid.ts'
 import { MODEL_NAMES } from './read/read-formula.ts'
 import { MOON_MOMENTS, STANDSTILLS } from './read/read-moon-target.ts'
+import { NORTH_WAYS } from './read/read-north.ts'
+import { SIGHTED_WORDS } from './read/read-sighted.ts'
+import { SPAN_MOMENTS } from './read/read-span-target.ts'
 import { PAIR_EVENT } from './read/read-star-pair-target.ts'
 import { EQUINOX_SENSES, SUN_EVENTS } from './read/read-sun-event.ts'
 import { SUN_MOMENTS } from './read/read-sun-target.ts'
+import { SPAN_EVENT } from './read/season.ts'
 import { STAR_MOMENTS } from './read/star-moments.ts'
 
 /** A part of a JSON Schema. */
@@ -65,6 +71,16 @@ const target: Schema = {
       ['body', 'at'],
     ),
     mapping(
+      'The Sun at both solstices; the sightline is a span.',
+      {
+        body: word('The Sun.', ['sun']),
+        event: word('Both solstices of a year.', [SPAN_EVENT]),
+        at: word('Where the Sun crosses the horizon.', SPAN_MOMENTS),
+        disc,
+      },
+      ['body', 'event', 'at'],
+    ),
+    mapping(
       'The Moon at a standstill, which comes every 18.6 years.',
       {
         body: word('The Moon.', ['moon']),
@@ -105,25 +121,115 @@ const target: Schema = {
   ],
 }
 
-const point = mapping(
-  'A point on a local grid.',
-  {
-    east: quantity('Metres east of the grid’s origin.', '84.65 m'),
-    north: quantity('Metres north of the grid’s origin.', '53.09 m'),
-    up: quantity('Height above the grid’s origin.', '0.4 m'),
-    uncertainty: quantity('One standard deviation in each of east and north.', '5 cm', 'unknown'),
-  },
-  ['east', 'north'],
-)
+const point = mapping('A point: on the plan, in latitude and longitude, or on the grid.', {
+  east: quantity('Metres east of the plan’s origin.', '84.65 m'),
+  north: quantity('Metres north of the plan’s origin.', '53.09 m'),
+  up: quantity('Height above the plan’s origin.', '0.4 m'),
+  latitude: quantity('On WGS 84; beside east and north it ties the plan to the Earth.', '41°20′03.6″ N'),
+  longitude: quantity('On WGS 84, beside latitude.', '23°15′12.4″ E'),
+  easting: quantity('On the projected grid.', '273741.297 m'),
+  northing: quantity('On the projected grid.', '5796489.777 m'),
+  elevation: quantity('Height above sea level of a point that is not on the plan.', '1420 m'),
+  uncertainty: quantity('One standard deviation in each of two directions.', '5 cm', 'unknown'),
+  width: quantity('Width across the line of what stands there.', '60 cm'),
+  form: word('Whether what has a width is a post or a gap between two.', POINT_FORMS),
+})
+
+const points: Schema = {
+  description: 'The points of the survey, by name; or a table of them beside the claim file.',
+  anyOf: [
+    text('A table beside the claim file.'),
+    {
+      ...names('The points by name.', point),
+      properties: {
+        file: text('A table beside the claim file, with more points.'),
+        uncertainty: quantity('Of all points that state none.', '5 cm', 'unknown'),
+      },
+    },
+  ],
+}
+
+const north: Schema = {
+  description: 'How the plan’s north was found, and how well; or unknown.',
+  anyOf: [
+    { const: 'unknown' },
+    mapping(
+      'How north was found.',
+      {
+        from: word('The means.', NORTH_WAYS),
+        uncertainty: quantity('One standard deviation.', '0.5°', 'unknown'),
+        date: quantity('Of a compass: the day of the survey.', '12 June 1998', '1998-06-12'),
+        declination: quantity(
+          'Of a compass: by how much its north lies off true north; applied where that has been taken off.',
+          '3°20′ W ± 10′',
+          'applied',
+        ),
+        baseline: quantity('Of two GPS positions: how far apart they were.', '60 m'),
+        accuracy: quantity('Of two GPS positions: one standard deviation of each.', '2 cm'),
+        convergence: quantity('Of a grid: by how much its north lies off true north.', '1°35′ W ± 1′'),
+      },
+      ['from'],
+    ),
+  ],
+}
+
+const grid = mapping('The projected grid: a zone, a projection, or its convergence alone.', {
+  zone: quantity('A zone of UTM, N or S of the equator.', 'UTM 55 S'),
+  central_meridian: quantity('Of a transverse Mercator projection.', '2° W'),
+  latitude_of_origin: quantity('Where northings count from.', '49° N'),
+  scale: { type: ['number', 'string'], description: 'On the central meridian.', examples: [0.9996012717] },
+  false_easting: quantity('Easting of the central meridian.', '400 km'),
+  false_northing: quantity('Northing of the latitude of origin.', '-100 km'),
+  ellipsoid: word('The figure of the Earth.', ELLIPSOID_NAMES),
+  convergence: quantity('By how much grid north lies off true north.', '1°35′ W ± 1′'),
+})
+
+const horizon = (description: string): Schema => ({
+  description,
+  anyOf: [
+    quantity('Its apparent altitude.', '1°30′ ± 2′', 'unknown'),
+    mapping('What its altitude follows from.', {
+      distance: quantity('How far it is.', '8 km ± 100 m'),
+      rise: quantity('How much it stands above the eye.', '120 m ± 5 m'),
+      point: text('A point with a height that is the horizon.'),
+      sea: quantity('The open sea, by the height of the eye above it.', '25 m'),
+      profile: text('A table of azimuth and altitude beside the claim file.'),
+    }),
+  ],
+})
+
+const span = mapping('The span between both solstices: an angle, or three points.', {
+  angle: quantity('As measured.', '50°31′ ± 2′'),
+  from: text('The point one stands at.'),
+  june: text('The point one looks at for the june solstice.'),
+  december: text('The point one looks at for the december solstice.'),
+  horizons: mapping('The horizon at either end; or unknown.', {
+    june: horizon('Towards the june solstice.'),
+    december: horizon('Towards the december solstice.'),
+  }),
+})
+
+const sighted: Schema = {
+  description: 'What of a post or a gap is sighted; a plain word is of the far one.',
+  anyOf: [
+    word('Of the far one.', SIGHTED_WORDS),
+    mapping('Of both.', {
+      from: word('Of the near one.', SIGHTED_WORDS),
+      to: word('Of the far one.', SIGHTED_WORDS),
+    }),
+  ],
+}
 
 const sightline = mapping(
-  'A line: either from and to, or azimuth, or, for a target at noon or at a culmination, altitude.',
+  'A line: from and to, or azimuth, or altitude for a target on the meridian, or span for both solstices.',
   {
     from: text('The point one stands at.'),
     to: text('The point one looks at.'),
+    sighted,
     azimuth: quantity('Measured direction from true north through east.', '49°34′18″ ± 1′'),
     altitude: quantity('Apparent altitude measured on the meridian.', '31°12′ ± 10′'),
-    horizon: quantity('Apparent altitude of the horizon where the line meets it.', '1°30′ ± 2′', 'unknown'),
+    span,
+    horizon: horizon('Where the line meets the sky.'),
     target,
   },
 )
@@ -165,21 +271,9 @@ export const CLAIM_SCHEMA: Schema = {
         },
         ['name', 'latitude'],
       ),
-      north: {
-        description: 'How the plan’s north was found, and how well; or unknown.',
-        anyOf: [
-          { const: 'unknown' },
-          mapping(
-            'How north was found.',
-            {
-              from: word('The means.', ['compass', 'gps', 'sun', 'plan']),
-              uncertainty: quantity('One standard deviation.', '0.5°', 'unknown'),
-            },
-            ['from'],
-          ),
-        ],
-      },
-      points: names('The points of the plan, by name.', point),
+      north,
+      grid,
+      points,
       sightlines: names('The lines said to mark something, by name.', sightline),
       target,
       asserted_date: quantity(

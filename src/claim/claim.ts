@@ -9,7 +9,9 @@ export interface Claim {
   source: string | null
   structure: Structure
   north: North | Unstated
-  points: ReadonlyMap<string, LocalPoint>
+  /** The projected grid that points with an easting and a northing stand on, or that the plan's north is that of. */
+  grid: Grid | null
+  points: ReadonlyMap<string, Point>
   sightlines: readonly Sightline[]
   assertedDate: YearRange
   /** What the claim gives the builders, as an angle in arcminutes; 0 is `exact`. */
@@ -24,8 +26,17 @@ export interface Claim {
   tolerancesArcmin: readonly number[]
   /** Markdown, not yet parsed. */
   notes: string | null
+  /** The files beside the claim file that it names: points, skylines. */
+  attachments: readonly Attachment[]
   /** The file's content as plain JSON values, for the audit's echo. */
   echo: Readonly<Record<string, unknown>>
+}
+
+/** A file beside the claim file, as it was read. */
+export interface Attachment {
+  /** As the claim file writes it. */
+  path: string
+  sha256: string
 }
 
 export interface Structure {
@@ -37,35 +48,143 @@ export interface Structure {
   elevationM: number | Unstated
 }
 
-/** How the plan's north was found; its uncertainty is shared by every line between points. */
+/** How the north of the local plan was found; its uncertainty is shared by every line between local points. */
 export interface North {
-  from: 'compass' | 'gps' | 'sun' | 'plan'
+  from: 'compass' | 'gps' | 'sun' | 'star' | 'plan' | 'grid'
   uncertaintyDeg: number | Unstated
+  /**
+   * Of a compass: the plan's north is the needle's, by so much off true north (positive where it points east of it);
+   * `applied` where the surveyor has taken it off already; `of the date` where a model gives it for `date`.
+   */
+  declination: Measured | 'applied' | 'of the date' | null
+  /** Of a compass: the day of the survey. */
+  date: CalendarDate | null
+  /** Of grid north: by how much it lies east of true north, degrees; null: that of `grid` at the place. */
+  convergence: Measured | null
+  /** Of two GPS positions: how far they stood apart, and the standard deviation of each, metres. */
+  baselineM: number | null
+  accuracyM: number | null
 }
 
-/** A point on the local grid, metres; `uncertaintyM` is one standard deviation in each of east and north. */
+/** A day of the Gregorian calendar, UTC. */
+export interface CalendarDate {
+  year: number
+  /** 1 to 12. */
+  month: number
+  day: number
+  /** As the claim file writes it. */
+  text: string
+}
+
+/** A projected grid: a transverse Mercator projection, or nothing but how far its north is off. */
+export type Grid =
+  | { by: 'projection'; projection: GridProjection; name: string }
+  /** Grid north lies so much east of true north, degrees. */
+  | { by: 'convergence'; convergenceDeg: Measured }
+
+export interface GridProjection {
+  ellipsoid: EllipsoidName
+  centralMeridianDeg: number
+  latitudeOfOriginDeg: number
+  scale: number
+  falseEastingM: number
+  falseNorthingM: number
+}
+
+export type EllipsoidName =
+  | 'WGS84'
+  | 'GRS80'
+  | 'Airy 1830'
+  | 'Bessel 1841'
+  | 'Clarke 1866'
+  | 'Clarke 1880 (IGN)'
+  | 'International 1924'
+  | 'Krassovsky 1940'
+
+/** A point of the survey. `uncertaintyM` is one standard deviation in each of east and north. */
+export type Point = (LocalPoint | GeographicPoint | GridPoint) & {
+  uncertaintyM: number | Unstated
+  /** Height on the plan's or the map's own scale, metres; null where not given. */
+  upM: number | null
+  /** What stands there has a width across the line, metres: a post, or a gap between two; null: a point. */
+  breadth: { form: 'post' | 'gap'; widthM: number } | null
+}
+
+/** On the local plan, metres. */
 export interface LocalPoint {
+  by: 'plan'
   eastM: number
   northM: number
-  upM: number | null
-  uncertaintyM: number | Unstated
+  /** Where this one point of the plan is on the Earth, which ties the plan to points given so; null elsewhere. */
+  tie: { latitudeDeg: number; longitudeDeg: number } | null
+}
+
+/** On WGS84, degrees, north and east positive. */
+export interface GeographicPoint {
+  by: 'geographic'
+  latitudeDeg: number
+  longitudeDeg: number
+}
+
+/** On the claim's projected grid, metres. */
+export interface GridPoint {
+  by: 'grid'
+  eastingM: number
+  northingM: number
 }
 
 export interface Sightline {
   name: string
   direction: Direction
-  /** Apparent altitude of the horizon where the line meets it, degrees; not used where the line is an altitude. */
-  horizonDeg: Measured | Unstated
+  /** Where the line meets the sky; not used where the line is an altitude or a span. */
+  horizon: Horizon | Unstated
   target: Target
 }
 
-/** An azimuth, a line between two points, or, for a target on the meridian, an altitude. */
+/**
+ * An azimuth, a line between two points, an altitude for a target on the meridian, or, for a target of two solstices,
+ * the span between two lines from one place.
+ */
 export type Direction =
   | { by: 'azimuth'; azimuthDeg: Measured }
-  | { by: 'points'; from: string; to: string }
+  | { by: 'points'; from: string; to: string; sighted: { from: SightedPart; to: SightedPart } }
   | { by: 'altitude'; altitudeDeg: Measured }
+  | { by: 'span'; span: Span; horizons: { june: Horizon | Unstated; december: Horizon | Unstated } }
 
-export type Target = SunTarget | MoonTarget | StarTarget | StarPairTarget
+/** Of a post its axis or an edge, of a gap its middle or a side; left and right as one looks from `from` to `to`. */
+export type SightedPart = 'middle' | 'left' | 'right' | Unstated
+
+/** An angle as measured, degrees, or three points of one kind. */
+export type Span =
+  | { by: 'angle'; angleDeg: Measured }
+  | { by: 'points'; from: string; june: string; december: string }
+
+export type Horizon =
+  /** Its apparent altitude, degrees. */
+  | { by: 'altitude'; altitudeDeg: Measured }
+  /** How far it is and how much it stands above the eye, metres. */
+  | { by: 'distance'; distanceM: Measured; riseM: Measured }
+  /** A point of the survey with a height, seen from the line's first point. */
+  | { by: 'point'; point: string }
+  /** The open sea, from a height of the eye in metres. */
+  | { by: 'sea'; eyeM: Measured }
+  | { by: 'profile'; file: string; nodes: readonly SkylineNode[] }
+
+/** A place of a skyline: azimuth from true north through east and apparent altitude, degrees. */
+export interface SkylineNode {
+  azimuthDeg: number
+  altitudeDeg: number
+  sdDeg: number | Unstated
+}
+
+export type Target = SunTarget | SolsticeSpanTarget | MoonTarget | StarTarget | StarPairTarget
+
+/** The Sun at both solstices of a year: what the span between two lines from one place is held against. */
+export interface SolsticeSpanTarget {
+  body: 'sun at both solstices'
+  at: 'rising' | 'setting'
+  disc: Disc | Unstated
+}
 
 export type Solstice = 'june solstice' | 'december solstice'
 

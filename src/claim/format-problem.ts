@@ -7,16 +7,18 @@ import { withLineFeeds } from './read/line-ends.ts'
 /**
  * Prints a problem for a terminal: `file:line:column: error: message`, then the line it stands on, cut to
  * 80 columns around the marked place, with carets below it, and what to write instead. Lines and columns
- * count from 1, columns in characters.
+ * count from 1, columns in characters. A problem of a file beside `file` is printed with the name and a line of that.
  */
 export function formatProblem(
   problem: Problem,
-  text: string,
-  file: string,
+  ownText: string,
+  ownFile: string,
   options: { color?: boolean } = {},
 ): string {
   const colors = pc.createColors(options.color ?? false)
-  const { severity, message, path, expected, suggestion } = problem
+  const { severity, message, path, expected, suggestion, beside } = problem
+  const text = beside?.text ?? ownText
+  const file = beside === undefined ? ownFile : ownFile.replace(/[^/\\]*$/, '') + beside.path
   const { line, column } = positionOf(text, problem.offset)
   const paint = severity === 'error' ? colors.red : colors.yellow
   const place = colors.bold(`${visibleControls(file)}:${line}:${column}:`)

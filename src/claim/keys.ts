@@ -1,10 +1,7 @@
 import type { Target } from './claim.ts'
 
-/**
- * What this version does with a key. `later`: the file format has it, this version does not read it, and
- * a claim cannot be audited without it (an error). `unused`: it can be left aside (a warning).
- */
-export type KeyUse = 'required' | 'optional' | 'unused' | 'later'
+/** What this version does with a key. `unused`: the file format has it, and it can be left aside (a warning). */
+export type KeyUse = 'required' | 'optional' | 'unused'
 
 /** The keys a mapping may have, in the order they are named to people. */
 export type KeyTable = Readonly<Record<string, KeyUse>>
@@ -16,6 +13,7 @@ export const KEYS = {
     source: 'optional',
     structure: 'required',
     north: 'optional',
+    grid: 'optional',
     points: 'optional',
     sightlines: 'required',
     target: 'optional',
@@ -34,27 +32,70 @@ export const KEYS = {
     lines_tried: 'unused',
   },
   structure: { name: 'required', latitude: 'required', longitude: 'optional', elevation: 'optional' },
-  north: { from: 'required', uncertainty: 'optional' },
-  point: {
-    east: 'required',
-    north: 'required',
-    up: 'optional',
+  /** All but `from` and `uncertainty` belong to one way of finding north. */
+  north: {
+    from: 'required',
     uncertainty: 'optional',
-    latitude: 'later',
-    longitude: 'later',
-    elevation: 'later',
-    easting: 'later',
-    northing: 'later',
+    date: 'optional',
+    declination: 'optional',
+    baseline: 'optional',
+    accuracy: 'optional',
+    convergence: 'optional',
+  },
+  /** Has a zone, all of a projection, or a convergence. */
+  grid: {
+    zone: 'optional',
+    central_meridian: 'optional',
+    latitude_of_origin: 'optional',
+    scale: 'optional',
+    false_easting: 'optional',
+    false_northing: 'optional',
+    ellipsoid: 'optional',
+    convergence: 'optional',
+  },
+  /** Beside the points, by plain values. */
+  pointSettings: { file: 'optional', uncertainty: 'optional' },
+  /** Has the two coordinates of one kind. */
+  point: {
+    east: 'optional',
+    north: 'optional',
+    up: 'optional',
+    latitude: 'optional',
+    longitude: 'optional',
+    easting: 'optional',
+    northing: 'optional',
+    elevation: 'optional',
+    uncertainty: 'optional',
+    width: 'optional',
+    form: 'optional',
   },
   sightline: {
     from: 'optional',
     to: 'optional',
+    sighted: 'optional',
     azimuth: 'optional',
     altitude: 'optional',
+    span: 'optional',
     horizon: 'optional',
     target: 'optional',
-    angle: 'later',
-    span: 'later',
+  },
+  sighted: { from: 'optional', to: 'optional' },
+  /** Has an angle, or three points. */
+  span: {
+    angle: 'optional',
+    from: 'optional',
+    june: 'optional',
+    december: 'optional',
+    horizons: 'optional',
+  },
+  spanHorizons: { june: 'optional', december: 'optional' },
+  /** Has one form: distance and rise, or one of the others. */
+  horizon: {
+    distance: 'optional',
+    rise: 'optional',
+    point: 'optional',
+    sea: 'optional',
+    profile: 'optional',
   },
   /** Has an event or a day. */
   sunTarget: {
@@ -65,6 +106,7 @@ export const KEYS = {
     at: 'required',
     disc: 'optional',
   },
+  spanTarget: { body: 'required', event: 'required', at: 'required', disc: 'optional' },
   moonTarget: { body: 'required', event: 'required', at: 'required', disc: 'optional' },
   starTarget: { body: 'required', at: 'required', altitude: 'optional' },
   starPairTarget: { bodies: 'required', event: 'required', above: 'optional' },
@@ -98,6 +140,23 @@ export const EXAMPLES: Readonly<Record<string, string>> = {
   from: 'from: compass',
   east: 'east: 84.65 m',
   north: 'north: 53.09 m',
+  longitude: 'longitude: 23°05′ E',
+  easting: 'easting: 273741.297 m',
+  northing: 'northing: 5796489.777 m',
+  grid: 'grid: {zone: UTM 55 S}, or its projection, or its convergence',
+  baseline: 'baseline: 60 m',
+  accuracy: 'accuracy: 2 cm',
+  central_meridian: 'central_meridian: 2° W',
+  latitude_of_origin: 'latitude_of_origin: 49° N',
+  scale: 'scale: 0.9996',
+  false_easting: 'false_easting: 400 km',
+  false_northing: 'false_northing: -100 km',
+  ellipsoid: 'ellipsoid: Airy 1830',
+  distance: 'distance: 8 km ± 100 m',
+  rise: 'rise: 120 m ± 5 m',
+  span: 'span: {angle: 50°31′ ± 2′}',
+  june: 'june: the point at the june solstice',
+  december: 'december: the point at the december solstice',
   body: 'body: sun, body: moon, body: Sirius, or bodies: [Kochab, Mizar]',
   event: 'event: june solstice',
   at: 'at: rising',
@@ -105,15 +164,10 @@ export const EXAMPLES: Readonly<Record<string, string>> = {
   date: 'date: 800 to 500 BCE',
 }
 
-/** What to write in place of a mapping's keys that this version does not read. */
-export const INSTEAD: Readonly<Partial<Record<keyof typeof KEYS, string>>> = {
-  point: 'points on a local grid in metres: {east: 84.65 m, north: 53.09 m, uncertainty: 5 cm}',
-  sightline: 'a line from point to point, {from: …, to: …}, or {azimuth: 49°34′18″ ± 1′}, with its horizon',
-}
-
 /** A target of each kind, as it is written. */
 export const TARGET_EXAMPLES = {
   sun: '{body: sun, event: june solstice, at: rising, disc: upper limb}',
+  'sun at both solstices': '{body: sun, event: june to december solstice, at: rising, disc: centre}',
   moon: '{body: moon, event: northern major standstill, at: rising}',
   star: '{body: Sirius, at: rising, altitude: 3° ± 0.5°}',
   'two stars': '{bodies: [Kochab, Mizar], event: one above the other}',

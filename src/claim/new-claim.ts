@@ -21,28 +21,63 @@ claim: The doorway of the Oskendale round house frames midwinter sunset, so it w
 structure:
   name: Oskendale round house
   latitude: 54°21′40″ N
-  # Nothing is computed from the longitude yet.
+  # Needed where a compass is to be corrected for the date of its survey.
   #longitude: 2°48′ W
   # Height above sea level; the air pressure follows from it.
   elevation: 210 m
 
-# Points of the plan on a local grid: metres east and north of any origin. "up" is the height of
-# the point, "uncertainty" one standard deviation in each direction.
+# Points of the plan: metres east and north of any origin. "up" is the height of the point above that
+# origin, "uncertainty" one standard deviation in each direction; one for all points that state none
+# may stand beside them. More points can come from a table beside this file:
+#   points: {file: survey.csv, uncertainty: 5 cm}
+# with the columns name, east, north (metres), or name, latitude, longitude (degrees), or name, easting,
+# northing; up or elevation, uncertainty, width and form may follow.
 points:
   hearth: {east: 0 m, north: 0 m, uncertainty: 5 cm}
   door-post: {east: -6.61 m, north: -6.58 m, uncertainty: 5 cm}
   #step: {east: -3 m, north: -2.5 m, up: 0.2 m, uncertainty: unknown}
+  # What has a width across the line is a post or a gap:
+  #entrance: {east: -6.61 m, north: -5.93 m, width: 1.3 m, form: gap}
+  # Points far off may be in latitude and longitude (WGS 84), or on a projected grid (see "grid"). One
+  # point of the plan with a latitude and longitude besides ties the plan to them:
+  #corner: {east: 2 m, north: 0 m, latitude: 54°21′40.0″ N, longitude: 2°48′00.0″ W}
+  #cairn: {latitude: 54°19′21.5″ N, longitude: 2°52′04.2″ W, elevation: 531 m, uncertainty: 5 m}
+  #trig-pillar: {easting: 510702.4 m, northing: 6021815.2 m, elevation: 402.1 m}
 
-# How the plan's north was found (compass, gps, sun, plan) and how well; or just: north: unknown
-north: {from: compass, uncertainty: 0.5°}
+# The grid of points with an easting and a northing: a zone of UTM, N or S of the equator, on WGS84 or
+# another ellipsoid, such as {zone: UTM 30 N, ellipsoid: GRS80}; or the whole projection,
+#   {central_meridian: 2° W, latitude_of_origin: 49° N, scale: 0.9996012717, false_easting: 400 km,
+#   ellipsoid: Airy 1830, false_northing: -100 km},
+# or no more than by how much its north lies off true north, {convergence: 1°35′ W ± 1′}.
+#grid: {zone: UTM 30 N}
+
+# How the plan's north was found and how well. Of a compass: the date of the survey, or the declination
+# taken off ("applied"), or to be taken off ("declination: 3°20′ W ± 10′"). Other ways:
+#   north: {from: gps, baseline: 60 m, accuracy: 2 cm}     two receivers so far apart
+#   north: {from: sun}   north: {from: star}   north: {from: plan}   north: {from: grid, convergence: 1°35′ W}
+#   north: {from: compass, date: 12 June 2019}   north: unknown
+north: {from: compass, declination: applied, uncertainty: 0.5°}
 
 # The lines said to mark something, each with a name: from one point to another, or as a measured
 # azimuth (from true north through east). "horizon" is the altitude of the skyline there as the
 # eye sees it.
 sightlines:
   doorway: {from: hearth, to: door-post, horizon: 1°10′ ± 5′}
+  # Of a post or a gap it may be told what of it is sighted: axis, left edge, right edge (of a post); middle,
+  # left side, right side (of a gap), as one looks along the line; or both ends: {from: …, to: …}.
+  #jamb: {from: hearth, to: entrance, sighted: left side}
+  # The skyline may be told by its distance and how much it rises above the eye; by a point with a height;
+  # as the open sea, from a height of the eye; or by a table beside this file with the columns azimuth,
+  # altitude, uncertainty in degrees: horizon: {profile: skyline.csv}
+  #pass: {azimuth: 223°40′ ± 10′, horizon: {distance: 8 km ± 100 m, rise: 120 m ± 5 m}}
+  #fell: {from: trig-pillar, to: cairn, horizon: {point: cairn}}
+  #shore: {azimuth: 228°30′ ± 10′, horizon: {sea: 25 m}}
   #measured: {azimuth: 225°08′ ± 10′, horizon: unknown}
   # A line may have a target of its own. One example of each kind:
+  # - both solstices, between which an angle is measured, or lie two points seen from a third:
+  #   span: {from: hearth, june: gate, december: door-post}
+  #both: {span: {angle: 88°10′ ± 5′, horizons: {june: 1°30′ ± 2′, december: unknown}},
+    #target: {body: sun, event: june to december solstice, at: rising}}
   # - an equinox; "sense" is declination zero, midway in days, midway in direction, or unknown:
   #window: {azimuth: 90°40′ ± 10′, target: {body: sun, event: equinox, sense: unknown, at: rising}}
   # - a day counted from a solstice, after or before it; several make a calendar:

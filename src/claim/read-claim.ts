@@ -2,13 +2,16 @@ import { isMap, type Node } from 'yaml'
 import type { Problem } from '../quantity/problem.ts'
 import type { Claim } from './claim.ts'
 import { KEYS } from './keys.ts'
+import { checkPoints } from './read/check-points.ts'
 import { echoNode } from './read/echo.ts'
-import { type Context, type Field, isEmpty, reportError, reportWarning } from './read/field.ts'
+import { type Context, type Field, isEmpty, peek, reportError } from './read/field.ts'
+import { limitProblems } from './read/limit-problems.ts'
 import { parseYaml } from './read/parse-yaml.ts'
 import { readAtmosphere } from './read/read-atmosphere.ts'
 import { readClaimed } from './read/read-claimed.ts'
 import { readDate, readOtherDates, readWindow, warnOutsideWindow } from './read/read-dates.ts'
 import { readFormula } from './read/read-formula.ts'
+import { readGrid } from './read/read-grid.ts'
 import { type Fields, readMapping } from './read/read-mapping.ts'
 import { readNorth } from './read/read-north.ts'
 import { readPoints } from './read/read-points.ts'
@@ -17,46 +20,56 @@ import { readSightlines } from './read/read-sightlines.ts'
 import { readStructure } from './read/read-structure.ts'
 import { readTarget } from './read/read-target.ts'
 import { readNotes, readText } from './read/read-text.ts'
-import type { StarFinder } from './star-finder.ts'
+import { warnFarGrid } from './read/warn-far-grid.ts'
+import { warnUnusedGrid, warnUnusedNorth } from './read/warn-unused.ts'
+import type { ReadingHelp } from './reading-help.ts'
 
-const MOST_PROBLEMS = 100
 /** What is wrong with keys is so whatever their values are. */
 const OF_KEYS: ReadonlySet<string> = new Set(['unknown-key', 'duplicate-key', 'missing-key'])
 
 type FileFields = Fields<keyof typeof KEYS.file>
 
-/** What reading a claim needs to know of the sky. */
-export interface ReadingHelp {
-  findStar: StarFinder
-}
-
 /**
  * Reads a claim file. All problems of the file come at once, in the order of the text; the claim is null
  * exactly where one of them is an error. Never throws.
  */
-export function readClaim(
-  text: string,
-  { findStar }: ReadingHelp,
-): { claim: Claim | null; problems: Problem[] } {
+export function readClaim(text: string, help: ReadingHelp): { claim: Claim | null; problems: Problem[] } {
   const yaml = parseYaml(text)
   const problems = [...yaml.problems]
   const content: Problem[] = []
   const context: Context = {
     text,
-    findStar,
+    findStar: help.findStar,
+    beside: {
+      read: help.readBeside ?? (() => ({ trouble: 'no other files can be read here' })),
+      attachments: new Map(),
+      skylines: new Map(),
+    },
     lineOf: yaml.lineOf,
     report: (problem) => content.push(problem),
   }
-  const claim = readRoot(yaml.root, context, problems.length > 0)
+  const claim = readRoot(yaml.root, help, context, problems.length > 0)
   // Behind a break of syntax keys may have been taken for others, and some for missing.
-  const isSound = ({ code, offset }: Problem) => code !== 'missing-key' && offset < yaml.soundUntil
+  const isSound = (problem: Problem) => problem.code !== 'missing-key' && placeOf(problem) < yaml.soundUntil
   const told = content.filter(
-    ({ code, offset }) => OF_KEYS.has(code) || !yaml.mendedLines.has(yaml.lineOf(offset)),
+    (problem) => OF_KEYS.has(problem.code) || !yaml.mendedLines.has(yaml.lineOf(placeOf(problem))),
   )
   problems.push(...(yaml.soundUntil === Number.POSITIVE_INFINITY ? told : told.filter(isSound)))
   const isUsable = problems.every(({ severity }) => severity === 'warning')
-  const inside = problems.map((problem) => clipped(problem, text)).sort((a, b) => a.offset - b.offset)
-  return { claim: isUsable ? claim : null, problems: limited(inside) }
+  const inside = problems.map((problem) => clipped(problem, problem.beside?.text ?? text)).sort(inOrder)
+  return { claim: isUsable ? claim : null, problems: limitProblems(inside) }
+}
+
+/** Where in the claim file a problem belongs: one of a file beside it where that is named. */
+function placeOf({ beside, offset }: Problem): number {
+  return beside?.namedAt ?? offset
+}
+
+/** What is wrong in a file beside the claim file follows what is wrong with its name. */
+function inOrder(a: Problem, b: Problem): number {
+  if (placeOf(a) !== placeOf(b)) return placeOf(a) - placeOf(b)
+  if ((a.beside === undefined) !== (b.beside === undefined)) return a.beside === undefined ? -1 : 1
+  return a.offset - b.offset
 }
 
 /** Marks at least one character, inside the text: something missing at its end is told of behind the last one. */
@@ -65,32 +78,12 @@ function clipped(problem: Problem, text: string): Problem {
   return { ...problem, offset, length: Math.max(1, Math.min(problem.length, text.length - offset)) }
 }
 
-/** A file that is no claim at all would have thousands. */
-function limited(problems: Problem[]): Problem[] {
-  const rest = problems.slice(MOST_PROBLEMS)
-  const [next] = rest
-  if (next === undefined) return problems
-  const severity = rest.some((problem) => problem.severity === 'error') ? 'error' : 'warning'
-  const message = `the file has ${rest.length} more problems from here on`
-  const expected = 'a file with fewer: put the first ones right'
-  const last: Problem = {
-    ...next,
-    severity,
-    code: 'too-many-problems',
-    message,
-    expected,
-    suggestion: null,
-    path: null,
-  }
-  return [...problems.slice(0, MOST_PROBLEMS), last]
-}
-
-function readRoot(root: Node | null, context: Context, isBroken: boolean): Claim | null {
+function readRoot(root: Node | null, help: ReadingHelp, context: Context, isBroken: boolean): Claim | null {
   const start = root?.range?.[0] ?? 0
   const file: Field = { name: 'the file', path: '', keyAt: { offset: start, length: 1 }, node: root }
   if (isMap(root)) {
     const fields = readMapping(file, KEYS.file, context)
-    return fields === null ? null : assemble(fields, root, context)
+    return fields === null ? null : assemble(fields, root, help, context)
   }
   const expected = 'keys with values; `datestone new FILE` writes a file to fill in'
   if (!isEmpty(file))
@@ -100,20 +93,12 @@ function readRoot(root: Node | null, context: Context, isBroken: boolean): Claim
   return null
 }
 
-function assemble(fields: FileFields, root: Node, context: Context): Claim | null {
+function assemble(fields: FileFields, root: Node, help: ReadingHelp, context: Context): Claim | null {
   const statement = readText(fields.get('claim'), context)
   const structure = readStructure(fields.get('structure'), context)
-  const points = readPoints(fields.get('points'), context)
-  const around = {
-    points,
-    hasPoints: fields.has('points'),
-    shared: readTarget(fields.get('target'), context),
-    hasShared: fields.has('target'),
-  }
-  const sightlines = readSightlines(fields.get('sightlines'), around, context)
+  const survey = readSurvey(fields, structure, help, context)
+  const { grid, north, points, sightlines } = survey
   const dates = readDates(fields, context)
-  const north = readNorth(fields.get('north'), context)
-  warnUnusedNorth(fields.get('north'), sightlines, context)
   const others = {
     source: readText(fields.get('source'), context),
     assumedPrecisionArcmin: readAssumedPrecision(fields.get('assumed_precision'), context),
@@ -125,23 +110,53 @@ function assemble(fields: FileFields, root: Node, context: Context): Claim | nul
     notes: readNotes(fields.get('notes'), context),
   }
   if (statement === null || structure === null || dates.assertedDate === null) return null
-  const soundPoints = new Map(
-    [...(points ?? [])].flatMap(([name, point]) => (point === null ? [] : [[name, point]])),
+  const soundPoints = [...points.byName].flatMap(([name, { point }]) =>
+    point === null ? [] : [[name, point] as const],
   )
+  const attachments = [...context.beside.attachments].map(([path, sha256]) => ({ path, sha256 }))
   const echo = echoNode(root) as Claim['echo']
   const { assertedDate, otherDates, window } = dates
   return {
     statement,
     structure,
     north,
-    points: soundPoints,
+    grid,
+    points: new Map(soundPoints),
     sightlines,
     assertedDate,
     otherDates,
     window,
     ...others,
+    attachments,
     echo,
   }
+}
+
+/** Reads the points, what they stand on, and the lines. */
+function readSurvey(
+  fields: FileFields,
+  structure: Claim['structure'] | null,
+  { magneticDates }: ReadingHelp,
+  context: Context,
+) {
+  const grid = readGrid(fields.get('grid'), context)
+  const points = readPoints(fields.get('points'), fields.has('points'), context)
+  const hasGrid = fields.has('grid')
+  checkPoints(points, { grid, hasGrid, structure })
+  warnFarGrid(fields.get('grid'), grid, structure, context)
+  const shared = readTarget(fields.get('target'), context)
+  const around = { points, grid, hasGrid, shared, hasShared: fields.has('target') }
+  const sightlines = readSightlines(fields.get('sightlines'), around, context)
+  const place = fields.get('structure')
+  const hasLongitude = place === undefined || structure === null || peek(place, 'longitude') !== null
+  const north = readNorth(fields.get('north'), { hasGrid, hasLongitude, magneticDates }, context)
+  const lines = fields.get('sightlines')?.node
+  // A line that could not be read may be the one that uses them.
+  if (isMap(lines) && lines.items.length === sightlines.length) {
+    warnUnusedNorth(fields.get('north'), sightlines, points, context)
+    warnUnusedGrid(fields.get('grid'), { sightlines, points, north }, context)
+  }
+  return { grid, points, sightlines, north }
 }
 
 function readDates(fields: FileFields, context: Context) {
@@ -156,14 +171,4 @@ function readDates(fields: FileFields, context: Context) {
     for (const { date, field } of others) warnOutsideWindow(date, field, window, context)
   }
   return { window, assertedDate, otherDates: others.map(({ label, date }) => ({ label, date })) }
-}
-
-function warnUnusedNorth(field: Field | undefined, sightlines: Claim['sightlines'], context: Context): void {
-  const isUsed = sightlines.some(({ direction }) => direction.by === 'points')
-  if (field === undefined || isUsed || sightlines.length === 0) return
-  const isDirection = sightlines.some(({ direction }) => direction.by === 'azimuth')
-  reportWarning(context, field, 'unused-key', '`north` is not used: no sightline runs between points', {
-    expected: isDirection ? 'the uncertainty of north as part of the ± of each azimuth' : 'a file without it',
-    at: field.keyAt,
-  })
 }

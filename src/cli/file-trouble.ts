@@ -12,6 +12,11 @@ const MEANINGS: Readonly<Record<string, string>> = {
 
 /** One line for stderr about a file that could not be read or written. */
 export function fileTrouble(error: unknown, deed: 'read' | 'write', path: string): string {
+  return `datestone: cannot ${deed} ${path}: ${meaningOf(error)}\n`
+}
+
+/** What a system error means to a person: `there is no such file or folder`. */
+export function meaningOf(error: unknown): string {
   const { code, message } = error as NodeJS.ErrnoException
-  return `datestone: cannot ${deed} ${path}: ${(code && MEANINGS[code]) ?? message}\n`
+  return (code && MEANINGS[code]) ?? message
 }

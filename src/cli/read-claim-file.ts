@@ -1,12 +1,16 @@
 import { createHash } from 'node:crypto'
+import { readFileSync, statSync } from 'node:fs'
 import { readFile } from 'node:fs/promises'
+import { dirname, join } from 'node:path'
+import { MAGNETIC_DATES } from '../audit/magnetic-dates.ts'
 import { findStar } from '../audit/star-names.ts'
 import type { Claim } from '../claim/claim.ts'
-import { formatProblem } from '../claim/format-problem.ts'
+import { formatProblem, positionOf } from '../claim/format-problem.ts'
 import { readClaim } from '../claim/read-claim.ts'
+import type { BesideReader } from '../claim/reading-help.ts'
 import type { Problem } from '../quantity/problem.ts'
 import { type Console, EXIT } from './console.ts'
-import { fileTrouble } from './file-trouble.ts'
+import { fileTrouble, meaningOf } from './file-trouble.ts'
 
 export interface ClaimFile {
   claim: Claim
@@ -23,17 +27,43 @@ export async function readClaimFile(path: string, console: Console): Promise<Cla
     console.stderr.write(fileTrouble(error, 'read', path))
     return { status: EXIT.fileTrouble }
   }
-  const text = new TextDecoder('utf-8', { ignoreBOM: false }).decode(bytes)
-  const { claim, problems } = readClaim(text, { findStar })
+  const text = textOf(bytes)
+  const help = { findStar, readBeside: readerBeside(path), magneticDates: MAGNETIC_DATES }
+  const { claim, problems } = readClaim(text, help)
   for (const problem of problems) console.stderr.write(`${formatProblem(problem, text, path, console)}\n`)
   if (claim === null) return { status: EXIT.claimHasErrors }
   return {
     claim,
-    sha256: createHash('sha256').update(bytes).digest('hex'),
+    sha256: sha256Of(bytes),
     warnings: problems.filter(({ severity }) => severity === 'warning').map(warningOf),
   }
 }
 
-function warningOf({ path, message }: Problem): string {
-  return path === null ? message : `${path}: ${message}`
+/** Reads files in the folder of a claim file, for the reader of claims. */
+function readerBeside(claimPath: string): BesideReader {
+  return (path) => {
+    const place = join(dirname(claimPath), path)
+    try {
+      const found = statSync(place)
+      // A pipe or a device might be read without end; of a folder the system says so itself.
+      if (!found.isFile() && !found.isDirectory()) return { trouble: 'it is not a plain file' }
+      const bytes = readFileSync(place)
+      return { text: textOf(bytes), sha256: sha256Of(bytes) }
+    } catch (error) {
+      return { trouble: meaningOf(error) }
+    }
+  }
+}
+
+function textOf(bytes: Buffer): string {
+  return new TextDecoder('utf-8', { ignoreBOM: false }).decode(bytes)
+}
+
+function sha256Of(bytes: Buffer): string {
+  return createHash('sha256').update(bytes).digest('hex')
+}
+
+function warningOf({ path, message, beside, offset }: Problem): string {
+  const place = beside === undefined ? path : `${beside.path}, line ${positionOf(beside.text, offset).line}`
+  return place === null ? message : `${place}: ${message}`
 }

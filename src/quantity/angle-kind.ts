@@ -9,8 +9,12 @@ export interface AngleKind {
   limits: string
   /** The compass letters that may stand beside it: the positive one, then the negative one. */
   letters: readonly [string, string] | null
+  /** One of its letters has to stand there: without it the sign could be meant either way. */
+  needsLetter?: boolean
   /** The unit to suggest where a bare number is written. */
   usualUnit: '°' | '′'
+  /** A bare number is in degrees: in tables the heading has said so. */
+  takesBareDegrees?: boolean
 }
 
 export const LATITUDE: AngleKind = {

@@ -66,7 +66,7 @@ export function diagnoseAngle(text: string, plain: string, kind: AngleKind): Rea
     const match = pattern.exec(value)
     if (match === null) continue
     const repaired = repair?.(match.slice(1), kind).replace(/^[-–]/, '−') ?? null
-    const suggestion = repaired === null || letter === null ? repaired : `${repaired} ${letter}`
+    const suggestion = repaired === null ? null : withLetter(repaired, letter, kind)
     return misread(code, `${quoted(text.trim())} ${complaint}`, trimmedStretch(text), {
       expected,
       suggestion,
@@ -75,6 +75,12 @@ export function diagnoseAngle(text: string, plain: string, kind: AngleKind): Rea
   return misread('not-readable', `${quoted(text.trim())} is not ${kind.name}`, trimmedStretch(text), {
     expected,
   })
+}
+
+function withLetter(repaired: string, letter: string | null, { needsLetter, letters }: AngleKind): string {
+  if (letter !== null) return `${repaired} ${letter}`
+  if (needsLetter !== true || letters === null) return repaired
+  return letters.map((either) => `${repaired.replace(/^[−+]/, '')} ${either}`).join(' or ')
 }
 
 /** `41.27N` and `N 41 16` are what they are without their letter; a letter of another angle stays. */

@@ -18,4 +18,15 @@ export interface Problem {
   offset: number
   /** Length of the marked stretch, in UTF-16 units; at least 1. */
   length: number
+  /** Where it stands in a file beside the one that was read: `offset` and `length` are of this file's text. */
+  beside?: FileBeside
+}
+
+/** A file that the text names. */
+export interface FileBeside {
+  /** As the text writes it, relative to the folder of the text's own file. */
+  path: string
+  text: string
+  /** Offset in the text of the place that names it. */
+  namedAt: number
 }

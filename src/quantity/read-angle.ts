@@ -22,6 +22,10 @@ const WITH_UNITS = new RegExp(
     String.raw`(?:(?<seconds>${NUMBER})\s*${SECOND}\s*)?(?<trail>[NSEW])?\s*$`,
   'di',
 )
+const BARE = new RegExp(
+  String.raw`^\s*(?<lead>[NSEW])?\s*(?<sign>[-–+])?\s*(?<degrees>${NUMBER})\s*(?<trail>[NSEW])?\s*$`,
+  'di',
+)
 const THREE_GROUPS =
   /^\s*(?<lead>[NSEW])?\s*(?<sign>[-–+])?\s*(?<degrees>\d+) +(?<minutes>\d+) +(?<seconds>\d+(?:\.\d+)?)\s*(?<trail>[NSEW])?\s*$/di
 
@@ -33,7 +37,8 @@ const PARTS = [
 
 /**
  * Reads an angle in degrees as people print it: `49°34′18″`, `49 34 18`, `49.5717°`, `−0°12′`, `10′`, `30″`,
- * `41°16′12″ N`. A number without a unit is refused, except three groups, which are degrees, minutes, seconds.
+ * `41°16′12″ N`. A number without a unit is refused, except three groups, which are degrees, minutes, seconds, and
+ * where the kind takes bare degrees.
  */
 export function readAngle(text: string, kind: AngleKind): Reading<number> {
   return mapReading(readPrintedAngle(text, kind), ({ deg }) => deg)
@@ -42,12 +47,13 @@ export function readAngle(text: string, kind: AngleKind): Reading<number> {
 /** Like `readAngle`, and tells how finely the angle is printed. */
 export function readPrintedAngle(text: string, kind: AngleKind): Reading<PrintedAngle> {
   const plain = plainCharacters(text)
-  const match = matchAngle(plain)
+  const match = matchAngle(plain, kind)
   if (match === null) return diagnoseAngle(text, plain, kind)
   const size = sizeOf(match, text)
   if (!size.ok) return size
   const sign = signOf(match, text, kind)
   if (!sign.ok) return sign
+  if (kind.needsLetter === true && size.value.deg !== 0 && !hasLetter(match)) return letterMissing(text, kind)
   const deg = sign.value * size.value.deg
   if (deg >= kind.lowDeg && deg <= kind.highDeg)
     return { ok: true, value: { ...size.value, deg: deg === 0 ? 0 : deg } }
@@ -56,8 +62,9 @@ export function readPrintedAngle(text: string, kind: AngleKind): Reading<Printed
   })
 }
 
-function matchAngle(plain: string): RegExpExecArray | null {
-  const match = WITH_UNITS.exec(plain) ?? THREE_GROUPS.exec(plain)
+function matchAngle(plain: string, { takesBareDegrees = false }: AngleKind): RegExpExecArray | null {
+  const match =
+    WITH_UNITS.exec(plain) ?? THREE_GROUPS.exec(plain) ?? (takesBareDegrees ? BARE.exec(plain) : null)
   return match !== null && PARTS.some(({ part }) => match.groups?.[part] !== undefined) ? match : null
 }
 
@@ -93,6 +100,24 @@ function signOf(match: RegExpExecArray, text: string, kind: AngleKind): Reading<
       },
     )
   return { ok: true, value: letter === kind.letters[0] ? 1 : -1 }
+}
+
+function hasLetter({ groups }: RegExpExecArray): boolean {
+  return groups?.lead !== undefined || groups?.trail !== undefined
+}
+
+function letterMissing(text: string, kind: AngleKind) {
+  const [first, second] = kind.letters ?? ['E', 'W']
+  const size = text.trim().replace(/^[-–+−＋﹣－‐‑]\s*/u, '')
+  return misread(
+    'letter-missing',
+    `${quoted(text.trim())} does not say ${first} or ${second}`,
+    trimmedStretch(text),
+    {
+      expected: `${kind.name} such as ${kind.example}`,
+      suggestion: `${size} ${first} or ${size} ${second}`,
+    },
+  )
 }
 
 function wrongHemisphere(letter: string, text: string, place: Stretch, kind: AngleKind) {

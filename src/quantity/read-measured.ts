@@ -47,7 +47,8 @@ function withBothUnits(
   if (value.code !== 'unit-missing' || value.suggestion === null || sd.ok) return alone
   if (sd.misread.code !== 'tolerance-without-unit') return alone
   const bare = plainCharacters(text.slice(0, start)).trim()
-  const unit = /^[-–+]?[\d.]+$/.test(bare) ? value.suggestion.slice(bare.length) : null
+  const isOneUnit = /^[-–+]?[\d.]+$/.test(bare) && !value.suggestion.includes(' or ')
+  const unit = isOneUnit ? value.suggestion.slice(bare.length) : null
   const at = trimmedStretch(text)
   if (unit === null) return alone
   const suggestion = `${value.suggestion} ${text.slice(start).trim()}${unit}`

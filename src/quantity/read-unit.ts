@@ -19,7 +19,7 @@ export function readUnit(text: string, kind: UnitKind): Reading<number> {
     return misread('unexpected-tolerance', `${shown} states an uncertainty, which has no place here`, whole, {
       expected,
     })
-  if (unit === '')
+  if (unit === '' && !kind.units.has(''))
     return misread('unit-missing', `${shown} is a number without a unit`, whole, {
       expected,
       suggestion: withUsualUnit(sign, digits, kind),

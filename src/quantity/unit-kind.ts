@@ -5,7 +5,7 @@ export interface UnitKind {
   example: string
   /** The unit to suggest where none is written. */
   usualUnit: string
-  /** Each unit as written, in lower case, and how a number in it becomes one in the base unit. */
+  /** Each unit as written, in lower case, and how a number in it becomes one in the base unit; `''`: a bare number. */
   units: ReadonlyMap<string, (number: number) => number>
   low: number
   high: number
@@ -32,6 +32,11 @@ export const LENGTH: UnitKind = {
   low: -1e6,
   high: 1e6,
   limits: 'from −1000 km to 1000 km',
+}
+
+/** The same lengths where a heading has said that a bare number is in metres; other units may still be written. */
+export function inMetres(kind: UnitKind, example: string): UnitKind {
+  return { ...kind, example, usualUnit: 'm', units: new Map([...kind.units, ['', (metres) => metres]]) }
 }
 
 /** Height above sea level, metres: from the shore of the Dead Sea to the highest summit, rounded outwards. */

@@ -1,23 +1,33 @@
 import { describe, expect, test } from 'vitest'
 import { positionOf } from '../../src/claim/format-problem.ts'
 import { PROBLEM_CODES } from '../../src/claim/problem-codes.ts'
-import { BAD_INPUT } from './bad-input.ts'
+import { readClaim } from '../../src/claim/read-claim.ts'
+import { BAD_INPUT, type BadInput } from './bad-input.ts'
+import { findStar } from './find-star.ts'
 import { read } from './read.ts'
+import { BESIDE, SURVEY, SURVEY_AND_TABLE } from './survey.ts'
 import { THORNMERE, thornmereWith } from './thornmere.ts'
+
+/** The text that a problem stands in. */
+function textOf({ text, files, inFile }: BadInput): string {
+  return inFile === undefined ? text : (files?.[inFile] ?? '')
+}
 
 describe('each kind of bad input gives its problem, and no other', () => {
   test.each(BAD_INPUT.map((bad) => [bad.what, bad] as const))('%s', (_, bad) => {
-    const { claim, problems } = read(bad.text)
+    const { claim, problems } = read(bad.text, bad.files)
     const main = problems.find(({ code }) => code === bad.code)
     expect(problems.map(({ code }) => code).toSorted()).toEqual([bad.code, ...(bad.also ?? [])].toSorted())
     if (main === undefined) return
-    const { line, column } = positionOf(bad.text, main.offset)
+    const text = textOf(bad)
+    const { line, column } = positionOf(text, main.offset)
     expect({
       severity: main.severity,
       at: `${line}:${column}`,
-      marked: bad.text.slice(main.offset, main.offset + main.length),
+      marked: text.slice(main.offset, main.offset + main.length),
       message: main.message,
       path: main.path,
+      inFile: main.beside?.path,
       suggestion: main.suggestion,
     }).toEqual({
       severity: bad.severity ?? 'error',
@@ -25,6 +35,7 @@ describe('each kind of bad input gives its problem, and no other', () => {
       marked: bad.marked,
       message: bad.message,
       path: bad.path,
+      inFile: bad.inFile,
       suggestion: bad.suggestion ?? null,
     })
     expect(claim === null).toBe(bad.severity !== 'warning')
@@ -35,10 +46,15 @@ describe('a suggestion put in the place of what is marked puts the file right', 
   const curable = BAD_INPUT.filter(({ suggestion }) => suggestion !== undefined)
 
   test.each(curable.map((bad) => [bad.what, bad] as const))('%s', (_, bad) => {
-    const problem = read(bad.text).problems.find(({ code }) => code === bad.code)!
+    const problem = read(bad.text, bad.files).problems.find(({ code }) => code === bad.code)!
+    const text = textOf(bad)
     for (const cure of problem.suggestion!.split(' or ')) {
-      const cured = bad.text.slice(0, problem.offset) + cure + bad.text.slice(problem.offset + problem.length)
-      expect(read(cured).problems).toEqual([])
+      const cured = text.slice(0, problem.offset) + cure + text.slice(problem.offset + problem.length)
+      const { inFile } = bad
+      const again =
+        inFile === undefined ? read(cured, bad.files) : read(bad.text, { ...bad.files, [inFile]: cured })
+      // `UTM 34 N or UTM 34 S`: the one that is meant is on the side of the structure, the other gives a warning.
+      expect(again.problems.filter(({ code }) => code !== 'far-from-structure')).toEqual([])
     }
   })
 })
@@ -72,7 +88,8 @@ test('breaks of syntax are told in plain words, not in those of the library', ()
 test('every kind of problem is tried', () => {
   const tried = new Set<string>(BAD_INPUT.map(({ code }) => code))
   const untried = Object.keys(PROBLEM_CODES).filter((code) => !tried.has(code))
-  expect(untried).toEqual(['too-many-problems'])
+  // Both are tried below.
+  expect(untried.toSorted()).toEqual(['no-model', 'too-many-problems'])
 })
 
 test('a file with hundreds of problems lists the first hundred and counts the others', () => {
@@ -85,6 +102,46 @@ test('a file with hundreds of problems lists the first hundred and counts the ot
     code: 'too-many-problems',
     message: 'the file has 54 more problems from here on',
   })
+})
+
+test('a table with hundreds of problems lists the first twenty and counts the others, and hides nothing else', () => {
+  const rows = Array.from({ length: 150 }, (_, row) => `p${row},far,${row}\n`).join('')
+  const text = SURVEY_AND_TABLE.replace('at: rising}\nasserted', 'at: risng}\nasserted')
+  const { problems } = read(text, { ...BESIDE, 'survey.csv': `name,east,north\n${rows}` })
+  expect(problems).toHaveLength(22)
+  expect(problems[20]).toMatchObject({
+    code: 'too-many-problems',
+    message: '`survey.csv` has 130 more problems from here on',
+    beside: { path: 'survey.csv' },
+  })
+  expect(positionOf(problems[20]!.beside!.text, problems[20]!.offset).line).toBe(22)
+  expect(problems[21]).toMatchObject({ code: 'unknown-word', path: 'target.at' })
+})
+
+test('problems of a table stand where the claim file names it', () => {
+  const text = SURVEY_AND_TABLE.replace('{from: sun}', '{from: son}').replace('width: 60 cm', 'width: 60')
+  const { problems } = read(text, { ...BESIDE, 'survey.csv': 'name,east,north,hue\na,1,x,2\n' })
+  expect(problems.map(({ code, beside }) => [code, beside?.path])).toEqual([
+    ['unknown-word', undefined],
+    ['unknown-column', 'survey.csv'],
+    ['not-readable', 'survey.csv'],
+    ['unit-missing', undefined],
+  ])
+})
+
+test('a reader that is handed no files and no model of the Earth’s magnetism says so', () => {
+  const text = SURVEY.replace('{from: sun}', '{from: compass, date: 12 June 2019}')
+  const { claim, problems } = readClaim(text, { findStar })
+  expect(claim).toBeNull()
+  expect(problems).toMatchObject([
+    {
+      code: 'no-model',
+      path: 'north.date',
+      message: 'nothing here computes the declination of a compass on a date',
+      expected: 'declination: 3°20′ W ± 10′ beside it',
+    },
+    { code: 'file-not-read', message: '`skyline.csv` cannot be read: no other files can be read here' },
+  ])
 })
 
 describe('a colon in a text hides nothing else that is wrong', () => {

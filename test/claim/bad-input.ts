@@ -1,11 +1,22 @@
 import type { ProblemCode } from '../../src/claim/problem-codes.ts'
+import { BAD_GRIDS } from './bad-grids.ts'
+import { BAD_HORIZONS } from './bad-horizons.ts'
+import { BAD_NORTHS } from './bad-norths.ts'
+import { BAD_POINTS } from './bad-points.ts'
+import { BAD_SPANS } from './bad-spans.ts'
+import { BAD_TABLES } from './bad-tables.ts'
 import { BAD_TARGETS } from './bad-targets.ts'
+import type { Files } from './read.ts'
 import { THORNMERE, thornmereAnd, thornmereWith } from './thornmere.ts'
 
 /** A claim file with something wrong, and the problem it has to give. */
 export interface BadInput {
   what: string
   text: string
+  /** The files beside it. */
+  files?: Files
+  /** The one that the problem stands in, where it is not the claim file. */
+  inFile?: string
   code: ProblemCode
   severity?: 'warning'
   /** `line:column`, both from 1. */
@@ -843,44 +854,8 @@ const versions: BadInput[] = [
     severity: 'warning',
     at: '19:1',
     marked: 'north',
-    message: '`north` is not used: no sightline runs between points',
+    message: '`north` is not used: no sightline runs between points of the plan',
     path: 'north',
-  },
-  {
-    what: 'both solstices at once',
-    text: thornmereWith('june solstice', 'june to december solstice'),
-    code: 'not-in-this-version',
-    at: '13:28',
-    marked: 'june to december solstice',
-    message: 'this version does not compute `june to december solstice`',
-    path: 'target.event',
-  },
-  {
-    what: 'a horizon by distance',
-    text: thornmereWith('horizon: 1°30′ ± 2′', 'horizon: {distance: 8 km, rise: 120 m}'),
-    code: 'not-in-this-version',
-    at: '12:51',
-    marked: 'horizon',
-    message: 'this version does not read a horizon of this form',
-    path: 'sightlines.midsummer.horizon',
-  },
-  {
-    what: 'an angle between two lines',
-    text: thornmereWith(`from: hearthstone, ${TO}, horizon: 1°30′ ± 2′`, 'span: {angle: 50°31′ ± 2′}'),
-    code: 'not-in-this-version',
-    at: '12:15',
-    marked: 'span',
-    message: 'this version does not read `span` here',
-    path: 'sightlines.midsummer.span',
-  },
-  {
-    what: 'a point in latitude and longitude',
-    text: thornmereWith('{east: 0 m, north: 0 m, uncertainty: 3 cm}', '{latitude: 41° N}'),
-    code: 'not-in-this-version',
-    at: '9:17',
-    marked: 'latitude',
-    message: 'this version does not read `latitude` here',
-    path: 'points.hearthstone.latitude',
   },
 ]
 
@@ -1211,6 +1186,12 @@ export const BAD_INPUT: readonly BadInput[] = [
   ...dates,
   ...words,
   ...BAD_TARGETS,
+  ...BAD_NORTHS,
+  ...BAD_GRIDS,
+  ...BAD_POINTS,
+  ...BAD_TABLES,
+  ...BAD_HORIZONS,
+  ...BAD_SPANS,
   ...versions,
   ...yaml,
   ...files,

@@ -3,6 +3,7 @@ import { formatProblem, positionOf } from '../../src/claim/format-problem.ts'
 import type { Problem } from '../../src/quantity/problem.ts'
 import { BAD_INPUT } from './bad-input.ts'
 import { read } from './read.ts'
+import { BESIDE, SURVEY_AND_TABLE } from './survey.ts'
 import { thornmereWith } from './thornmere.ts'
 
 function problemAt(text: string, marked: string, more: Partial<Problem> = {}): Problem {
@@ -74,9 +75,37 @@ describe('lines and columns count from 1, columns in characters', () => {
   })
 })
 
+describe('a problem of a file beside the claim file', () => {
+  const { problems } = read(SURVEY_AND_TABLE, {
+    ...BESIDE,
+    'survey.csv': '\ufeffname,east,north\r\na,84.65,x\r\n',
+  })
+  const print = (file: string) => problems.map((problem) => formatProblem(problem, SURVEY_AND_TABLE, file))
+
+  test('is printed with the name of that file, in the folder of the claim file, and a line of it', () => {
+    expect(print('claims/ring.yaml')).toEqual([
+      [
+        'claims/survey.csv:2:9: error: `x` is not a place on the plan',
+        '  a,84.65,x',
+        '          ^',
+        '  field: points.a.north',
+        '  expected: a place on the plan such as 53.09',
+      ].join('\n'),
+    ])
+  })
+
+  test.each([
+    ['ring.yaml', 'survey.csv:2:9:'],
+    ['/a/b/ring.yaml', '/a/b/survey.csv:2:9:'],
+    ['C:\\a\\ring.yaml', 'C:\\a\\survey.csv:2:9:'],
+  ])('of %s', (file, place) => {
+    expect(print(file)[0]).toMatch(new RegExp(`^${place.replaceAll('\\', '\\\\')}`))
+  })
+})
+
 describe('the excerpt', () => {
   test.each(BAD_INPUT.map((bad) => [bad.what, bad] as const))('of %s fits in 80 columns', (_, bad) => {
-    for (const problem of read(bad.text).problems) {
+    for (const problem of read(bad.text, bad.files).problems) {
       const [, line = '', carets = ''] = formatProblem(problem, bad.text, 'f').split('\n')
       expect([...line].length).toBeLessThanOrEqual(80)
       expect([...carets].length).toBeLessThanOrEqual(80)

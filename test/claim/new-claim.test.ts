@@ -21,11 +21,11 @@ test('with every optional key in use it is sound too, but for the air that a ref
     'atmosphere.lapse',
   ])
   expect(new Set(problems.map(({ code }) => code))).toEqual(new Set(['unused-key']))
-  expect(claim?.points.size).toBe(3)
-  expect(claim?.sightlines).toHaveLength(9)
+  expect(claim?.points.size).toBe(7)
+  expect(claim?.sightlines).toHaveLength(14)
   const kinds = claim?.sightlines.map(({ target }) => ('event' in target ? target.event.name : target.body))
   expect(new Set(kinds)).toEqual(
-    new Set(['december solstice', 'equinox', 'day', 'moon', 'star', 'two stars']),
+    new Set(['december solstice', 'sun at both solstices', 'equinox', 'day', 'moon', 'star', 'two stars']),
   )
 })
 

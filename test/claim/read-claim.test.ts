@@ -32,15 +32,21 @@ describe('the example of the format', () => {
   })
 
   test('has two points and a line between them', () => {
+    const plain = { by: 'plan', tie: null, breadth: null }
     expect([...claim.points]).toEqual([
-      ['hearthstone', { eastM: 0, northM: 0, upM: null, uncertaintyM: 0.03 }],
-      ['east-pillar', { eastM: 84.65, northM: 53.09, upM: 0.4, uncertaintyM: 0.05 }],
+      ['hearthstone', { ...plain, eastM: 0, northM: 0, upM: null, uncertaintyM: 0.03 }],
+      ['east-pillar', { ...plain, eastM: 84.65, northM: 53.09, upM: 0.4, uncertaintyM: 0.05 }],
     ])
     expect(claim.sightlines).toEqual([
       {
         name: 'midsummer',
-        direction: { by: 'points', from: 'hearthstone', to: 'east-pillar' },
-        horizonDeg: { value: 1.5, sd: 2 * ARCMIN },
+        direction: {
+          by: 'points',
+          from: 'hearthstone',
+          to: 'east-pillar',
+          sighted: { from: 'omitted', to: 'omitted' },
+        },
+        horizon: { by: 'altitude', altitudeDeg: { value: 1.5, sd: 2 * ARCMIN } },
         target: {
           body: 'sun',
           event: { name: 'june solstice' },
@@ -52,7 +58,14 @@ describe('the example of the format', () => {
   })
 
   test('leaves the rest out, and nothing is filled in', () => {
-    expect(claim).toMatchObject({ north: 'omitted', window: 'omitted', formula: 'omitted', notes: null })
+    expect(claim).toMatchObject({
+      north: 'omitted',
+      grid: null,
+      attachments: [],
+      window: 'omitted',
+      formula: 'omitted',
+      notes: null,
+    })
     expect(claim.tolerancesArcmin).toEqual([])
     expect(new Set(Object.values(claim.atmosphere))).toEqual(new Set(['omitted']))
     expect(new Set(Object.values(claim.claimed))).toEqual(new Set([null]))
@@ -97,18 +110,19 @@ describe('unknown', () => {
       plausiblePrecision: 'unknown',
       structure: { elevationM: 'unknown' },
     })
-    expect(claim.sightlines[0]).toMatchObject({ horizonDeg: 'unknown', target: { disc: 'unknown' } })
+    expect(claim.sightlines[0]).toMatchObject({ horizon: 'unknown', target: { disc: 'unknown' } })
     expect(claim.points.get('hearthstone')?.uncertaintyM).toBe('unknown')
   })
 
   test('is told apart from what is left out', () => {
     const line = (horizon: string) => claimOf(thornmereWith(', horizon: 1°30′ ± 2′', horizon)).sightlines[0]
-    expect(line('')?.horizonDeg).toBe('omitted')
-    expect(line(', horizon: 1°30′')?.horizonDeg).toEqual({ value: 1.5, sd: 'omitted' })
-    expect(line(', horizon: 1°30′ ± unknown')?.horizonDeg).toEqual({ value: 1.5, sd: 'unknown' })
+    const altitude = (sd: string) => ({ by: 'altitude', altitudeDeg: { value: 1.5, sd } })
+    expect(line('')?.horizon).toBe('omitted')
+    expect(line(', horizon: 1°30′')?.horizon).toEqual(altitude('omitted'))
+    expect(line(', horizon: 1°30′ ± unknown')?.horizon).toEqual(altitude('unknown'))
     const north = claimOf(thornmereAnd('north: {from: plan, uncertainty: unknown}')).north
-    expect(north).toEqual({ from: 'plan', uncertaintyDeg: 'unknown' })
-    expect(claimOf(thornmereAnd('north: {from: GPS}')).north).toEqual({
+    expect(north).toMatchObject({ from: 'plan', uncertaintyDeg: 'unknown' })
+    expect(claimOf(thornmereAnd('north: {from: GPS}')).north).toMatchObject({
       from: 'gps',
       uncertaintyDeg: 'omitted',
     })
@@ -136,7 +150,7 @@ describe('the other keys', () => {
           sd: expect.closeTo((3 * ARCMIN) / Math.sqrt(3), 14),
         },
       },
-      horizonDeg: 'omitted',
+      horizon: 'omitted',
       target: {
         body: 'sun',
         event: { name: 'june solstice' },

@@ -9,6 +9,7 @@ import { THORNMERE, thornmereWith } from './thornmere.ts'
 
 const TARGET = '{body: sun, event: june solstice, at: rising, disc: upper limb}'
 const DIRECTION = '{azimuth: 57°54′ ± 1′, horizon: 1°30′ ± 2′}'
+const SPAN = '{span: {angle: 50°31′ ± 2′}}'
 const ALTITUDE = '{altitude: 31°12′ ± 10′}'
 
 /** The only line of a file in which nothing is wrong or doubtful. */
@@ -48,7 +49,7 @@ describe('the Sun', () => {
     expect(lineOf('{body: sun, event: june solstice, at: noon}', ALTITUDE)).toEqual({
       name: 'midsummer',
       direction: { by: 'altitude', altitudeDeg: { value: 31.2, sd: 10 / 60 } },
-      horizonDeg: 'omitted',
+      horizon: 'omitted',
       target: { body: 'sun', event: { name: 'june solstice' }, at: 'noon', disc: 'omitted' },
     })
     expect(targetOf('{body: sun, event: equinox, at: noon, disc: centre}', '{altitude: -2°}')).toMatchObject({
@@ -192,19 +193,20 @@ describe('every combination of words that the schema allows is read', () => {
     return events.flatMap((what) => places.map((where) => `{${who}${what}${where}}`))
   })
 
-  test('there are 25 of them', () => {
-    // 4 events of the Sun at 3 places, 4 of the Moon at 2, a star at 4, two stars in 1 way.
-    expect(combinations).toHaveLength(12 + 8 + 4 + 1)
+  test('there are 27 of them', () => {
+    // 4 events of the Sun at 3 places, both solstices at 2, 4 of the Moon at 2, a star at 4, two stars in 1 way.
+    expect(combinations).toHaveLength(12 + 2 + 8 + 4 + 1)
   })
 
   test.each(combinations)('%s', (target) => {
     const isHigh = /noon|culmination/.test(target)
-    expect(isOnMeridian(targetOf(target, isHigh ? ALTITUDE : DIRECTION))).toBe(isHigh)
+    const line = /to december/.test(target) ? SPAN : isHigh ? ALTITUDE : DIRECTION
+    expect(isOnMeridian(targetOf(target, line))).toBe(isHigh)
   })
 })
 
-test.each(Object.values(TARGET_EXAMPLES))('the example that messages give is right: %s', (target) => {
-  targetOf(target)
+test.each(Object.entries(TARGET_EXAMPLES))('the example that messages give is right: %s', (body, target) => {
+  expect(targetOf(target, body === 'sun at both solstices' ? SPAN : DIRECTION).body).toBe(body)
 })
 
 test('without a target that can be read a line is not told what it should measure', () => {

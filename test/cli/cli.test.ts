@@ -57,6 +57,8 @@ describe('audit', () => {
       join(folder, 'court.audit.md'),
     ])
     expect(await filesIn(folder)).toEqual([
+      'court.audit-horizon.svg',
+      'court.audit-plan.svg',
       'court.audit-premise.svg',
       'court.audit-track.svg',
       'court.audit.md',
@@ -237,6 +239,60 @@ describe('check', () => {
   })
 })
 
+describe('files beside a claim file', () => {
+  const NAMING = claimText({
+    points: 'survey.csv',
+    sightlines: '{one: {from: a, to: b, horizon: {profile: data/skyline.csv}}}',
+  })
+  const SOUND = {
+    'survey.csv': 'name,east,north\na,0,0\nb,60,50\n',
+    'skyline.csv': 'azimuth,altitude\n40,1\n60,1.5\n',
+  }
+
+  async function folderWith(files: Partial<Record<keyof typeof SOUND, string | Buffer>>): Promise<string> {
+    const folder = await newFolder()
+    await mkdir(join(folder, 'data'))
+    const { 'survey.csv': survey, 'skyline.csv': skyline } = files
+    if (survey !== undefined) await writeFile(join(folder, 'survey.csv'), survey)
+    if (skyline !== undefined) await writeFile(join(folder, 'data', 'skyline.csv'), skyline)
+    return claimIn(folder, NAMING)
+  }
+
+  test('are read from its folder, wherever one stands', async () => {
+    const { status, stderr } = await run('check', await folderWith(SOUND))
+    expect({ status, stderr }).toEqual({ status: 0, stderr: '' })
+  })
+
+  test('are told of by name, line and column', async () => {
+    const path = await folderWith({ ...SOUND, 'survey.csv': 'name,east,north\na,0,0\nb,6o,50\n' })
+    const { status, stderr } = await run('check', path)
+    expect(status).toBe(1)
+    expect(stderr).toContain(`${path.replace('court.yaml', 'survey.csv')}:3:3: error: \`6o\` `)
+  })
+
+  test('that are not there are an error of the claim file, in plain words', async () => {
+    const path = await folderWith({ 'survey.csv': SOUND['survey.csv'] })
+    const { status, stderr } = await run('check', path)
+    expect(status).toBe(1)
+    expect(stderr).toMatch(
+      /court\.yaml:\d+:\d+: error: `data\/skyline\.csv` cannot be read: there is no such file/,
+    )
+  })
+
+  test('that are folders, or not UTF-8, are told so', async () => {
+    const path = await folderWith({
+      ...SOUND,
+      'skyline.csv': Buffer.from([...Buffer.from('azimuth,h'), 0xf6, 0x0a]),
+    })
+    expect((await run('check', path)).stderr).toContain('skyline.csv:1:10: error: this is not UTF-8 text')
+    const folder = await newFolder()
+    await mkdir(join(folder, 'survey.csv'))
+    expect((await run('check', await claimIn(folder, NAMING))).stderr).toContain(
+      '`survey.csv` cannot be read: it is a folder',
+    )
+  })
+})
+
 describe('new', () => {
   test('writes a claim file that passes the check, and never over another', async () => {
     const folder = await newFolder()
@@ -265,6 +321,11 @@ describe('the samples', () => {
     'syrane',
     'hathmere',
     'velahar',
+    'eskamoor',
+    'marrusk',
+    'hestrun',
+    'dorrowick',
+    'ossavar',
   ])('%s has no problems', async (name) => {
     const { status, stderr } = await run('check', SAMPLE.replace('thornmere', name))
     expect({ status, stderr }).toEqual({ status: 0, stderr: '' })

@@ -29,6 +29,8 @@ describe('the package', () => {
     const args = ['dist/bin.js', 'audit', 'samples/thornmere.yaml', '--as', 'pdf,md,json', '--out', 'out']
     execFileSync(process.execPath, args, { cwd: folder })
     expect(await filesIn(join(folder, 'out'))).toEqual([
+      'thornmere.audit-horizon.svg',
+      'thornmere.audit-plan.svg',
       'thornmere.audit-premise.svg',
       'thornmere.audit-track.svg',
       'thornmere.audit.json',

@@ -144,3 +144,63 @@ describe('half a unit of the last printed digit, in degrees', () => {
     expect(reading.ok && reading.value.halfDeg).toBeCloseTo(half, 15)
   })
 })
+
+describe('an angle that has to say east or west', () => {
+  const kind = { ...LONGITUDE, needsLetter: true }
+
+  test.each([
+    ['1°35′ W', -(1 + 35 / 60)],
+    ['W 1°35′', -(1 + 35 / 60)],
+    ['1.5° E', 1.5],
+    ['0°', 0],
+    ['-0°', 0],
+  ])('%s', (text, deg) => {
+    expect(readOrReason(readAngle(text, kind))).toBeCloseTo(deg, 12)
+  })
+
+  test.each([
+    ['1°35′', 'letter-missing', '1°35′ E or 1°35′ W'],
+    ['−1°35′', 'letter-missing', '1°35′ E or 1°35′ W'],
+    ['+ 1.5°', 'letter-missing', '1.5° E or 1.5° W'],
+    ['-1.5', 'unit-missing', '1.5° E or 1.5° W'],
+    ['1.5 W', 'unit-missing', '1.5° W'],
+  ])('refuses %s', (text, code, suggestion) => {
+    expectMisread(text, readAngle(text, kind), { code, marked: text, suggestion })
+    for (const cure of suggestion.split(' or ')) expect(readAngle(cure, kind).ok).toBe(true)
+  })
+})
+
+describe('where bare numbers are degrees', () => {
+  const kind = { ...LATITUDE, takesBareDegrees: true }
+
+  test.each([
+    ['41.27', 41.27],
+    ['-41.27', -41.27],
+    ['−41.27', -41.27],
+    ['41.27 S', -41.27],
+    ['N 41', 41],
+    ['41°16′12″ N', 41.27],
+    ['.5', 0.5],
+  ])('%s', (text, deg) => {
+    expect(readOrReason(readAngle(text, kind))).toBeCloseTo(deg, 12)
+  })
+
+  test('other angles, commas, two signs and numbers out of range are refused all the same', () => {
+    expectMisread('41,27', readAngle('41,27', kind), {
+      code: 'decimal-comma',
+      marked: '41,27',
+      suggestion: '41.27',
+    })
+    expectMisread('-41.27 N', readAngle('-41.27 N', kind), {
+      code: 'sign-and-letter',
+      marked: '-41.27 N',
+      suggestion: null,
+    })
+    expectMisread('91', readAngle('91', kind), { code: 'out-of-range', marked: '91', suggestion: null })
+    expectMisread('41.27 E', readAngle('41.27 E', kind), {
+      code: 'wrong-hemisphere',
+      marked: 'E',
+      suggestion: null,
+    })
+  })
+})

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import { AZIMUTH, TOLERANCE } from '../../src/quantity/angle-kind.ts'
+import { AZIMUTH, LONGITUDE, TOLERANCE } from '../../src/quantity/angle-kind.ts'
 import { readAngle } from '../../src/quantity/read-angle.ts'
 import { readMeasured } from '../../src/quantity/read-measured.ts'
 import { readUncertainty } from '../../src/quantity/read-uncertainty.ts'
@@ -89,5 +89,15 @@ describe('an uncertainty by itself', () => {
     ['', 'not-readable', '', null],
   ])('%s is refused: %s', (text, code, marked, suggestion) => {
     expectMisread(text, readSize(text), { code, marked, suggestion })
+  })
+})
+
+test('a bare number that lacks its side as well is told by itself', () => {
+  const kind = { ...LONGITUDE, needsLetter: true }
+  const read = (text: string) => readAngle(text, kind)
+  expectMisread('1.5 ± 0.1', readMeasured('1.5 ± 0.1', read, read), {
+    code: 'unit-missing',
+    marked: '1.5',
+    suggestion: '1.5° E or 1.5° W',
   })
 })

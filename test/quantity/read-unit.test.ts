@@ -3,6 +3,7 @@ import { readUnit } from '../../src/quantity/read-unit.ts'
 import {
   ELEVATION,
   HUMIDITY,
+  inMetres,
   LAPSE,
   LENGTH,
   PRESSURE,
@@ -75,5 +76,33 @@ describe('refuses', () => {
     ['140 %', HUMIDITY, 'out-of-range', '140 %', null],
   ])('%s', (text, kind, code, marked, suggestion) => {
     expectMisread(text, readUnit(text, kind), { code, marked, suggestion })
+  })
+})
+
+describe('where a heading says metres', () => {
+  const kind = inMetres(LENGTH, '84.65')
+
+  test.each([
+    ['84.65', 84.65],
+    ['−3', -3],
+    ['40 cm', 0.4],
+  ])('%s', (text, metres) => {
+    expect(readOrReason(readUnit(text, kind))).toBeCloseTo(metres, 12)
+  })
+
+  test('a decimal comma is refused all the same', () => {
+    expectMisread('84,65', readUnit('84,65', kind), {
+      code: 'decimal-comma',
+      marked: '84,65',
+      suggestion: '84.65',
+    })
+  })
+
+  test('and elsewhere a bare number still is', () => {
+    expectMisread('84.65', readUnit('84.65', LENGTH), {
+      code: 'unit-missing',
+      marked: '84.65',
+      suggestion: '84.65 m',
+    })
   })
 })

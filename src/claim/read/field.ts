@@ -1,7 +1,9 @@
 import { isMap, isScalar, type Node, type Scalar } from 'yaml'
 import type { Advice, Stretch } from '../../quantity/misread.ts'
 import type { Problem } from '../../quantity/problem.ts'
+import type { SkylineNode } from '../claim.ts'
 import type { ProblemCode } from '../problem-codes.ts'
+import type { BesideReader } from '../reading-help.ts'
 import type { StarFinder } from '../star-finder.ts'
 
 /** A value of the file with what is needed to point at it. */
@@ -15,13 +17,23 @@ export interface Field {
   node: Node | null
 }
 
-/** The text being read, how stars are looked up, and where its problems go. */
+/** The text being read, how stars and other files are looked up, and where its problems go. */
 export interface Context {
   text: string
   findStar: StarFinder
+  beside: FilesBeside
   /** The line of an offset, from 1. */
   lineOf: (offset: number) => number
   report: (problem: Problem) => void
+}
+
+/** The files beside the claim file, each read once. */
+export interface FilesBeside {
+  read: BesideReader
+  /** Those that were read, with the SHA-256 of each. */
+  attachments: Map<string, string>
+  /** The skylines among them; null where one is not sound, which has been told. */
+  skylines: Map<string, readonly SkylineNode[] | null>
 }
 
 /** Reports an error about a field; `at` is its value unless given. */

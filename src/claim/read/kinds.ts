@@ -1,4 +1,4 @@
-import { type AngleKind, TOLERANCE } from '../../quantity/angle-kind.ts'
+import { type AngleKind, LATITUDE, LONGITUDE, TOLERANCE } from '../../quantity/angle-kind.ts'
 import { LENGTH, type UnitKind } from '../../quantity/unit-kind.ts'
 
 /** A place on the plan, metres; beyond 1000 km the unit is a slip. */
@@ -13,6 +13,146 @@ export const POINT_UNCERTAINTY: UnitKind = {
   low: 0,
   high: 1000,
   limits: 'from 0 to 1 km',
+}
+
+/** Easting of a projected grid, metres. Some grids write the number of the zone, up to 60, before the million. */
+export const EASTING: UnitKind = {
+  ...LENGTH,
+  name: 'an easting',
+  example: '273741.297 m',
+  low: -1e7,
+  high: 6.1e7,
+  limits: 'from −10,000 km to 61,000 km',
+}
+
+/** Northing of a projected grid, metres: a meridian is 10,002 km long from the equator to a pole. */
+export const NORTHING: UnitKind = {
+  ...LENGTH,
+  name: 'a northing',
+  example: '5796489.777 m',
+  low: -1.5e7,
+  high: 2.1e7,
+  limits: 'from −15,000 km to 21,000 km',
+}
+
+/** Width of a post or of a gap across the line, metres. */
+export const WIDTH: UnitKind = {
+  ...LENGTH,
+  name: 'a width',
+  example: '60 cm',
+  low: 0.001,
+  high: 1000,
+  limits: 'from 1 mm to 1 km',
+}
+
+/** How far a horizon is off, metres; the farthest seen from the ground are some 450 km off. */
+export const HORIZON_DISTANCE: UnitKind = {
+  ...LENGTH,
+  name: 'the distance of a horizon',
+  example: '8 km ± 100 m',
+  usualUnit: 'km',
+  low: 1,
+  high: 500_000,
+  limits: 'from 1 m to 500 km',
+}
+
+/** How much a horizon stands above the eye, metres. */
+export const RISE: UnitKind = {
+  ...LENGTH,
+  name: 'the rise of a horizon above the eye',
+  example: '120 m ± 5 m',
+  low: -9000,
+  high: 9000,
+  limits: 'from −9000 m to 9000 m',
+}
+
+/** Height of the eye above the sea, metres. */
+export const EYE_HEIGHT: UnitKind = {
+  ...LENGTH,
+  name: 'the height of the eye above the sea',
+  example: '25 m',
+  low: 0,
+  high: 9000,
+  limits: 'from 0 m to 9000 m',
+}
+
+/** Standard deviation of a height or a distance of a horizon, metres. */
+export const LENGTH_UNCERTAINTY: UnitKind = {
+  ...LENGTH,
+  name: 'the uncertainty of a length',
+  example: '5 m',
+  low: 0,
+  high: 100_000,
+  limits: 'from 0 to 100 km',
+}
+
+/** Distance between two receivers of a satellite system, metres. */
+export const BASELINE: UnitKind = {
+  ...LENGTH,
+  name: 'the distance of two positions',
+  example: '60 m',
+  low: 0.1,
+  limits: 'from 10 cm to 1000 km',
+}
+
+/** The scale of a projection on its central meridian, a bare number. */
+export const SCALE: UnitKind = {
+  name: 'a scale',
+  example: '0.9996',
+  usualUnit: '',
+  units: new Map([['', (number: number) => number]]),
+  low: 0.9,
+  high: 1.1,
+  limits: 'from 0.9 to 1.1',
+}
+
+export const CENTRAL_MERIDIAN: AngleKind = { ...LONGITUDE, name: 'a central meridian', example: '2° W' }
+
+/** Short of the poles, where a transverse Mercator grid has no origin. */
+export const LATITUDE_OF_ORIGIN: AngleKind = {
+  ...LATITUDE,
+  name: 'a latitude of origin',
+  example: '49° N',
+  lowDeg: -89,
+  highDeg: 89,
+  limits: 'from 89° S to 89° N',
+}
+
+/** By how much grid north lies off true north. In the zones in use it keeps within some 15°. */
+export const CONVERGENCE: AngleKind = {
+  ...TOLERANCE,
+  name: 'a convergence',
+  example: '1°35′ W ± 1′',
+  lowDeg: -20,
+  highDeg: 20,
+  limits: 'from 20° W to 20° E',
+  letters: ['E', 'W'],
+  needsLetter: true,
+  usualUnit: '°',
+}
+
+/** By how much magnetic north lies off true north; near the magnetic poles any angle. */
+export const MAGNETIC_DECLINATION: AngleKind = {
+  ...TOLERANCE,
+  name: 'a declination of the compass',
+  example: '3°20′ W ± 10′',
+  lowDeg: -180,
+  highDeg: 180,
+  limits: 'from 180° W to 180° E',
+  letters: ['E', 'W'],
+  needsLetter: true,
+  usualUnit: '°',
+}
+
+/** The angle between two lines from one place. */
+export const SPAN: AngleKind = {
+  ...TOLERANCE,
+  name: 'a span',
+  example: '50°31′ ± 2′',
+  lowDeg: 1 / 60,
+  highDeg: 180,
+  limits: 'from 1′ to 180°',
+  usualUnit: '°',
 }
 
 /** Standard deviation of a measured direction or of north. */

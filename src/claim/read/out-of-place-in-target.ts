@@ -35,12 +35,17 @@ const DAY: Reason = {
   why: 'days are counted from a solstice of the Sun',
   expected: 'day in a target of the Sun',
 }
+const BOTH_DAYS: Reason = {
+  why: 'the span is that between the two solstices',
+  expected: 'either day or event: june to december solstice',
+}
 const NO_DISC: Reason = { why: 'a star has no disc', expected: 'the target without it' }
 
 const REASONS: Readonly<
   Record<Target['body'], Readonly<Record<string, Reason | ((target: Field, entry: Field) => Reason)>>>
 > = {
   sun: { altitude: (target) => (textOf(target, 'at') === 'noon' ? AT_NOON : SKYLINE), above: ABOVE },
+  'sun at both solstices': { altitude: SKYLINE, above: ABOVE, sense: SENSE, day: BOTH_DAYS },
   moon: { altitude: SKYLINE, above: ABOVE, sense: SENSE, day: DAY },
   star: { disc: NO_DISC, event: eventOfStar, above: ABOVE, sense: SENSE, day: DAY },
   'two stars': {

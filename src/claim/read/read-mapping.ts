@@ -1,4 +1,4 @@
-import type { Advice } from '../../quantity/misread.ts'
+import type { Advice, Stretch } from '../../quantity/misread.ts'
 import { quoted } from '../../quantity/quoted.ts'
 import { EXAMPLES, type KeyTable } from '../keys.ts'
 import { type Context, type Field, reportError, reportWarning } from './field.ts'
@@ -12,15 +12,18 @@ export interface Fields<K extends string> {
   has: (key: K) => boolean
 }
 
-/** Why a key that is legal elsewhere has no place in a mapping; a suggestion takes the place of the key. */
+/**
+ * Why a key that is legal elsewhere has no place in a mapping; a suggestion takes the place of the key, or of the
+ * stretch `at`. `standsFor` is the key that is meant by it, where the suggestion is not that key.
+ */
 export interface OutOfPlace extends Advice {
   message: string
+  at?: Stretch
+  standsFor?: string
 }
 
 /** What to tell of keys besides that they are wrong. */
 export interface KeyAdvice {
-  /** What to write in place of the keys that this version does not read. */
-  instead?: string | undefined
   /** Tells a key that the table lacks because it belongs elsewhere; null for one that belongs nowhere. */
   outOfPlace?: (entry: Field) => OutOfPlace | null
   /** How lines with required keys may look, where the usual example does not fit. */
@@ -29,37 +32,36 @@ export interface KeyAdvice {
 
 /**
  * Reads a mapping with fixed keys. Reports unknown, doubled, misplaced and missing keys, those that this version
- * does not use or read, and values that a comma has cut in two. Null where the value is no mapping.
+ * does not use, and values that a comma has cut in two. Null where the value is no mapping.
  */
 export function readMapping<T extends KeyTable>(
   field: Field,
   table: T,
   context: Context,
-  { instead, outOfPlace = () => null, examples = {} }: KeyAdvice = {},
+  { outOfPlace = () => null, examples = {} }: KeyAdvice = {},
 ): Fields<keyof T & string> | null {
   const keys = Object.keys(table).slice(0, 3).join(': …, ')
   const entries = readEntries(field, context, `keys with values, such as ${keys}: …`)
   if (entries === null) return null
   const fields = new Map<string, Field>()
   const spoilt = new Set<string>()
-  const readKeys = Object.keys(table).filter((key) => table[key] !== 'later' && table[key] !== 'unused')
+  const readKeys = Object.keys(table).filter((key) => table[key] !== 'unused')
   const taken = new Set(entries.map(({ name }) => name))
   const freeKeys = { keys: readKeys, free: readKeys.filter((key) => !taken.has(key)) }
   const isKey = (entry: Field) => Object.hasOwn(table, entry.name) || outOfPlace(entry) !== null
-  let isFromLater = false
   for (const entry of joinCutValues(entries, field, isKey, spoilt, context)) {
     const use = Object.hasOwn(table, entry.name) ? table[entry.name] : undefined
     const stray = use === undefined ? outOfPlace(entry) : null
     if (stray !== null) {
-      if (stray.suggestion != null) spoilt.add(stray.suggestion)
+      const meant = stray.standsFor ?? stray.suggestion
+      if (meant != null) spoilt.add(meant)
       reportOutOfPlace(entry, stray, context)
     } else if (use === undefined) reportUnknown(entry, freeKeys, spoilt, context)
     else if (use === 'unused') warnUnused(entry, context)
-    else if (use === 'later') isFromLater = reportLater(entry, instead, context)
     else fields.set(entry.name, entry)
   }
   const isThere = (key: string) => fields.has(key) || spoilt.has(key)
-  if (!isFromLater) reportMissing(field, table, isThere, { ...EXAMPLES, ...examples }, context)
+  reportMissing(field, table, isThere, { ...EXAMPLES, ...examples }, context)
   return { get: (key) => fields.get(key), has: isThere }
 }
 
@@ -84,20 +86,6 @@ function warnUnused(entry: Field, context: Context): void {
   })
 }
 
-function reportLater(entry: Field, instead: string | undefined, context: Context): true {
-  reportError(
-    context,
-    entry,
-    'not-in-this-version',
-    `this version does not read ${quoted(entry.name)} here`,
-    {
-      expected: instead ?? null,
-      at: entry.keyAt,
-    },
-  )
-  return true
-}
-
 function reportMissing(
   field: Field,
   table: KeyTable,
@@ -120,6 +108,10 @@ export function reportMissingKey(field: Field, key: string, expected: string | n
 }
 
 /** Reports a key that is legal elsewhere, at the key. */
-export function reportOutOfPlace(entry: Field, { message, ...advice }: OutOfPlace, context: Context): void {
-  reportError(context, entry, 'out-of-place', message, { ...advice, at: entry.keyAt })
+export function reportOutOfPlace(
+  entry: Field,
+  { message, expected = null, suggestion = null, at = entry.keyAt }: OutOfPlace,
+  context: Context,
+): void {
+  reportError(context, entry, 'out-of-place', message, { expected, suggestion, at })
 }

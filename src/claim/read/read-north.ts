@@ -1,30 +1,116 @@
+import { quoted } from '../../quantity/quoted.ts'
 import { readAngle } from '../../quantity/read-angle.ts'
 import { readUncertainty } from '../../quantity/read-uncertainty.ts'
 import type { Unstated } from '../../quantity/unstated.ts'
 import type { North } from '../claim.ts'
-import { KEYS } from '../keys.ts'
-import type { Context, Field } from './field.ts'
-import { DIRECTION_UNCERTAINTY } from './kinds.ts'
-import { readMapping } from './read-mapping.ts'
+import { EXAMPLES, KEYS } from '../keys.ts'
+import { type Context, type Field, reportWarning } from './field.ts'
+import { CONVERGENCE, DIRECTION_UNCERTAINTY } from './kinds.ts'
+import { measuredAngle } from './measured-angle.ts'
+import { type CompassHelp, readCompass } from './read-compass.ts'
+import { type Fields, readMapping, reportMissingKey, reportOutOfPlace } from './read-mapping.ts'
 import { isUnknown, readQuantity } from './read-quantity.ts'
+import { readReceivers } from './read-receivers.ts'
 import { plainText } from './read-text.ts'
 import { readWord } from './read-word.ts'
 
-const WAYS = { words: ['compass', 'gps', 'sun', 'plan'], hints: { map: 'plan', gnss: 'gps' } } as const
+type NorthKey = keyof typeof KEYS.north
+type NorthFields = Fields<NorthKey>
+
+export const NORTH_WAYS = ['compass', 'gps', 'sun', 'star', 'plan', 'grid'] as const
+const WAYS = {
+  words: NORTH_WAYS,
+  hints: {
+    magnetic: 'compass',
+    needle: 'compass',
+    gnss: 'gps',
+    theodolite: 'sun',
+    'total station': 'sun',
+    solar: 'sun',
+    'sun azimuth': 'sun',
+    polaris: 'star',
+    'pole star': 'star',
+    stars: 'star',
+    map: 'plan',
+    drawing: 'plan',
+    'grid north': 'grid',
+    utm: 'grid',
+  },
+} as const
+const OF_A_COMPASS = 'it belongs to north by a compass'
+const OF_RECEIVERS = 'it belongs to north by two GPS positions'
+/** The way of finding north that each key belongs to. */
+const BELONGS: Readonly<Partial<Record<NorthKey, { way: North['from']; why: string }>>> = {
+  date: { way: 'compass', why: OF_A_COMPASS },
+  declination: { way: 'compass', why: OF_A_COMPASS },
+  baseline: { way: 'gps', why: OF_RECEIVERS },
+  accuracy: { way: 'gps', why: OF_RECEIVERS },
+  convergence: { way: 'grid', why: 'it belongs to the north of a grid' },
+}
 
 /** Reads how the plan's north was found, or `unknown`. */
-export function readNorth(field: Field | undefined, context: Context): North | Unstated {
+export function readNorth(
+  field: Field | undefined,
+  { hasGrid, ...help }: CompassHelp & { hasGrid: boolean },
+  context: Context,
+): North | Unstated {
   if (field === undefined) return 'omitted'
   if (isUnknown(plainText(field) ?? '')) return 'unknown'
   const fields = readMapping(field, KEYS.north, context)
   if (fields === null) return 'omitted'
   const from = readWord(fields.get('from'), WAYS, context)
+  if (from !== null) refuseForeign(from, fields, context)
+  const convergence = readConvergence(fields, context)
+  if (from === 'grid' && !fields.has('convergence') && !hasGrid) reportNoGrid(field, context)
+  const compass = readCompass(fields, from === 'compass' ? help : null, context)
+  const receivers = readReceivers(field, fields, from === 'gps', context)
+  const uncertaintyDeg = readOwnUncertainty(fields, context)
+  return from === null ? 'omitted' : { from, uncertaintyDeg, ...compass, convergence, ...receivers }
+}
+
+function readOwnUncertainty(fields: NorthFields, context: Context): number | Unstated {
   const read = (text: string) => readUncertainty(text, (size) => readAngle(size, DIRECTION_UNCERTAINTY))
-  const uncertaintyDeg = readQuantity(
-    fields.get('uncertainty'),
-    read,
-    'an angle such as 0.5°, or unknown',
+  const expected = 'an angle such as 0.5°, or unknown'
+  const uncertainty = readQuantity(fields.get('uncertainty'), read, expected, context) ?? 'omitted'
+  if (typeof uncertainty === 'number')
+    for (const key of ['baseline', 'accuracy'] as const) {
+      const entry = fields.get(key)
+      if (entry === undefined) continue
+      reportWarning(
+        context,
+        entry,
+        'unused-key',
+        `${quoted(key)} is not used, since \`uncertainty\` is given`,
+        {
+          expected: 'either uncertainty, or baseline and accuracy',
+          at: entry.keyAt,
+        },
+      )
+    }
+  return uncertainty
+}
+
+function readConvergence(fields: NorthFields, context: Context): North['convergence'] {
+  const read = measuredAngle(CONVERGENCE, DIRECTION_UNCERTAINTY)
+  const expected = `${CONVERGENCE.name} such as ${CONVERGENCE.example}`
+  return readQuantity(fields.get('convergence'), read, expected, context)
+}
+
+function refuseForeign(from: North['from'], fields: NorthFields, context: Context): void {
+  for (const key of Object.keys(BELONGS) as NorthKey[]) {
+    const entry = fields.get(key)
+    const home = BELONGS[key]
+    if (entry === undefined || home === undefined || home.way === from) continue
+    const message = `${quoted(key)} has no place here: ${home.why}`
+    reportOutOfPlace(entry, { message, expected: `${quoted(key)} beside from: ${home.way}` }, context)
+  }
+}
+
+function reportNoGrid(field: Field, context: Context): void {
+  reportMissingKey(
+    field,
+    'convergence',
+    `convergence: ${CONVERGENCE.example}, or ${EXAMPLES.grid} in the file`,
     context,
   )
-  return from === null ? 'omitted' : { from, uncertaintyDeg: uncertaintyDeg ?? 'omitted' }
 }

@@ -1,33 +1,18 @@
-import { isMap } from 'yaml'
-import { HORIZON_ALTITUDE } from '../../quantity/angle-kind.ts'
-import type { Measured } from '../../quantity/measured.ts'
+import { isMap, isScalar } from 'yaml'
 import { quoted } from '../../quantity/quoted.ts'
-import type { Unstated } from '../../quantity/unstated.ts'
-import type { Sightline, Target } from '../claim.ts'
-import { INSTEAD, KEYS, TARGET_EXAMPLES } from '../keys.ts'
+import type { Direction, Sightline } from '../claim.ts'
+import { EXAMPLES, KEYS, TARGET_EXAMPLES } from '../keys.ts'
 import { isOnMeridian } from '../on-meridian.ts'
 import { type Context, type Field, reportError } from './field.ts'
-import { ALTITUDE_UNCERTAINTY } from './kinds.ts'
-import { measuredAngle } from './measured-angle.ts'
 import { readDirection } from './read-direction.ts'
-import { readMapping } from './read-mapping.ts'
+import { type LineOfSight, readHorizon } from './read-horizon.ts'
+import { type Fields, type OutOfPlace, readMapping } from './read-mapping.ts'
 import { readNames } from './read-names.ts'
-import type { ReadPoints } from './read-points.ts'
-import { readStatable } from './read-quantity.ts'
 import { readTarget } from './read-target.ts'
+import { plainText } from './read-text.ts'
+import type { Surroundings } from './surroundings.ts'
 
 const ONE_LINE = 'a name for each line, such as midsummer: {azimuth: 57°54′28″ ± 1′, horizon: 1°30′ ± 2′}'
-
-/**
- * What the sightlines refer to. `points` is null where none can be told, `hasPoints` whether the file has the key;
- * `shared` is the top-level target, `hasShared` is true also where it cannot be read.
- */
-export interface Surroundings {
-  points: ReadPoints | null
-  hasPoints: boolean
-  shared: Target | null
-  hasShared: boolean
-}
 
 /** Reads the sightlines, in the order of the file. */
 export function readSightlines(
@@ -46,14 +31,26 @@ export function readSightlines(
 }
 
 function readSightline(field: Field, around: Surroundings, context: Context): Sightline | null {
-  const fields = readMapping(field, KEYS.sightline, context, { instead: INSTEAD.sightline })
+  const fields = readMapping(field, KEYS.sightline, context, { outOfPlace: angleOfSpan })
   if (fields === null) return null
   const target = fields.has('target') ? readTarget(fields.get('target'), context) : around.shared
   if (!fields.has('target') && !around.hasShared) reportNoTarget(field, context)
   const direction = readDirection(field, fields, target, around, context)
-  const meetsHorizon = target === null || !isOnMeridian(target)
-  const horizonDeg = meetsHorizon ? readHorizon(fields.get('horizon'), context) : 'omitted'
-  return direction === null || target === null ? null : { name: field.name, direction, horizonDeg, target }
+  const isSpan = target?.body === 'sun at both solstices' || (target === null && fields.has('span'))
+  const meetsHorizon = !isSpan && (target === null || !isOnMeridian(target))
+  const line = lineOfSight(field.name, fields, direction)
+  const horizon = meetsHorizon ? readHorizon(fields.get('horizon'), line, around, context) : 'omitted'
+  return direction === null || target === null ? null : { name: field.name, direction, horizon, target }
+}
+
+function lineOfSight(
+  name: string,
+  fields: Fields<keyof typeof KEYS.sightline>,
+  direction: Direction | null,
+): LineOfSight {
+  if (direction?.by === 'azimuth') return { name, azimuthDeg: direction.azimuthDeg.value }
+  if (direction?.by === 'points') return { name, from: direction.from }
+  return fields.has('from') || fields.has('to') ? { name, from: null } : { name }
 }
 
 function reportNoTarget(field: Field, context: Context): void {
@@ -62,11 +59,20 @@ function reportNoTarget(field: Field, context: Context): void {
   reportError(context, field, 'missing-key', message, { expected, at: field.keyAt })
 }
 
-function readHorizon(field: Field | undefined, context: Context): Measured | Unstated {
-  const expected = 'an altitude such as 1°30′ ± 2′, or unknown'
-  const read = measuredAngle(HORIZON_ALTITUDE, ALTITUDE_UNCERTAINTY)
-  if (field === undefined || !isMap(field.node)) return readStatable(field, read, expected, context)
-  const message = 'this version does not read a horizon of this form'
-  reportError(context, field, 'not-in-this-version', message, { expected, at: field.keyAt })
-  return 'omitted'
+/** `angle: 50°31′ ± 2′` is most likely a span. */
+function angleOfSpan(entry: Field): OutOfPlace | null {
+  if (entry.name !== 'angle') return null
+  const message = '`angle` has no place here: an angle between two lines is a span'
+  const text = plainText(entry)
+  const [, end = 0] = isScalar(entry.node) ? (entry.node.range ?? []) : []
+  const isPlain = text !== null && isScalar(entry.node) && entry.node.type === 'PLAIN'
+  return {
+    message,
+    expected: EXAMPLES.span ?? null,
+    standsFor: 'span',
+    ...(isPlain && {
+      suggestion: `span: {angle: ${text}}`,
+      at: { offset: entry.keyAt.offset, length: end - entry.keyAt.offset },
+    }),
+  }
 }

@@ -1,4 +1,4 @@
-import { foldWord } from '../../quantity/near-miss.ts'
+import { foldWord, nearMiss } from '../../quantity/near-miss.ts'
 import { quoted } from '../../quantity/quoted.ts'
 import type { EquinoxSense, SunEvent, SunTarget } from '../claim.ts'
 import { EXAMPLES, type KEYS } from '../keys.ts'
@@ -8,12 +8,12 @@ import { readQuantity } from './read-quantity.ts'
 import { DAY_EXPECTED, readSunDay } from './read-sun-day.ts'
 import { plainText } from './read-text.ts'
 import { readWord } from './read-word.ts'
-import { SOLSTICES, solsticesOfSeason } from './season.ts'
+import { isBothSolstices, SOLSTICES, SPAN_EVENT, solsticesOfSeason } from './season.ts'
 
 export const SUN_EVENTS = [...SOLSTICES, 'equinox', 'zenith passage'] as const
 const EVENTS = {
   words: SUN_EVENTS,
-  later: ['june to december solstice'],
+  guess: (text: string) => (isBothSolstices(text) ? SPAN_EVENT : nearMiss(text, [...SUN_EVENTS, SPAN_EVENT])),
   hints: {
     'northern solstice': 'june solstice',
     'southern solstice': 'december solstice',

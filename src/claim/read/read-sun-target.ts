@@ -12,7 +12,8 @@ import { plainText } from './read-text.ts'
 import { readWord } from './read-word.ts'
 
 export const SUN_MOMENTS = ['rising', 'setting', 'noon'] as const
-const MOMENTS = {
+/** Words for where the Sun stands. */
+export const SUN_WORDS = {
   words: SUN_MOMENTS,
   hints: {
     rise: 'rising',
@@ -35,7 +36,7 @@ export function readSunTarget(field: Field, context: Context): SunTarget | null 
   const fields = readMapping(field, KEYS.sunTarget, context, { outOfPlace })
   if (fields === null) return null
   const event = readSunEvent(field, fields, context)
-  const at = readWord(fields.get('at'), MOMENTS, context)
+  const at = readWord(fields.get('at'), SUN_WORDS, context)
   const disc = readStatable(fields.get('disc'), readDisc, DISC_EXPECTED, context)
   if (at === 'noon') refuseShowing(disc, fields.get('disc'), context)
   return event === null || at === null ? null : { body: 'sun', event, at, disc }

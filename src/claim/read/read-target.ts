@@ -6,11 +6,13 @@ import { EXAMPLES } from '../keys.ts'
 import { type Context, type Field, peek, reportError } from './field.ts'
 import { readMapping, reportMissingKey } from './read-mapping.ts'
 import { readMoonTarget } from './read-moon-target.ts'
+import { readSpanTarget } from './read-span-target.ts'
 import { reportUnknownBody, starNamed } from './read-star.ts'
 import { readStarPairTarget } from './read-star-pair-target.ts'
 import { readStarTarget } from './read-star-target.ts'
 import { readSunTarget } from './read-sun-target.ts'
 import { plainText, scalarText } from './read-text.ts'
+import { SPAN_EVENT } from './season.ts'
 
 const BODIES = ['sun', 'moon'] as const
 const PLANETS = new Set(['mercury', 'venus', 'mars', 'jupiter', 'saturn', 'uranus', 'neptune'])
@@ -40,6 +42,8 @@ export function readTarget(field: Field | undefined, context: Context): Target |
   switch (kindOf(field, context)) {
     case 'sun':
       return readSunTarget(field, context)
+    case 'sun at both solstices':
+      return readSpanTarget(field, context)
     case 'moon':
       return readMoonTarget(field, context)
     case 'star':
@@ -56,6 +60,8 @@ function kindOf(field: Field, context: Context): Target['body'] | null {
   const body = plainText({ ...field, node: peek(field, 'body') })
   if (body === null) return null
   const known = BODIES.find((name) => name === foldWord(body))
+  const event = plainText({ ...field, node: peek(field, 'event') })
+  if (known === 'sun' && foldWord(event ?? '') === foldWord(SPAN_EVENT)) return 'sun at both solstices'
   return known ?? (starNamed(body, context) === null ? null : 'star')
 }
 

@@ -4,12 +4,12 @@ import { type Context, type Field, reportError } from './field.ts'
 import { scalarText } from './read-text.ts'
 
 /**
- * The words a key takes. `later` ones are legal but not computed by this version; `hints` say what others mean, and
+ * The words a key takes. `aliases` are other words for them; `hints` say what words mean that are not taken, and
  * `guess` what is meant by a text that is none of them: a word, or `a or b`.
  */
 export interface Vocabulary<W extends string> {
   words: readonly W[]
-  later?: readonly string[]
+  aliases?: Readonly<Record<string, W>>
   hints?: Readonly<Record<string, W>>
   guess?: (text: string) => string | null
 }
@@ -17,32 +17,19 @@ export interface Vocabulary<W extends string> {
 /** Reads one of a few words, whatever its case and spacing; null, with the problem reported, where it is none. */
 export function readWord<W extends string>(
   field: Field | undefined,
-  { words, later = [], hints = {}, guess = () => null }: Vocabulary<W>,
+  { words, aliases = {}, hints = {}, guess = () => null }: Vocabulary<W>,
   context: Context,
 ): W | null {
   if (field === undefined) return null
   const expected = words.length > 2 ? `one of ${words.join(', ')}` : words.join(' or ')
   const text = scalarText(field, context, expected)
   if (text === null) return null
-  const word = words.find((candidate) => foldWord(candidate) === foldWord(text))
+  const known = (table: Readonly<Record<string, W>>) =>
+    Object.entries(table).find(([other]) => foldWord(other) === foldWord(text))?.[1]
+  const word = words.find((candidate) => foldWord(candidate) === foldWord(text)) ?? known(aliases)
   if (word !== undefined) return word
-  if (later.some((candidate) => foldWord(candidate) === foldWord(text)))
-    reportError(context, field, 'not-in-this-version', `this version does not compute ${quoted(text)}`, {
-      expected,
-    })
-  else {
-    const hint = Object.entries(hints).find(([other]) => foldWord(other) === foldWord(text))?.[1]
-    const suggestion = hint ?? guess(text) ?? nearMiss(text, words)
-    reportError(
-      context,
-      field,
-      'unknown-word',
-      `${quoted(text)} is not a word that ${quoted(field.name)} takes`,
-      {
-        expected,
-        suggestion,
-      },
-    )
-  }
+  const suggestion = known(hints) ?? guess(text) ?? nearMiss(text, words)
+  const message = `${quoted(text)} is not a word that ${quoted(field.name)} takes`
+  reportError(context, field, 'unknown-word', message, { expected, suggestion })
   return null
 }

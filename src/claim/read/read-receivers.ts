@@ -1,0 +1,39 @@
+import { misread, trimmedStretch } from '../../quantity/misread.ts'
+import { quoted } from '../../quantity/quoted.ts'
+import { readUncertainty } from '../../quantity/read-uncertainty.ts'
+import { readUnit } from '../../quantity/read-unit.ts'
+import type { Reading } from '../../quantity/reading.ts'
+import type { North } from '../claim.ts'
+import { EXAMPLES, type KEYS } from '../keys.ts'
+import type { Context, Field } from './field.ts'
+import { BASELINE, POINT_UNCERTAINTY } from './kinds.ts'
+import { type Fields, reportMissingKey } from './read-mapping.ts'
+import { readQuantity } from './read-quantity.ts'
+
+/** Reads how far apart two GPS positions were, and how exact each; the one needs the other. */
+export function readReceivers(
+  north: Field,
+  fields: Fields<keyof typeof KEYS.north>,
+  isAsked: boolean,
+  context: Context,
+): Pick<North, 'baselineM' | 'accuracyM'> {
+  const readBaseline = (text: string) => readUnit(text, BASELINE)
+  const baselineM = readQuantity(fields.get('baseline'), readBaseline, 'a length such as 60 m', context)
+  const accuracyM = readQuantity(fields.get('accuracy'), readAccuracy, 'a length such as 2 cm', context)
+  if (isAsked)
+    for (const [key, other] of [
+      ['baseline', 'accuracy'],
+      ['accuracy', 'baseline'],
+    ] as const)
+      if (fields.has(key) && !fields.has(other))
+        reportMissingKey(north, other, EXAMPLES[other] ?? null, context)
+  return { baselineM, accuracyM }
+}
+
+function readAccuracy(text: string): Reading<number> {
+  const reading = readUncertainty(text, (size) => readUnit(size, { ...POINT_UNCERTAINTY, example: '2 cm' }))
+  if (!reading.ok || reading.value !== 'unknown') return reading as Reading<number>
+  return misread('not-readable', `${quoted(text.trim())} is not an accuracy`, trimmedStretch(text), {
+    expected: 'a length such as 2 cm; north from gps alone where it is not known',
+  })
+}
