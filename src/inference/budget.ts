@@ -9,6 +9,13 @@ export interface BudgetShare {
   share: number
 }
 
+/** What the error of the measurement is called. */
+const MEASURED: Readonly<Record<Sight['measures'], string>> = {
+  azimuth: 'direction of the line',
+  altitude: 'altitude measured',
+  angle: 'angle between the lines',
+}
+
 /**
  * The linear budget of a date (JCGM 100:2008, section 5): the effect of each source of error on the direction, over
  * the movement of the target. Largest first; empty where the target is level or not to be seen, where no linear
@@ -19,10 +26,7 @@ export function dateBudget(sight: Sight, branch: Branch, year: number): BudgetSh
   const drift = driftDegPerYear(sight, branch, year)
   if (prediction === null || drift === null || drift === 0) return []
   const sources = [
-    {
-      source: sight.measures === 'azimuth' ? 'direction of the line' : 'altitude measured',
-      effectDeg: sight.measuredSdDeg,
-    },
+    { source: MEASURED[sight.measures], effectDeg: sight.measuredSdDeg },
     { source: 'the plan’s north', effectDeg: sight.northSdDeg },
     ...prediction.errors,
   ]

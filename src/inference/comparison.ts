@@ -17,6 +17,7 @@ export interface Straight {
   /** The part of it that is the measurement's, which lines on one axis share. */
   measuredVariance: number
   axis: string | null
+  toleranceScale: number
   /** Effects of one standard deviation of the errors that lines share: north and obliquity, degrees. */
   shared: readonly [north: number, obliquity: number]
 }
@@ -26,6 +27,7 @@ export interface Curved {
   /** Whether the target gets there as it is, and not only by some of its likely errors. */
   reached: boolean
   variance: number
+  toleranceScale: number
   /** Runs of likely errors, with offsets in place of directions. */
   pieces: readonly CurvePiece[]
 }
@@ -56,6 +58,7 @@ function straight(sight: Sight, { directionDeg, errors }: Prediction): Straight 
     variance,
     measuredVariance: sight.measuredSdDeg ** 2,
     axis: sight.axis,
+    toleranceScale: sight.toleranceScale,
     shared: [sight.northSdDeg, obliquity],
   }
 }
@@ -65,6 +68,7 @@ function curved(sight: Sight, pieces: readonly CurvePiece[], reached: boolean): 
     kind: 'curved',
     reached,
     variance: sight.measuredSdDeg ** 2 + sight.northSdDeg ** 2,
+    toleranceScale: sight.toleranceScale,
     pieces: pieces.map(({ fromSd, toSd, fromDeg, toDeg }) => {
       const offset = wrap180(sight.measuredDeg - fromDeg)
       return { fromSd, toSd, fromDeg: offset, toDeg: offset - (toDeg - fromDeg) }

@@ -22,6 +22,11 @@ const STEP = 20
 const YEAR_PRECISION = 1e-4
 /** Far below any error: 0.004″. */
 const LEVEL_DEG = 1e-6
+/**
+ * From one summit of a skyline to the next the first gleam leaps past the line and never stands on it. A fast star
+ * moves 1000 times less than this in the precision of a root.
+ */
+const NOTCH_DEG = 1e-3
 /** Two azimuths further apart than this in one step are a jump across north, not a crossing. */
 const JUMP_DEG = 90
 
@@ -125,11 +130,11 @@ function crossings(sight: Sight, branch: Branch, track: readonly TrackPoint[]): 
     if (before.offset === 0) years.push(before.year)
     if (before.offset === null || after.offset === null) continue
     const crosses = before.offset * after.offset < 0 && Math.abs(before.offset - after.offset) < JUMP_DEG
+    if (!crosses) continue
     // Between two reached years the target is reached: the altitude it needs changes smoothly.
-    if (crosses)
-      years.push(
-        findRoot((year) => offsetDeg(sight, branch, year) ?? 0, before.year, after.year, YEAR_PRECISION),
-      )
+    const offset = (year: number) => offsetDeg(sight, branch, year) ?? 0
+    const root = findRoot(offset, before.year, after.year, YEAR_PRECISION)
+    if (Math.abs(offset(root)) < NOTCH_DEG) years.push(root)
   }
   const last = track.at(-1)!
   if (last.offset === 0) years.push(last.year)

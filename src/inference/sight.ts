@@ -4,8 +4,8 @@
  */
 export interface Sight {
   name: string
-  /** What the line gives: its azimuth from true north, or an apparent altitude on the meridian. */
-  measures: 'azimuth' | 'altitude'
+  /** What the line gives: its azimuth from true north, an apparent altitude on the meridian, or the angle of two lines. */
+  measures: 'azimuth' | 'altitude' | 'angle'
   measuredDeg: number
   /** Names the pair of points it runs between, in either direction: such lines share their build error. */
   axis: string | null
@@ -13,6 +13,8 @@ export interface Sight {
   measuredSdDeg: number
   /** Of the plan's north, an error this line shares with the others of its plan; 0 for a measured azimuth. */
   northSdDeg: number
+  /** The standard deviation of what was built, in build tolerances: 1, or √2 for the angle between two built lines. */
+  toleranceScale: number
   /** The directions its target may have in one year, all as likely: a date counts as the mean over them. */
   branches: readonly Branch[]
 }
@@ -33,6 +35,8 @@ export interface Branch {
 export interface Prediction {
   directionDeg: number
   errors: readonly PredictionError[]
+  /** Where the centre of its disc is seen then, where a skyline to both sides decides it; absent on a level horizon. */
+  discCentre?: { azimuthDeg: number; altitudeDeg: number }
 }
 
 /** A source of error of the target's direction. */

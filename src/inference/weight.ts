@@ -45,12 +45,16 @@ function lnMeanOf(branches: readonly (Comparison | null)[], toleranceDeg: number
 }
 
 /** Variance of one line's own errors together with its build tolerance, degrees². */
-function ownVariance(variance: number, toleranceDeg: number): number {
-  return Math.max(SMALLEST_SD_DEG ** 2, variance + toleranceDeg ** 2)
+function ownVariance(
+  { variance, toleranceScale }: Pick<Comparison, 'variance' | 'toleranceScale'>,
+  toleranceDeg: number,
+): number {
+  return Math.max(SMALLEST_SD_DEG ** 2, variance + (toleranceScale * toleranceDeg) ** 2)
 }
 
-function lnOfOne({ offsetDeg, variance, shared }: Straight, toleranceDeg: number): number {
-  const total = ownVariance(variance, toleranceDeg) + shared[0] ** 2 + shared[1] ** 2
+function lnOfOne(line: Straight, toleranceDeg: number): number {
+  const { offsetDeg, shared } = line
+  const total = ownVariance(line, toleranceDeg) + shared[0] ** 2 + shared[1] ** 2
   return -(Math.log(total) + (offsetDeg * offsetDeg) / total) / 2
 }
 
@@ -74,7 +78,7 @@ function whitened(
   let lnDeterminant = 0
   lines.forEach((line, i) => {
     const row: number[] = []
-    let diagonal = ownVariance(line.variance, toleranceDeg) + line.shared[0] ** 2 + line.shared[1] ** 2
+    let diagonal = ownVariance(line, toleranceDeg) + line.shared[0] ** 2 + line.shared[1] ** 2
     let rest = line.offsetDeg
     for (let j = 0; j < i; j++) {
       let entry = covariance(line, lines[j]!, toleranceDeg)
@@ -98,7 +102,8 @@ function covariance(a: Straight, b: Straight, toleranceDeg: number): number {
 
 function axisCovariance(a: Straight, b: Straight, toleranceDeg: number): number {
   if (a.axis === null || a.axis !== b.axis) return 0
-  return toleranceDeg ** 2 + Math.min(a.measuredVariance, b.measuredVariance)
+  const built = a.toleranceScale * b.toleranceScale * toleranceDeg ** 2
+  return built + Math.min(a.measuredVariance, b.measuredVariance)
 }
 
 /**
@@ -147,11 +152,12 @@ const NEGLIGIBLE = 20
 
 /** ln of the density averaged over the errors, exact where direction runs straight inside each piece. */
 function lnOfCurved(
-  { pieces, variance }: Pick<Curved, 'pieces' | 'variance'>,
+  curved: Pick<Curved, 'pieces' | 'variance' | 'toleranceScale'>,
   toleranceDeg: number,
   turnedBackDeg = 0,
 ): number {
-  const sd = Math.sqrt(ownVariance(variance, toleranceDeg))
+  const { pieces } = curved
+  const sd = Math.sqrt(ownVariance(curved, toleranceDeg))
   let [highest, likeliest] = [-Infinity, pieces[0]!]
   for (const piece of pieces) {
     const bound = boundOf(piece, turnedBackDeg, sd)

@@ -222,3 +222,30 @@ describe('drift and standard deviation', () => {
     expect(dateSdYears(unseen, 0)).toBeNull()
   })
 })
+
+describe('a direction that leaps past the line', () => {
+  /** The first gleam of a body that leaves one summit for the next in the year 500. */
+  const leaping = (before: number, after: number): Sight => ({
+    name: 'between two summits',
+    measures: 'azimuth',
+    measuredDeg: 60,
+    axis: null,
+    measuredSdDeg: 0.01,
+    northSdDeg: 0,
+    toleranceScale: 1,
+    branches: [
+      { predict: (year) => ({ directionDeg: (year < 500 ? before : after) + year * 1e-5, errors: [] }) },
+    ],
+  })
+
+  test('has no date: it never stands on it', () => {
+    expect(crossingYears(leaping(59.7, 60.3), -2000, 2000, 20)).toEqual([])
+    expect(impliedDates(leaping(59.7, 60.3), -2000, 2000)).toEqual([])
+  })
+
+  test('has the date at which it moves onto it between leaps', () => {
+    const years = crossingYears(leaping(60.01, 60.3), -2000, 2000, 20)
+    expect(years).toHaveLength(1)
+    expectWithin(years[0]!, -1000, 0.01, 'years', 'the meeting')
+  })
+})

@@ -44,6 +44,7 @@ export function horizonSight(line: HorizonLine): Sight {
     measures: 'azimuth',
     measuredDeg: line.azimuthDeg,
     axis: line.axis,
+    toleranceScale: 1,
     measuredSdDeg: line.azimuthSdDeg,
     northSdDeg: line.northSdDeg,
     branches: [horizonBranch({ latitudeDeg: line.latitudeDeg, at: line.at, altitude, declination })],
@@ -147,6 +148,7 @@ export function branchedSight(branches: readonly Branch[], changes: Partial<Sigh
     measures: 'azimuth',
     measuredDeg: 60,
     axis: null,
+    toleranceScale: 1,
     measuredSdDeg: 0,
     northSdDeg: 0,
     branches,
@@ -182,6 +184,7 @@ export function straightAt(offsetDeg: number, variance: number): Straight {
     variance,
     measuredVariance: 0,
     axis: null,
+    toleranceScale: 1,
     shared: [0, 0],
   }
 }

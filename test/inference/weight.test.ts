@@ -103,6 +103,7 @@ describe('the weight of a curved comparison', () => {
       kind: 'curved',
       reached: true,
       variance: 0.02,
+      toleranceScale: 1,
       pieces: Array.from({ length: n }, (_, i) => ({
         fromSd: cut(fromSd, toSd, i),
         toSd: cut(fromSd, toSd, i + 1),
@@ -330,5 +331,24 @@ describe('lines without any error', () => {
     const lines = [0.1, 0.2, 0.3, 0.4].map((d) => straight(d, 0, 2, 0.1))
     expect(Number.isFinite(lnWeight(lines, 0))).toBe(true)
     expect(lnWeight(lines, 0.1)).toBeGreaterThan(lnWeight(lines, 0))
+  })
+})
+
+describe('an angle between two built lines', () => {
+  const line = { ...straight(0.3, 0.1, 0, 0.02), measuredVariance: 0.004 }
+  const angle = { ...line, axis: 'a\nb\nc', toleranceScale: Math.SQRT2 }
+
+  test.each([0, 0.1, 0.5, 2])('has √2 times the build tolerance: τ = %s°', (tolerance) => {
+    const want = lnOfOne(0.3, Math.hypot(0.1, 0.02, Math.SQRT2 * tolerance))
+    expectWithin(lnWeight([angle], tolerance), want, 1e-12, 'nepers')
+  })
+
+  test('of three points that are named twice has one build error in both', () => {
+    const tolerance = 0.5
+    const own = 0.1 ** 2 + 0.02 ** 2 + 2 * tolerance ** 2
+    const common = 0.004 + 0.02 ** 2 + 2 * tolerance ** 2
+    // Of the normal density of two offsets d, d with variances v and covariance c: det v² − c², square 2d²/(v + c).
+    const want = -(Math.log(own ** 2 - common ** 2) + (2 * 0.3 ** 2) / (own + common)) / 2
+    expectWithin(lnWeight([angle, angle], tolerance), want, 1e-9, 'nepers')
   })
 })
