@@ -13,15 +13,15 @@ export function auditAlternatives(
   window: { from: number; to: number },
   near: number,
 ): Alternative[] {
-  return readingsOf(inputs.target).map(({ choice, value, target }) => {
+  return readingsOf(inputs).map(({ choice, value, isOwn, line }) => {
     const from = window.from - YEARS_BEYOND_WINDOW
     const to = window.to + YEARS_BEYOND_WINDOW
-    const years = crossingYears(sightOf({ ...inputs, target }), from, to, STEP)
+    const years = crossingYears(sightOf(line), from, to, STEP)
     return {
       sightline: inputs.name,
       choice,
       value,
-      is_claims: target === inputs.target,
+      is_claims: isOwn,
       years,
       nearest_year: nearestYear(years, near),
     }

@@ -1,8 +1,11 @@
 import { nearestOffset } from '../inference/comparison.ts'
 import { bestFit } from '../inference/fit.ts'
 import { driftDegPerYear } from '../inference/implied-dates.ts'
+import { formatArcmin } from '../quantity/format-angle.ts'
+import { listed } from '../quantity/listed.ts'
 import { declinationDeg } from '../site/horizontal.ts'
-import type { Drift, SightlineAudit, Sweep, Value } from './audit.ts'
+import type { Drift, RefractionCheck, SightlineAudit, Sweep, Value } from './audit.ts'
+import { auditSkyline } from './audit-skyline.ts'
 import { middle } from './dated-label.ts'
 import { centimetres, markerOf, sunWidths } from './measures.ts'
 import { nearestBranch } from './nearest-branch.ts'
@@ -10,6 +13,7 @@ import { refractionAt, refractionAtHorizon } from './refraction-at.ts'
 import { sightOf } from './sight-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 import { yardstickSemidiameterArcmin } from './sun-yardstick.ts'
+import { partWords, turnByParts } from './survey/ends.ts'
 import { type TargetModel, targetModel } from './targets/target-model.ts'
 
 /** What one line says at the middle of the asserted date, with the body's size of that epoch. */
@@ -17,6 +21,7 @@ export function auditSightline(
   inputs: SightlineInputs,
   asserted: { from: number; to: number },
   sweep: Sweep | null,
+  refractionCheck: RefractionCheck | null,
 ): SightlineAudit {
   const year = middle(asserted)
   const target = targetModel(inputs)
@@ -28,11 +33,20 @@ export function auditSightline(
     name: inputs.name,
     body: inputs.target.body,
     measures: inputs.measures,
+    tolerance_scale: sightOf(inputs).toleranceScale,
     event: target.event,
     target: target.description,
     azimuth_deg: azimuthOf(inputs, target, year),
-    altitude_deg: { value: seen.deg, sd: seen.sdDeg },
-    refraction_arcmin: { value: refractionAt(inputs, seen.deg).arcmin, sd: inputs.refractionSdArcmin },
+    angle_deg: inputs.pair === null ? null : { value: inputs.measuredDeg, sd: inputs.measuredSdDeg },
+    survey: surveyOf(inputs),
+    altitude_deg: inputs.pair === null ? { value: seen.deg, sd: seen.sdDeg } : null,
+    refraction_arcmin:
+      inputs.pair === null
+        ? { value: refractionAt(inputs, seen.deg).arcmin, sd: inputs.refractionSdArcmin }
+        : null,
+    solstices: solsticesOf(inputs),
+    refraction_check: refractionCheck,
+    skyline: auditSkyline(inputs),
     semidiameter_arcmin:
       semidiameter === null ? null : { value: semidiameter.arcmin, sd: semidiameter.sdArcmin },
     centre_altitude_deg: altitude,
@@ -60,8 +74,35 @@ function closestIn(
   return offset === null ? null : { year, offset_arcmin: offset.offsetDeg * 60, sd_arcmin: offset.sdDeg * 60 }
 }
 
-/** A measured altitude stands on the meridian, on the side of the target. */
-function azimuthOf(inputs: SightlineInputs, target: TargetModel, year: number): Value {
+/** How the direction follows from the survey, and what was sighted of things that have a width. */
+function surveyOf({ survey, ends, lengthM }: SightlineInputs): string[] {
+  if (ends === null || lengthM === null) return [...survey]
+  const wide = [ends.from, ends.to].filter(({ form }) => form !== null)
+  if (wide.length === 0) return [...survey]
+  const parts = wide.map((end) => `${partWords(end)} of ${end.name}`)
+  const turn = turnByParts(ends, lengthM)
+  const effect =
+    turn === 0
+      ? ''
+      : `, which turns the line by ${formatArcmin(Math.abs(turn) * 60)} to the ${turn > 0 ? 'right' : 'left'}`
+  return [...survey, `Sighted: ${listed(parts)}${effect}.`]
+}
+
+function solsticesOf({ pair }: SightlineInputs): SightlineAudit['solstices'] {
+  if (pair === null) return null
+  return (['june', 'december'] as const).map((side) => {
+    const { horizonDeg, horizonSdDeg, refractionSdArcmin } = pair[side]
+    return {
+      solstice: side === 'june' ? 'June' : 'December',
+      altitude_deg: { value: horizonDeg, sd: horizonSdDeg },
+      refraction_arcmin: { value: refractionAtHorizon(pair[side]).arcmin, sd: refractionSdArcmin },
+    }
+  })
+}
+
+/** A measured altitude stands on the meridian, on the side of the target; an angle has no direction. */
+function azimuthOf(inputs: SightlineInputs, target: TargetModel, year: number): Value | null {
+  if (inputs.measures === 'angle') return null
   if (inputs.measures === 'azimuth') {
     return { value: inputs.measuredDeg, sd: Math.hypot(inputs.measuredSdDeg, inputs.northSdDeg) }
   }
@@ -85,12 +126,23 @@ function centreAltitudeOf(inputs: SightlineInputs, target: TargetModel, year: nu
     return { value: inputs.measuredDeg - refractionAtHorizon(inputs).arcmin / 60, sd }
   }
   const altitude = target.altitudeDeg(year)
-  return altitude === null ? null : { value: altitude.deg, sd: altitude.sdDeg }
+  if (altitude === null) return null
+  if (target.onLine === null) return { value: altitude.deg, sd: altitude.sdDeg }
+  const onLine = target.onLine(year)
+  return onLine === null ? null : { value: onLine.altitudeDeg, sd: altitude.sdDeg }
 }
 
 /** Errors of direction and altitude carried into the declination, by the derivatives of sin δ. */
-function declinationOf(inputs: SightlineInputs, target: TargetModel, altitude: Value, year: number): Value {
-  const azimuth = azimuthOf(inputs, target, year)
+function declinationOf(
+  inputs: SightlineInputs,
+  target: TargetModel,
+  altitude: Value,
+  year: number,
+): Value | null {
+  const ofLine = azimuthOf(inputs, target, year)
+  if (ofLine === null) return null
+  // On a slope the centre does not stand straight below the point that is touched.
+  const azimuth = { value: target.onLine?.(year)?.azimuthDeg ?? ofLine.value, sd: ofLine.sd }
   const at = (azimuthDeg: number, h: number) => declinationDeg(azimuthDeg, h, inputs.latitudeDeg)
   const step = 1e-3
   const perAzimuth =
@@ -127,5 +179,5 @@ function driftOf(inputs: SightlineInputs, year: number): Drift | null {
 
 /** Along the horizon a disc is wider the higher it stands; up the meridian it is not. */
 export function widthAltitude({ measures, horizonDeg }: SightlineInputs): number {
-  return measures === 'azimuth' ? horizonDeg : 0
+  return measures === 'altitude' ? 0 : horizonDeg
 }

@@ -1,13 +1,17 @@
 import { nearestOffset } from '../inference/comparison.ts'
+import type { SkyPlace } from '../sky/sky-place.ts'
 import type { Today } from './audit.ts'
 import { widthAltitude } from './audit-sightline.ts'
 import { centimetres, markerOf, sunWidths } from './measures.ts'
+import { nextChance } from './next-chance.ts'
 import { sightOf } from './sight-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 import { yardstickSemidiameterArcmin } from './sun-yardstick.ts'
 
-/** How far the line is from its target in the year the audit was made. */
-export function auditToday(inputs: SightlineInputs, year: number): Today {
+/** How far the line is from its target in the year the audit was made, and when it is next to be seen. */
+export function auditToday(inputs: SightlineInputs, place: SkyPlace, now: Date): Today {
+  const year = now.getUTCFullYear()
+  const { next, reason } = nextChance(inputs, place, now)
   const nearest = nearestOffset(sightOf(inputs), year)
   if (nearest === null) {
     return {
@@ -17,6 +21,8 @@ export function auditToday(inputs: SightlineInputs, year: number): Today {
       offset_arcmin: null,
       sun_widths: null,
       offset_cm: null,
+      next,
+      next_reason: reason,
     }
   }
   const offset = nearest.offsetDeg * 60
@@ -26,6 +32,8 @@ export function auditToday(inputs: SightlineInputs, year: number): Today {
     direction_deg: nearest.directionDeg,
     offset_arcmin: offset,
     sun_widths: sunWidths(Math.abs(offset), yardstickSemidiameterArcmin(year), widthAltitude(inputs)),
-    offset_cm: centimetres(Math.abs(offset), markerOf(inputs.lengthM)),
+    offset_cm: inputs.measures === 'angle' ? null : centimetres(Math.abs(offset), markerOf(inputs.lengthM)),
+    next,
+    next_reason: reason,
   }
 }

@@ -11,6 +11,8 @@ export interface Audit {
   /** Base name of the claim file. */
   file: string
   input_sha256: string
+  /** The files beside the claim file that it names, in its order. */
+  attachments: readonly { path: string; sha256: string }[]
   /** The claim file's content, echoed as plain values. */
   claim: Readonly<Record<string, unknown>>
   statement: string
@@ -31,6 +33,10 @@ export interface Audit {
   findings: readonly Finding[]
   assumptions: readonly Assumption[]
   sightlines: readonly SightlineAudit[]
+  /** The survey seen from above. */
+  plan: Plan
+  /** Where each line's target stood at the asserted date, at the independent ones, and stands today. */
+  placements: readonly Placement[]
   tracks: readonly Track[]
   implied: readonly Implied[]
   checks: readonly Check[]
@@ -109,18 +115,33 @@ export interface Value {
 
 export interface SightlineAudit {
   name: string
-  body: 'sun' | 'moon' | 'star' | 'two stars'
-  /** What the line gives: its azimuth, or an apparent altitude on the meridian. */
-  measures: 'azimuth' | 'altitude'
+  body: 'sun' | 'sun at both solstices' | 'moon' | 'star' | 'two stars'
+  /** What the line gives: its azimuth, an apparent altitude on the meridian, or the angle between two lines. */
+  measures: 'azimuth' | 'altitude' | 'angle'
+  /** The standard deviation of what was built, in build tolerances: 1, or √2 for an angle between two built lines. */
+  tolerance_scale: number
   /** The event in words, such as `June solstice sunrise`. */
   event: string
   /** The target in words, such as `June solstice sunrise, upper limb on the horizon`. */
   target: string
-  /** On the meridian 0 or 180. */
-  azimuth_deg: Value
-  /** Apparent altitude at which the target is seen: of the horizon, of a star's first sight, or the one measured. */
-  altitude_deg: Value
-  refraction_arcmin: Value
+  /** On the meridian 0 or 180; null for an angle. */
+  azimuth_deg: Value | null
+  /** The angle between the lines to the two solstices; null for a single line. */
+  angle_deg: Value | null
+  /** How the direction follows from the survey, a sentence each: bearing, convergence, declination, parts sighted. */
+  survey: readonly string[]
+  /**
+   * Apparent altitude at which the target is seen: of the horizon, of a star's first sight, or the one measured; null
+   * for an angle, whose two lines have horizons of their own.
+   */
+  altitude_deg: Value | null
+  refraction_arcmin: Value | null
+  /** Of an angle: the horizon and the refraction of each of its lines. */
+  solstices: readonly { solstice: string; altitude_deg: Value; refraction_arcmin: Value }[] | null
+  /** The refraction that the claim took, held against the air of the place; null where it states none. */
+  refraction_check: RefractionCheck | null
+  /** What the line meets the sky at; null where no horizon plays a part. */
+  skyline: Skyline | null
   /** Semidiameter of the body at the middle of the asserted date; null for a star. */
   semidiameter_arcmin: Value | null
   /** True altitude of the body's centre, geocentric; null for two stars one above the other. */
@@ -145,6 +166,86 @@ export interface SightlineAudit {
   notes: readonly string[]
   /** This line's own sweep; null where the claim has one line only. */
   sweep: Sweep | null
+}
+
+/** The skyline of one line, in apparent altitudes. */
+export interface Skyline {
+  from: 'altitude' | 'distance' | 'point' | 'sea' | 'profile' | 'level'
+  /** How it was had, in a sentence. */
+  words: string
+  /** Where it is known from a profile, azimuths and altitudes of its nodes in degrees, ascending; else one node. */
+  nodes: readonly (readonly [number, number])[]
+  /** Altitude where the line meets it, degrees. */
+  at_line_deg: Value
+}
+
+/** A refraction that a claim states, against the one traced through the air of the place. */
+export interface RefractionCheck {
+  stated_arcmin: number
+  traced_arcmin: number
+  /** What textbooks give at sea level, 10 °C and 1010 hPa for the same apparent altitude (Bennett 1982). */
+  sea_level_arcmin: number
+  /** Whether the one stated is, to 1.5′, the one for sea level, while that of the place is further from it. */
+  is_sea_level: boolean
+  /** What the difference between stated and traced does to the implied date, years; null where there is no date. */
+  effect_years: number | null
+}
+
+/** Points and lines seen from above, true north up. */
+export interface Plan {
+  /** How north was found, in words, and one standard deviation of it; null where no line rests on a plan's north. */
+  north: { words: string; sd_deg: number } | null
+  /** Metres east and north of the first point. Far ones (by their coordinates on the Earth) lie where a map would have them. */
+  points: readonly PlanPoint[]
+  lines: readonly PlanLine[]
+}
+
+export interface PlanPoint {
+  name: string
+  east_m: number
+  north_m: number
+  sd_m: number
+  /** Across the line of sight; null for a point. */
+  width_m: number | null
+  form: 'post' | 'gap' | null
+}
+
+/** A line of the plan; `from` and `to` are indices of its points, null for a bare direction. */
+export interface PlanLine {
+  sightline: string
+  from: number | null
+  to: number | null
+  /** From true north; of an angle, its first line clockwise: null where that has no direction of its own. */
+  azimuth_deg: number | null
+  /** Of an angle: its second point and the angle clockwise from the first line, degrees. */
+  span: { to: number | null; angle_deg: number } | null
+  length_m: number | null
+}
+
+/** Where the target of one line stood at one date, when its sighted part stood on the skyline. */
+export interface Placement {
+  sightline: string
+  kind: 'asserted' | 'independent' | 'today'
+  /** Of the date: `asserted date`, that of an independent one, `today`. */
+  label: string
+  /** The date as the report prints it. */
+  printed: string
+  /** The year looked at, and the ends of the date. */
+  year: number
+  from: number
+  to: number
+  /** Direction at `year`, of that branch of the target which is nearest the line then; null where it has none. */
+  direction_deg: number | null
+  /** Directions over the whole date, least and greatest, of the same branch; null likewise. */
+  direction_range_deg: readonly [number, number] | null
+  /** The line less the direction at `year`, arcminutes. */
+  offset_arcmin: number | null
+  /** One standard deviation of all errors but the builders'. */
+  offset_sd_arcmin: number | null
+  /** The size of the offset at the marker, or at 100 m where the line's length is not known; null but for an azimuth. */
+  offset_cm: number | null
+  /** The body's disc as seen then: centre (apparent) and semidiameter; null for a star, on the meridian, for an angle. */
+  disc: { azimuth_deg: number; altitude_deg: number; semidiameter_arcmin: number } | null
 }
 
 export interface Drift {
@@ -343,4 +444,22 @@ export interface Today {
   offset_arcmin: number | null
   sun_widths: number | null
   offset_cm: number | null
+  /** When and where to look for oneself; null where no chance is reckoned, `next_reason` says why. */
+  next: NextChance | null
+  next_reason: string | null
+}
+
+export interface NextChance {
+  /** Local calendar day, ISO 8601. */
+  date: string
+  /** Universal time to the minute; null where the claim gives no longitude. */
+  utc: string | null
+  /** Other days as good, ISO 8601, first and last; null where there is only that one. */
+  days: readonly [string, string] | null
+  /** Where the target is then to be seen: the direction of the line's own reckoning. */
+  direction_deg: number | null
+  /** To have it over the foresight, stand so many metres beside the backsight, to the right positive; null where unknown. */
+  stand_right_m: number | null
+  /** Sentences on what else matters: phase of the Moon, hour of the night. */
+  notes: readonly string[]
 }

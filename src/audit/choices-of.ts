@@ -1,6 +1,8 @@
-import type { Target } from '../claim/claim.ts'
+import type { Sightline, Target } from '../claim/claim.ts'
+import { sightedChoice } from './readings-of.ts'
+import type { SightlineInputs } from './sightline-inputs.ts'
 
-/** Something that a target leaves to be chosen. */
+/** Something that a line and its target leave to be chosen. */
 export interface Choice {
   /** As `readingsOf` names it. */
   choice: string
@@ -8,8 +10,21 @@ export interface Choice {
   basis: string
 }
 
-/** Everything that the readings of a target can differ in, and what the claim says of it. */
-export function choicesOf(target: Target): Choice[] {
+/** Everything that the readings of a line can differ in, and what the claim says of it. */
+export function choicesOf({ target, direction }: Sightline, line: SightlineInputs): Choice[] {
+  const { ends } = line
+  if (direction.by !== 'points' || ends === null) return choicesOfTarget(target)
+  const ofEnds = (['from', 'to'] as const)
+    .filter((side) => ends[side].form !== null)
+    .map((side) => ({
+      choice: sightedChoice(ends[side]),
+      said: direction.sighted[side],
+      basis: 'the claim does not say what was sighted of it; our choice',
+    }))
+  return [...choicesOfTarget(target), ...ofEnds]
+}
+
+function choicesOfTarget(target: Target): Choice[] {
   switch (target.body) {
     case 'sun':
       return [
@@ -24,6 +39,7 @@ export function choicesOf(target: Target): Choice[] {
           : []),
         { choice: 'part of the disc', said: target.disc, basis: discBasis(target.at === 'noon') },
       ]
+    case 'sun at both solstices':
     case 'moon':
       return [{ choice: 'part of the disc', said: target.disc, basis: discBasis(false) }]
     case 'star':

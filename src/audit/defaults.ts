@@ -11,9 +11,16 @@ export const DEFAULTS = {
   horizonSdDeg: 2 / 60,
   azimuthSdDeg: 2 / 60,
   altitudeSdDeg: 2 / 60,
-  pointSdM: 0.05,
-  /** By how north was found; the compass figure is the best a compass does. */
-  northSdDeg: { compass: 0.5, gps: 1 / 60, sun: 1 / 60, plan: 2 },
+  /** By what a point is given in: a survey of the plan, a hand-held satellite receiver, coordinates off a map or a control network. */
+  pointSdM: { plan: 0.05, geographic: 3, grid: 1 },
+  /** Of two satellite positions that north was found by, where only one of the two figures is stated. */
+  gpsAccuracyM: 0.02,
+  gpsBaselineM: 100,
+  /** Of a horizon by its distance and rise: a map's contour, and its scale. */
+  riseSdM: 5,
+  distanceSdShare: 0.01,
+  /** Of the height of the eye above the sea. */
+  eyeSdM: 1,
   disc: 'upper limb',
   /** At noon nothing stands on the horizon: the middle of the disc, or of its light. */
   discAtNoon: 'centre',

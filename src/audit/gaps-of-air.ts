@@ -3,6 +3,7 @@ import { formatNumber } from '../quantity/format-number.ts'
 import { isUnstated } from '../quantity/unstated.ts'
 import type { Air } from '../site/air.ts'
 import type { Gap } from './gap.ts'
+import { inBothLines } from './in-both-lines.ts'
 import { airOf } from './settle-sightline.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 
@@ -68,6 +69,9 @@ export function airGaps(claim: Claim): Gap[] {
 }
 
 function withAir(line: SightlineInputs, change: Partial<Air>): SightlineInputs {
-  if (line.refraction.by === 'claim') return line
-  return { ...line, refraction: { by: 'ray trace', air: { ...line.refraction.air, ...change } } }
+  return inBothLines(line, (own) =>
+    own.refraction.by === 'claim'
+      ? own
+      : { ...own, refraction: { by: 'ray trace', air: { ...own.refraction.air, ...change } } },
+  )
 }

@@ -1,97 +1,134 @@
-import type { Claim, Sightline } from '../claim/claim.ts'
+import type { Claim, Direction, Sightline } from '../claim/claim.ts'
+import { DEG } from '../quantity/degrees.ts'
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatCm } from '../quantity/format-length.ts'
 import { isUnstated, type Unstated } from '../quantity/unstated.ts'
 import { DEFAULTS } from './defaults.ts'
 import type { Gap } from './gap.ts'
-import { northSdDeg } from './settle-sightline.ts'
+import { northGaps } from './gaps-of-north.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
+import { turnedLine } from './turned-line.ts'
 
 /** What one sightline leaves open of its direction: its uncertainty, and north. */
 export function directionGaps(
   claim: Claim,
-  sightline: Sightline,
+  { direction }: Sightline,
   inputs: SightlineInputs,
   of: string,
 ): Gap[] {
-  const turned = (deg: number) => (line: SightlineInputs) => [
-    { ...line, measuredDeg: line.measuredDeg + deg },
-    { ...line, measuredDeg: line.measuredDeg - deg },
-  ]
-  const { direction } = sightline
-  if (direction.by === 'altitude') {
-    if (!isUnstated(direction.altitudeDeg.sd)) return []
-    const sd = formatArcmin(DEFAULTS.altitudeSdDeg * 60)
-    return [
-      {
+  switch (direction.by) {
+    case 'altitude':
+      return measuredGap(direction.altitudeDeg.sd, {
         what: `uncertainty of the altitude${of}`,
-        said: direction.altitudeDeg.sd,
-        used: `± ${sd}`,
         basis: 'a careful survey of worn stone; our choice',
-        change: { words: `an altitude ${sd} higher or lower`, of: turned(DEFAULTS.altitudeSdDeg) },
-      },
-    ]
-  }
-  if (direction.by === 'azimuth') {
-    if (!isUnstated(direction.azimuthDeg.sd)) return []
-    const sd = formatArcmin(DEFAULTS.azimuthSdDeg * 60)
-    return [
-      {
+        sdDeg: DEFAULTS.altitudeSdDeg,
+        words: (sd) => `an altitude ${sd} higher or lower`,
+      })
+    case 'azimuth':
+      return measuredGap(direction.azimuthDeg.sd, {
         what: `uncertainty of the azimuth${of}`,
-        said: direction.azimuthDeg.sd,
-        used: `± ${sd}`,
         basis: 'a careful survey of worn stone, north included; our choice',
-        change: { words: `the line ${sd} further left or right`, of: turned(DEFAULTS.azimuthSdDeg) },
-      },
-    ]
+        sdDeg: DEFAULTS.azimuthSdDeg,
+        words: (sd) => `the line ${sd} further left or right`,
+      })
+    case 'points':
+      return [
+        ...pointGaps(claim, [direction.from, direction.to], inputs, 'the line', 'further left or right'),
+        ...tieGaps(claim, direction, inputs),
+        ...northGaps(claim, direction, inputs),
+      ]
+    case 'span':
+      return spanGaps(claim, direction, inputs, of)
   }
-  const points = [direction.from, direction.to].flatMap((name) => {
-    const said = claim.points.get(name)?.uncertaintyM
-    return said === undefined || !isUnstated(said) ? [] : [{ name, said }]
-  })
-  const lineSd = formatArcmin(inputs.measuredSdDeg * 60)
-  const pointGaps = points.map(
-    ({ name, said }): Gap => ({
-      what: `uncertainty of the point ${name}`,
-      said,
-      used: `± ${formatCm(DEFAULTS.pointSdM * 100)}`,
-      basis: 'a taped or tachymetric survey of stones with worn edges; our choice',
-      change: { words: `the line ${lineSd} further left or right`, of: turned(inputs.measuredSdDeg) },
-    }),
-  )
-  return [...pointGaps, ...northGap(claim, turned)]
 }
 
-function northGap(
-  claim: Claim,
-  turned: (deg: number) => (line: SightlineInputs) => SightlineInputs[],
+/** A line from the plan to a place on the Earth rests on where the plan is. */
+function tieGaps(
+  { points }: Claim,
+  { from, to }: Extract<Direction, { by: 'points' }>,
+  { lengthM }: SightlineInputs,
 ): Gap[] {
-  const { north } = claim
-  const compass = DEFAULTS.northSdDeg.compass
-  const sd = northSdDeg(claim)
-  const words = (deg: number) => `north ${formatArcmin(deg * 60)} further left or right`
-  if (north === 'omitted') {
-    return [
-      {
-        what: 'the plan’s north',
-        said: 'omitted',
-        used: 'true north, without error',
-        basis: 'the claim’s own premise: it says nothing of how north was found',
-        change: { words: `${words(compass)}, the best a compass does`, of: turned(compass) },
-      },
-    ]
-  }
-  if (north !== 'unknown' && !isUnstated(north.uncertaintyDeg)) return []
+  const kinds = [from, to].map((name) => points.get(name)?.by)
+  const tie = [...points].find(([, point]) => point.by === 'plan' && point.tie !== null)
+  if (
+    tie === undefined ||
+    lengthM === null ||
+    !kinds.includes('plan') ||
+    kinds.every((kind) => kind === 'plan')
+  )
+    return []
+  const sdM = DEFAULTS.pointSdM.geographic
+  const turnDeg = sdM / lengthM / DEG
   return [
     {
-      what: 'uncertainty of the plan’s north',
-      said: north === 'unknown' ? 'unknown' : (north.uncertaintyDeg as Unstated),
-      used: `± ${formatArcmin(sd * 60)}`,
-      basis:
-        north === 'unknown'
-          ? 'a compass at its best; our choice'
-          : `usual for north from ${north.from}; our choice`,
-      change: { words: words(sd), of: turned(sd) },
+      what: `uncertainty of where ${tie[0]} is on the Earth`,
+      said: 'omitted',
+      used: `± ${formatCm(sdM * 100)}`,
+      basis: BASIS_OF_POINT.geographic,
+      change: {
+        words: `the line ${formatArcmin(turnDeg * 60)} further left or right`,
+        of: turnedLine(turnDeg),
+      },
     },
   ]
+}
+
+function spanGaps(
+  claim: Claim,
+  { span }: Extract<Direction, { by: 'span' }>,
+  inputs: SightlineInputs,
+  of: string,
+): Gap[] {
+  if (span.by === 'points') {
+    return pointGaps(claim, [span.from, span.june, span.december], inputs, 'the angle', 'wider or narrower')
+  }
+  return measuredGap(span.angleDeg.sd, {
+    what: `uncertainty of the angle${of}`,
+    basis: 'a careful survey of worn stone; our choice',
+    sdDeg: DEFAULTS.azimuthSdDeg,
+    words: (sd) => `an angle ${sd} wider or narrower`,
+  })
+}
+
+function measuredGap(
+  said: number | Unstated,
+  {
+    what,
+    basis,
+    sdDeg,
+    words,
+  }: { what: string; basis: string; sdDeg: number; words: (sd: string) => string },
+): Gap[] {
+  if (!isUnstated(said)) return []
+  const sd = formatArcmin(sdDeg * 60)
+  return [{ what, said, used: `± ${sd}`, basis, change: { words: words(sd), of: turnedLine(sdDeg) } }]
+}
+
+const BASIS_OF_POINT = {
+  plan: 'a taped or tachymetric survey of stones with worn edges; our choice',
+  geographic: 'a hand-held satellite receiver, or coordinates off a map; our choice',
+  grid: 'coordinates off a large-scale map or a satellite survey; our choice',
+} as const
+
+function pointGaps(
+  claim: Claim,
+  names: readonly string[],
+  inputs: SightlineInputs,
+  what: string,
+  ways: string,
+): Gap[] {
+  const sd = formatArcmin(inputs.measuredSdDeg * 60)
+  return [...new Set(names)].flatMap((name): Gap[] => {
+    const point = claim.points.get(name)
+    if (point === undefined || !isUnstated(point.uncertaintyM)) return []
+    return [
+      {
+        what: `uncertainty of the point ${name}`,
+        said: point.uncertaintyM,
+        used: `± ${formatCm(DEFAULTS.pointSdM[point.by] * 100)}`,
+        basis: BASIS_OF_POINT[point.by],
+        change: { words: `${what} ${sd} ${ways}`, of: turnedLine(inputs.measuredSdDeg) },
+      },
+    ]
+  })
 }

@@ -6,7 +6,9 @@ import { choicesOf } from './choices-of.ts'
 import type { Gap } from './gap.ts'
 import { airGaps } from './gaps-of-air.ts'
 import { directionGaps } from './gaps-of-direction.ts'
+import { horizonGaps } from './gaps-of-horizon.ts'
 import { gapsOfTarget } from './gaps-of-target.ts'
+import { inBothLines } from './in-both-lines.ts'
 import { readingsOf } from './readings-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 import { usesHorizon } from './uses-horizon.ts'
@@ -15,8 +17,8 @@ import { usesHorizon } from './uses-horizon.ts'
 export function gapsOfLine(claim: Claim, sightline: Sightline, inputs: SightlineInputs): Gap[] {
   const of = claim.sightlines.length > 1 ? ` of ${sightline.name}` : ''
   return [
-    ...(usesHorizon(inputs) ? horizonGaps(sightline, inputs, of) : []),
-    ...targetGaps(sightline, inputs, of),
+    ...(usesHorizon(inputs) ? horizonGaps(claim, sightline, inputs, of) : []),
+    ...choiceGaps(sightline, inputs, of),
     ...gapsOfTarget(inputs, of),
     ...directionGaps(claim, sightline, inputs, of),
     ...(inputs.target.body === 'two stars' ? [] : refractionGaps(claim, inputs, of)),
@@ -47,42 +49,13 @@ function modelGap(inputs: SightlineInputs): Gap {
   }
 }
 
-function horizonGaps({ horizonDeg: horizon }: Sightline, inputs: SightlineInputs, of: string): Gap[] {
-  const either = (line: SightlineInputs) => [
-    { ...line, horizonDeg: line.horizonDeg + line.horizonSdDeg },
-    { ...line, horizonDeg: line.horizonDeg - line.horizonSdDeg },
-  ]
-  const sd = formatArcmin(inputs.horizonSdDeg * 60)
-  if (isUnstated(horizon)) {
-    return [
-      {
-        what: `altitude of the horizon${of}`,
-        said: horizon,
-        used: `level, 0° ± ${sd}`,
-        basis: 'a level horizon, widened for hills that nobody measured; our choice',
-        change: { words: `a horizon ${sd} higher or lower`, of: either },
-      },
-    ]
-  }
-  if (!isUnstated(horizon.sd)) return []
-  return [
-    {
-      what: `uncertainty of the horizon’s altitude${of}`,
-      said: horizon.sd,
-      used: `± ${sd}`,
-      basis: 'a careful reading with a theodolite or clinometer of a clear skyline; our choice',
-      change: { words: `a horizon ${sd} higher or lower`, of: either },
-    },
-  ]
-}
-
-/** What of the target the claim leaves open, each with the other readings of it. */
-function targetGaps({ target: stated }: Sightline, inputs: SightlineInputs, of: string): Gap[] {
-  return choicesOf(stated).flatMap(({ choice, said, basis }) => {
+/** What of the target and of the things sighted the claim leaves open, each with the other readings of it. */
+function choiceGaps(stated: Sightline, inputs: SightlineInputs, of: string): Gap[] {
+  return choicesOf(stated, inputs).flatMap(({ choice, said, basis }) => {
     if (!isUnstated(said)) return []
-    const readings = readingsOf(inputs.target).filter((reading) => reading.choice === choice)
-    const own = readings.find((reading) => reading.target === inputs.target)
-    const others = readings.filter((reading) => reading.target !== inputs.target)
+    const readings = readingsOf(inputs).filter((reading) => reading.choice === choice)
+    const own = readings.find(({ isOwn }) => isOwn)
+    const others = readings.filter(({ isOwn }) => !isOwn)
     return own === undefined
       ? []
       : [
@@ -93,7 +66,7 @@ function targetGaps({ target: stated }: Sightline, inputs: SightlineInputs, of: 
             basis,
             change: {
               words: `${listed(others.map((reading) => reading.value))} instead`,
-              of: (line: SightlineInputs) => others.map(({ target }) => ({ ...line, target })),
+              of: () => others.map((reading) => reading.line),
             },
           },
         ]
@@ -112,10 +85,10 @@ function refractionGaps(claim: Claim, inputs: SightlineInputs, of: string): Gap[
             '9.6′ e^(−h/1°), at least 0.3′ and at most 9.6′: our choice, after Schaefer & Liller 1990 and Sampson et al. 2003',
           change: {
             words: 'refraction larger or smaller by that much',
-            of: (line) => [
-              { ...line, refractionShiftArcmin: inputs.refractionSdArcmin },
-              { ...line, refractionShiftArcmin: -inputs.refractionSdArcmin },
-            ],
+            of: (line) =>
+              [inputs.refractionSdArcmin, -inputs.refractionSdArcmin].map((refractionShiftArcmin) =>
+                inBothLines(line, (own) => ({ ...own, refractionShiftArcmin })),
+              ),
           },
         },
       ]

@@ -30,6 +30,8 @@ export function gapsOfTarget({ target }: SightlineInputs, of: string): Gap[] {
         ),
       ]
     }
+    case 'sun at both solstices':
+      return []
     case 'moon':
       return [
         gap(

@@ -1,5 +1,6 @@
 import type { Claim } from '../claim/claim.ts'
 import { isUnstated } from '../quantity/unstated.ts'
+import type { SkyPlace } from '../sky/sky-place.ts'
 import { listAssumptions } from './assumptions.ts'
 import type { Audit, SightlineAudit, Sweep } from './audit.ts'
 import { auditAlternatives } from './audit-alternatives.ts'
@@ -7,6 +8,9 @@ import { auditBudget, auditBudgetCheck } from './audit-budget.ts'
 import { auditChecks } from './audit-checks.ts'
 import { auditImplied } from './audit-implied.ts'
 import { auditLimits } from './audit-limits.ts'
+import { auditPlacements } from './audit-placements.ts'
+import { auditPlan } from './audit-plan.ts'
+import { auditRefractionCheck } from './audit-refraction-check.ts'
 import { auditReproduction, modelsOfDates, modelsToTry } from './audit-reproduction.ts'
 import { auditSightline } from './audit-sightline.ts'
 import { auditSweep, groundOf, sweepStep } from './audit-sweep.ts'
@@ -47,7 +51,9 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
   const ground = groundOf(sights, dates)
   const sweep = auditSweep(ground, dates, yardstick, wantedArcmin)
   const limits = auditLimits(ground, dates, yardstick.marker)
-  const sightlines = lines.map((line) => auditSightline(line, asserted, ownSweep(line, settled)))
+  const sightlines = lines.map((line) =>
+    auditSightline(line, asserted, ownSweep(line, settled), auditRefractionCheck(claim, line, window, year)),
+  )
   const implied = lines.flatMap((line) =>
     modelsOfDates(claim, line).map((model) => auditImplied(line, model, window, present)),
   )
@@ -76,6 +82,7 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
     made_on: context.now.toISOString().slice(0, 10),
     file: context.file,
     input_sha256: context.sha256,
+    attachments: claim.attachments,
     claim: claim.echo,
     statement: claim.statement,
     source: claim.source,
@@ -92,6 +99,8 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
     }),
     findings: writeFindings({ ...facts, implied, checks, reproduction }),
     assumptions: listAssumptions(claim, lines, window),
+    plan: auditPlan(claim, lines),
+    placements: lines.flatMap((line) => auditPlacements(line, asserted, others, present)),
     tracks: lines.flatMap((line) => tracksOf(line, window)),
     implied,
     checks,
@@ -100,10 +109,18 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
     ...budgetOf(settled, ours[0]!.dates),
     alternatives: lines.flatMap((line) => auditAlternatives(line, window, year)),
     chance: null,
-    today: lines.map((line) => auditToday(line, present)),
+    today: lines.map((line) => auditToday(line, placeOf(claim), context.now)),
     warnings: listWarnings(claim, settled, ours, sweep, context.readingWarnings),
     references: referencesOf(claim, lines),
   })
+}
+
+function placeOf({ structure }: Claim): SkyPlace {
+  return {
+    latitudeDeg: structure.latitudeDeg,
+    longitudeDeg: structure.longitudeDeg,
+    heightM: statedOr(structure.elevationM, DEFAULTS.elevationM),
+  }
 }
 
 function structureOf({ structure }: Claim): Audit['structure'] {
@@ -162,6 +179,13 @@ function tolerancesWithin({ steps }: Sweep, { low_arcmin, high_arcmin }: Audit['
 }
 
 /** A plan that says nothing of its north is taken as true where a line runs between its points. */
-function isNorthTaken({ north, sightlines }: Claim): boolean {
-  return north === 'omitted' && sightlines.some(({ direction }) => direction.by === 'points')
+function isNorthTaken({ north, sightlines, points }: Claim): boolean {
+  return (
+    north === 'omitted' &&
+    sightlines.some(
+      ({ direction }) =>
+        direction.by === 'points' &&
+        [direction.from, direction.to].every((name) => points.get(name)?.by === 'plan'),
+    )
+  )
 }

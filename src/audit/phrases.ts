@@ -80,8 +80,10 @@ export function plausibleWords(plausible: {
   return `${range}, ${plausible.stated ? 'as the claim file states them' : 'this program’s default'},`
 }
 
-/** The side of the line on which its target stood, as one faces the horizon; above or below for an altitude. */
-export function sideOf(offsetArcmin: number, measures: 'azimuth' | 'altitude'): string {
+/** Where a target stood from its line as one faces the horizon; from what was measured for an altitude or an angle. */
+export function sideOf(offsetArcmin: number, measures: 'azimuth' | 'altitude' | 'angle'): string {
   if (measures === 'altitude') return offsetArcmin > 0 ? 'below what was measured' : 'above what was measured'
+  if (measures === 'angle')
+    return offsetArcmin > 0 ? 'narrower than the angle measured' : 'wider than the angle measured'
   return offsetArcmin > 0 ? 'to the left of the line' : 'to the right of the line'
 }

@@ -15,6 +15,7 @@ export function referencesOf(claim: Claim, lines: readonly SightlineInputs[]): s
       ...ALWAYS,
       ...lines.flatMap((line) => modelsToTry(claim, line)),
       ...lines.flatMap(worksOf),
+      ...worksOfSurvey(claim),
       ...(claim.otherDates.length > 0 ? ['kass1995'] : []),
       ...(needsAir && isUnstated(refractionArcmin) ? ['auer2000', 'hohenkerk1985', 'bennett1982'] : []),
       ...(needsAir && isUnstated(refractionUncertaintyArcmin) ? ['sampson2003', 'schaefer1990'] : []),
@@ -23,10 +24,30 @@ export function referencesOf(claim: Claim, lines: readonly SightlineInputs[]): s
   ].sort()
 }
 
+/** Works that the directions between points rest on. */
+function worksOfSurvey({ points, grid, north, sightlines }: Claim): string[] {
+  const used = sightlines.flatMap(({ direction }) => {
+    if (direction.by === 'points') return [direction.from, direction.to]
+    if (direction.by !== 'span' || direction.span.by !== 'points') return []
+    return [direction.span.from, direction.span.june, direction.span.december]
+  })
+  const kinds = new Set(used.map((name) => points.get(name)?.by))
+  const isProjected = grid?.by === 'projection'
+  const isOnEarth = kinds.has('geographic') || (kinds.has('grid') && isProjected)
+  const isGridNorth = !isUnstated(north) && north.from === 'grid' && north.convergence === null
+  const isModelled = !isUnstated(north) && north.date !== null && kinds.has('plan')
+  return [
+    ...(isOnEarth ? ['karney2013'] : []),
+    ...(isProjected && (kinds.has('grid') || isGridNorth) ? ['karney2011'] : []),
+    ...(isModelled ? ['chulliat2025'] : []),
+  ]
+}
+
 /** Works that one kind of target rests on. */
 function worksOf({ target }: SightlineInputs): string[] {
   switch (target.body) {
     case 'sun':
+    case 'sun at both solstices':
       return ['laskar2004']
     case 'moon':
       return ['laskar2004']

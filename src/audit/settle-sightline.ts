@@ -1,104 +1,188 @@
-import type { Claim, Direction, Sightline } from '../claim/claim.ts'
+import type { Claim, Direction, Horizon, Sightline } from '../claim/claim.ts'
 import { wrap360 } from '../quantity/degrees.ts'
-import { isUnstated } from '../quantity/unstated.ts'
+import { isUnstated, type Unstated } from '../quantity/unstated.ts'
 import { type Air, STANDARD_LAPSE_K_PER_KM, standardPressureHpa, standardTemperatureC } from '../site/air.ts'
-import { lineDirection } from '../site/line-direction.ts'
 import { refractionScatterArcmin } from '../site/refraction-scatter.ts'
+import { firstVisibility } from '../sky/first-visibility.ts'
 import { DEFAULTS } from './defaults.ts'
+import { settleHorizon } from './settle-horizon.ts'
 import { settleTarget } from './settle-target.ts'
-import type { Refraction, SightlineInputs } from './sightline-inputs.ts'
+import type { Refraction, SettledTarget, SightlineInputs } from './sightline-inputs.ts'
 import { statedOr } from './stated-or.ts'
+import { endsOf, turnByParts } from './survey/ends.ts'
+import { surveyedLine } from './survey/surveyed-line.ts'
+import { surveyedSpan } from './survey/surveyed-span.ts'
 
 /** Fills every gap of one sightline of a claim with its default. */
 export function settleSightline(claim: Claim, sightline: Sightline): SightlineInputs {
-  const line = lineOf(claim, sightline)
-  return {
-    name: sightline.name,
-    target: settleTarget(sightline.target),
-    latitudeDeg: claim.structure.latitudeDeg,
-    ...line,
-    refraction: refractionOf(claim),
-    refractionShiftArcmin: 0,
-    refractionSdArcmin: statedOr(
-      claim.atmosphere.refractionUncertaintyArcmin,
-      refractionScatterArcmin(line.horizonDeg),
-    ),
-    model: 'vondrak2011',
+  const { direction } = sightline
+  const target = settleTarget(sightline.target)
+  switch (direction.by) {
+    case 'altitude':
+      return onMeridian(claim, sightline, direction, target)
+    case 'azimuth': {
+      const azimuth = {
+        measuredDeg: wrap360(direction.azimuthDeg.value),
+        measuredSdDeg: statedOr(direction.azimuthDeg.sd, DEFAULTS.azimuthSdDeg),
+        northSdDeg: 0,
+        axis: null,
+        ends: null,
+        survey: [],
+        lengthM: null,
+      }
+      return alongHorizon(claim, sightline, azimuth, target)
+    }
+    case 'points':
+      return alongHorizon(claim, sightline, betweenPoints(claim, direction), target)
+    case 'span':
+      return betweenSolstices(claim, sightline, direction, target)
   }
 }
 
 type Line = Pick<
   SightlineInputs,
-  | 'measures'
-  | 'measuredDeg'
-  | 'measuredSdDeg'
-  | 'northSdDeg'
-  | 'axis'
-  | 'lengthM'
-  | 'horizonDeg'
-  | 'horizonSdDeg'
+  'measuredDeg' | 'measuredSdDeg' | 'northSdDeg' | 'axis' | 'ends' | 'survey' | 'lengthM'
 >
 
-function lineOf(claim: Claim, { direction, horizonDeg: horizon }: Sightline): Line {
-  if (direction.by === 'altitude') {
-    const { value, sd } = direction.altitudeDeg
-    const measuredSdDeg = statedOr(sd, DEFAULTS.altitudeSdDeg)
-    return {
-      measures: 'altitude',
-      measuredDeg: value,
-      measuredSdDeg,
-      northSdDeg: 0,
-      axis: null,
-      lengthM: null,
-      horizonDeg: value,
-      horizonSdDeg: measuredSdDeg,
-    }
-  }
+/** What all lines of a claim have alike. */
+function common(claim: Claim, name: string, horizonDeg: number) {
   return {
-    measures: 'azimuth',
-    ...azimuthOf(claim, direction),
-    horizonDeg: isUnstated(horizon) ? 0 : horizon.value,
-    horizonSdDeg: isUnstated(horizon)
-      ? DEFAULTS.unknownHorizonSdDeg
-      : statedOr(horizon.sd, DEFAULTS.horizonSdDeg),
+    name,
+    latitudeDeg: claim.structure.latitudeDeg,
+    horizonShiftDeg: 0,
+    pair: null,
+    refraction: refractionOf(claim),
+    refractionShiftArcmin: 0,
+    refractionSdArcmin: statedOr(
+      claim.atmosphere.refractionUncertaintyArcmin,
+      refractionScatterArcmin(horizonDeg),
+    ),
+    isRefractionSdStated: !isUnstated(claim.atmosphere.refractionUncertaintyArcmin),
+    model: 'vondrak2011' as const,
   }
 }
 
-function azimuthOf(
+function onMeridian(
   claim: Claim,
-  direction: Exclude<Direction, { by: 'altitude' }>,
-): Pick<SightlineInputs, 'measuredDeg' | 'measuredSdDeg' | 'northSdDeg' | 'axis' | 'lengthM'> {
-  if (direction.by === 'azimuth') {
-    return {
-      measuredDeg: wrap360(direction.azimuthDeg.value),
-      measuredSdDeg: statedOr(direction.azimuthDeg.sd, DEFAULTS.azimuthSdDeg),
-      northSdDeg: 0,
-      axis: null,
-      lengthM: null,
-    }
-  }
-  const line = lineDirection(surveyed(claim, direction.from), surveyed(claim, direction.to))
+  { name }: Sightline,
+  { altitudeDeg }: Extract<Direction, { by: 'altitude' }>,
+  target: SettledTarget,
+): SightlineInputs {
+  const { value, sd } = altitudeDeg
+  const measuredSdDeg = statedOr(sd, DEFAULTS.altitudeSdDeg)
   return {
-    measuredDeg: line.azimuthDeg,
+    ...common(claim, name, value),
+    target,
+    measures: 'altitude',
+    measuredDeg: value,
+    measuredSdDeg,
+    northSdDeg: 0,
+    axis: null,
+    ends: null,
+    survey: [],
+    lengthM: null,
+    horizonDeg: value,
+    horizonSdDeg: measuredSdDeg,
+    horizon: { from: 'altitude', words: 'as measured', distanceM: null, nodes: null },
+  }
+}
+
+function alongHorizon(
+  claim: Claim,
+  { name, horizon, direction }: Sightline,
+  line: Line,
+  target: SettledTarget,
+): SightlineInputs {
+  const met = settleHorizon(claim, horizon, direction, line.measuredDeg)
+  const seenDeg = seenAtDeg(target, met.horizonDeg)
+  return { ...common(claim, name, seenDeg), target, measures: 'azimuth', ...line, ...met }
+}
+
+/** Apparent altitude at which a target is seen: a star may be so well above the horizon. */
+function seenAtDeg(target: SettledTarget, horizonDeg: number): number {
+  if (target.body !== 'star') return horizonDeg
+  const { star, sighted } = target
+  if (sighted.by === 'altitude') return sighted.deg
+  return Math.max(horizonDeg, firstVisibility(star.magnitude, sighted.rule)?.altitudeDeg ?? horizonDeg)
+}
+
+function betweenPoints(claim: Claim, direction: Extract<Direction, { by: 'points' }>): Line {
+  const line = surveyedLine(claim, direction.from, direction.to)
+  const ends = endsOf(claim, direction)
+  return {
+    measuredDeg: wrap360(line.azimuthDeg + turnByParts(ends, line.lengthM)),
     measuredSdDeg: line.sdDeg,
-    northSdDeg: northSdDeg(claim),
+    northSdDeg: line.northSdDeg,
     axis: [direction.from, direction.to].sort().join('\n'),
+    ends,
+    survey: line.steps,
     lengthM: line.lengthM,
   }
 }
 
-/** The reader of the claim file has made sure that the point exists. */
-function surveyed(claim: Claim, name: string) {
-  const point = claim.points.get(name)
-  if (point === undefined) throw new Error(`a claim without errors names no missing point: ${name}`)
-  return { eastM: point.eastM, northM: point.northM, sdM: statedOr(point.uncertaintyM, DEFAULTS.pointSdM) }
+/** The angle between two lines, each of which is a line to one solstice with its own horizon. */
+function betweenSolstices(
+  claim: Claim,
+  { name }: Sightline,
+  { span, horizons }: Extract<Direction, { by: 'span' }>,
+  target: SettledTarget,
+): SightlineInputs {
+  if (target.body !== 'sun at both solstices') throw new Error('a span is held against both solstices')
+  const { at, disc } = target
+  const angle = span.by === 'angle' ? statedAngle(span.angleDeg) : surveyedSpan(claim, span)
+  const side = (solstice: 'june' | 'december') => {
+    const own = { body: 'sun' as const, event: { name: `${solstice} solstice` as const }, at, disc }
+    const azimuthDeg = span.by === 'points' ? azimuthOf(claim, span.from, span[solstice]) : null
+    return sideOfSpan(claim, name, horizons[solstice], azimuthDeg, own)
+  }
+  const pair = { june: side('june'), december: side('december') }
+  const horizonDeg = (pair.june.horizonDeg + pair.december.horizonDeg) / 2
+  return {
+    ...common(claim, name, horizonDeg),
+    pair,
+    target,
+    measures: 'angle',
+    measuredDeg: angle.angleDeg,
+    measuredSdDeg: angle.sdDeg,
+    northSdDeg: 0,
+    axis: span.by === 'points' ? [span.from, span.june, span.december].join('\n') : null,
+    ends: null,
+    survey: [],
+    lengthM: null,
+    horizonDeg,
+    horizonSdDeg: Math.hypot(pair.june.horizonSdDeg, pair.december.horizonSdDeg) / 2,
+    horizon: pair.june.horizon,
+  }
 }
 
-/** A claim that says nothing of north offers its plan as true; one that says `unknown` is given a compass. */
-export function northSdDeg({ north }: Claim): number {
-  if (north === 'omitted') return 0
-  if (north === 'unknown') return DEFAULTS.northSdDeg.compass
-  return statedOr(north.uncertaintyDeg, DEFAULTS.northSdDeg[north.from])
+function statedAngle({ value, sd }: { value: number; sd: number | Unstated }) {
+  return { angleDeg: value, sdDeg: statedOr(sd, DEFAULTS.azimuthSdDeg) }
+}
+
+/** A skyline profile is read by direction, which only points give. */
+function azimuthOf(claim: Claim, from: string, to: string): number {
+  return surveyedLine(claim, from, to).azimuthDeg
+}
+
+function sideOfSpan(
+  claim: Claim,
+  name: string,
+  horizon: Horizon | Unstated,
+  azimuthDeg: number | null,
+  target: SettledTarget,
+): SightlineInputs {
+  const line = {
+    measuredDeg: azimuthDeg ?? 0,
+    measuredSdDeg: 0,
+    northSdDeg: 0,
+    axis: null,
+    ends: null,
+    survey: [],
+    lengthM: null,
+  }
+  const direction: Direction = { by: 'azimuth', azimuthDeg: { value: azimuthDeg ?? 0, sd: 0 } }
+  const met = settleHorizon(claim, horizon, direction, azimuthDeg)
+  return { ...common(claim, name, met.horizonDeg), target, measures: 'azimuth', ...line, ...met }
 }
 
 function refractionOf(claim: Claim): Refraction {

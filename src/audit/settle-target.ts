@@ -17,6 +17,7 @@ export function settleTarget(target: Target): SettledTarget {
         disc: statedOr(target.disc, { part }),
       }
     }
+    case 'sun at both solstices':
     case 'moon':
       return { ...target, disc: statedOr(target.disc, { part: DEFAULTS.disc }) }
     case 'star': {

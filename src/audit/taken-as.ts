@@ -10,16 +10,16 @@ import { usesHorizon } from './uses-horizon.ts'
 
 /** What the claim leaves open of a line's target and horizon, and with which readings the line fits a date. */
 export function takenAs(
-  { target: stated, horizonDeg }: Sightline,
+  stated: Sightline,
   line: SightlineInputs,
   asserted: { from: number; to: number },
 ): TakenAs[] {
-  const ofTarget = choicesOf(stated).flatMap(({ choice, said }) => {
+  const ofTarget = choicesOf(stated, line).flatMap(({ choice, said }) => {
     if (!isUnstated(said)) return []
-    const readings = readingsOf(line.target).filter((reading) => reading.choice === choice)
-    const own = readings.find(({ target }) => target === line.target)
+    const readings = readingsOf(line).filter((reading) => reading.choice === choice)
+    const own = readings.find(({ isOwn }) => isOwn)
     const fitting = readings.filter(
-      ({ target }) => target !== line.target && isFit(bestFit([sightOf({ ...line, target })], asserted), 1),
+      (reading) => !reading.isOwn && isFit(bestFit([sightOf(reading.line)], asserted), 1),
     )
     return own === undefined
       ? []
@@ -31,6 +31,8 @@ export function takenAs(
           },
         ]
   })
-  const isLevel = usesHorizon(line) && isUnstated(horizonDeg)
+  const { direction, horizon } = stated
+  const horizons = direction.by === 'span' ? Object.values(direction.horizons) : [horizon]
+  const isLevel = usesHorizon(line) && horizons.some(isUnstated)
   return isLevel ? [...ofTarget, { what: 'the horizon', used: 'level', fitsWith: [] }] : ofTarget
 }

@@ -1,14 +1,16 @@
-import type { Claim } from '../claim/claim.ts'
+import type { Claim, EllipsoidName, Sightline } from '../claim/claim.ts'
 import { nearestOffset } from '../inference/comparison.ts'
+import { DEG, wrap360 } from '../quantity/degrees.ts'
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatYearRange } from '../quantity/format-year.ts'
-import { listedShort } from '../quantity/listed.ts'
+import { listed, listedShort } from '../quantity/listed.ts'
 import { isUnstated } from '../quantity/unstated.ts'
 import { bennettRefractionArcmin } from '../site/bennett.ts'
 import { OBLIQUITY_MODELS } from '../sky/obliquity-models.ts'
 import { ORBIT_SPAN } from '../sky/orbit.ts'
 import type { DatedLabel, Implied, Sweep } from './audit.ts'
 import { middle } from './dated-label.ts'
+import { DEFAULTS } from './defaults.ts'
 import { refractionAtHorizon } from './refraction-at.ts'
 import type { SettledClaim } from './settle-claim.ts'
 import { sightOf } from './sight-of.ts'
@@ -28,11 +30,13 @@ export function listWarnings(
     ...readingWarnings,
     ...(isOfSun(lines) ? beyondOrbit(dates.asserted) : []),
     ...beyondFormula(claim, dates.asserted),
+    ...claim.sightlines.flatMap((sightline, i) => mixedDatums(claim, sightline, lines[i]!)),
     ...lines.flatMap(refractionParts),
     ...new Set(lines.flatMap((line) => targetModel(line).warnings)),
     ...lines.flatMap((line) => [
       ...impossibleHorizon(claim, line),
       ...nearMeridian(line, dates),
+      ...beyondProfile(line, dates),
       ...reversed(line, dates),
     ]),
     ...(isOfSun(lines) ? datesBeyondOrbit(implied) : []),
@@ -59,6 +63,23 @@ function beyondFormula({ formula }: Claim, { printed, from, to }: DatedLabel) {
   if (range.from <= from && to <= range.to) return []
   return [
     `The claim’s formula, ${label}, is used for ${printed}, outside ${formatYearRange(range.from, range.to)} (${range.basis}).`,
+  ]
+}
+
+/** So far apart two datums commonly lie, metres. */
+const DATUM_SHIFT_M = 100
+/** Ellipsoids whose datums agree with WGS84 to metres. */
+const MODERN: readonly EllipsoidName[] = ['WGS84', 'GRS80']
+
+/** A line from a place on an old datum to one by latitude and longitude. */
+function mixedDatums({ grid, points }: Claim, { direction }: Sightline, { name, lengthM }: SightlineInputs) {
+  if (direction.by !== 'points' || grid?.by !== 'projection' || lengthM === null) return []
+  const kinds = [direction.from, direction.to].map((point) => points.get(point)?.by)
+  const isMixed = kinds.includes('grid') && !kinds.every((kind) => kind === 'grid')
+  if (!isMixed || MODERN.includes(grid.projection.ellipsoid)) return []
+  const turn = formatArcmin((Math.atan2(DATUM_SHIFT_M, lengthM) / DEG) * 60)
+  return [
+    `Line ${name} joins a place on ${grid.name} to one on WGS84. The two datums may lie some ${DATUM_SHIFT_M} m apart, which turns this line by up to ${turn}; that is not taken into account: give both ends in one of them.`,
   ]
 }
 
@@ -90,19 +111,55 @@ const LOWEST_LAND_M = 450
 
 /** Where direction turns too fast with altitude for a straight sum of errors. */
 function nearMeridian(line: SightlineInputs, { asserted }: SettledClaim['dates']) {
-  const isCurved = targetModel(line).branches.some(
-    (branch) => (branch.curve?.(middle(asserted)) ?? []).length > 0,
-  )
-  if (!isCurved) return []
+  const { pair } = line
+  if (pair !== null && [pair.june, pair.december].some((side) => isCurved(side, middle(asserted)))) {
+    return [
+      `Line ${line.name}: one of its two solstices is met close to the meridian or over a broken skyline, where direction does not answer errors in proportion. The weights of an angle take it as if it did; they are not to be trusted here.`,
+    ]
+  }
+  if (!isCurved(line, middle(asserted))) return []
+  if (line.horizon.nodes !== null) {
+    return [
+      `Line ${line.name} meets its target where the skyline is broken: a small error of altitude or a few centuries take the gleam from one summit or notch to the next. The weights are integrated over the errors there; single dates and the budget are not to be trusted.`,
+    ]
+  }
   return [
     `Line ${line.name} meets its target close to the meridian, where a small error of altitude turns the direction far: its dates are ill-conditioned. The weights are integrated over the altitude there; single dates and the budget are not to be trusted.`,
+  ]
+}
+
+function isCurved(line: SightlineInputs, year: number): boolean {
+  return targetModel(line).branches.some((branch) => (branch.curve?.(year) ?? []).length > 0)
+}
+
+/** Where the skyline to the target's side is not known any more. */
+function beyondProfile(line: SightlineInputs, { asserted, others }: SettledClaim['dates']): string[] {
+  const { nodes } = line.horizon
+  if (nodes === null) return []
+  const [first, width] = [
+    nodes[0]!.azimuthDeg,
+    wrap360(nodes.at(-1)!.azimuthDeg - nodes[0]!.azimuthDeg) || 360,
+  ]
+  const isOutside = (azimuthDeg: number) => wrap360(azimuthDeg - first) > width
+  const sight = sightOf(line)
+  const missed = [asserted, ...others].filter((date) => {
+    const direction = nearestOffset(sight, middle(date))?.directionDeg
+    return direction !== undefined && isOutside(direction)
+  })
+  const places = [
+    ...(isOutside(line.measuredDeg) ? ['the line itself'] : []),
+    ...missed.map(({ printed }) => `the place of the target in ${printed}`),
+  ]
+  if (places.length === 0) return []
+  return [
+    `Line ${line.name}: the skyline profile does not reach ${listed(places)}; beyond its ends the skyline is taken to go on level, ± ${formatArcmin(DEFAULTS.unknownHorizonSdDeg * 60)}.`,
   ]
 }
 
 /** A line that points the opposite way most likely has its ends, or rising and setting, exchanged. */
 function reversed(line: SightlineInputs, { asserted }: SettledClaim['dates']) {
   const offset = nearestOffset(sightOf(line), middle(asserted))
-  if (line.measures === 'altitude' || offset === null || Math.abs(offset.offsetDeg) < 90) return []
+  if (line.measures !== 'azimuth' || offset === null || Math.abs(offset.offsetDeg) < 90) return []
   return [
     `Line ${line.name} points away from its target, ${Math.round(Math.abs(offset.offsetDeg))}° off: are its ends exchanged, or rising and setting?`,
   ]
@@ -133,5 +190,5 @@ function unreached({ no_target }: Sweep) {
 }
 
 function isOfSun(lines: readonly SightlineInputs[]): boolean {
-  return lines.some(({ target }) => target.body === 'sun')
+  return lines.some(({ target }) => target.body === 'sun' || target.body === 'sun at both solstices')
 }

@@ -23,7 +23,7 @@ function factsOf(text: string): SummaryFacts {
   const ground = groundOf(sights, dates)
   const sweep = auditSweep(ground, dates, yardstick, wantedArcmin)
   const limits = auditLimits(ground, dates, yardstick.marker)
-  const sightlines = lines.map((line) => auditSightline(line, asserted, null))
+  const sightlines = lines.map((line) => auditSightline(line, asserted, null, null))
   const plausibleArcmin = [plausible.low_arcmin, plausible.high_arcmin]
   const { outcome, misfits } = verdictOf({ sights, dates, ground, limits, plausibleArcmin })
   return {

@@ -185,7 +185,7 @@ describe('what a claim leaves open', () => {
     const text = TWO_LINES.replace('north: {from: sun, uncertainty: 4′}', 'north: unknown')
     const audit = auditOf(text)
     expect(said(audit, /north/)!.said).toBe('unknown')
-    expect(audit.sightlines[0]!.azimuth_deg.sd).toBeGreaterThan(0.5)
+    expect(audit.sightlines[0]!.azimuth_deg!.sd).toBeGreaterThan(0.5)
   })
 
   test('a stated thing is no assumption', () => {

@@ -320,7 +320,7 @@ function lookedAt(text: string) {
   const line = lines[0]!
   return {
     line,
-    sightline: auditSightline(line, dates.asserted, null),
+    sightline: auditSightline(line, dates.asserted, null, null),
     years: auditImplied(line, 'vondrak2011', dates.window, 2026).dates.map(({ year }) => year),
   }
 }

@@ -32,9 +32,9 @@ export function reversedWords(offsetArcmin: number): string {
 export function threeMeasures({ sweep, sightlines, asserted }: SummaryFacts, arcmin: number): string {
   const { measures, altitude_deg } = sightlines[0]!
   const semidiameter = yardstickSemidiameterArcmin(middle(asserted))
-  const widths = sunWidths(arcmin, semidiameter, measures === 'azimuth' ? altitude_deg.value : 0)
+  const widths = sunWidths(arcmin, semidiameter, measures === 'azimuth' ? (altitude_deg?.value ?? 0) : 0)
   if (arcmin > LARGEST_PICTURED_ARCMIN) return formatArcmin(arcmin)
-  if (measures === 'altitude') return `${formatArcmin(arcmin)} (${widthsInWords(widths)})`
+  if (measures !== 'azimuth') return `${formatArcmin(arcmin)} (${widthsInWords(widths)})`
   return inThreeMeasures(arcmin, centimetres(arcmin, sweep.marker), sweep.marker.distance_m, widths)
 }
 

@@ -24,18 +24,33 @@ export function discAltitude(
   const refraction = refractionAtHorizon(inputs)
   const parallax = refraction.lessParallax ? 0 : body.parallaxArcsec
   const horizonSd = inputs.horizonSdDeg * (1 - refraction.perDegree / 60)
+  const ofDisc = errorsOfDisc(inputs, disc, body)
   return (year) => {
-    const { arcmin, sdArcmin } = body.semidiameter(year)
-    const above = horizonAboveCentreArcmin(disc, arcmin)
-    const nearness = (parallax / 60 - above) * body.nearnessSd
+    const above = horizonAboveCentreArcmin(disc, body.semidiameter(year).arcmin)
     return {
       deg: centreAltitudeDeg(inputs.horizonDeg, refraction.arcmin, above, parallax),
       errors: [
         { source: 'altitude of the horizon', sdDeg: horizonSd },
         { source: 'refraction of the day', sdDeg: inputs.refractionSdArcmin / 60 },
-        ...(sdArcmin > 0 ? [{ source: 'the Sun’s size', sdDeg: sdArcmin / 60 }] : []),
-        ...(nearness !== 0 ? [{ source: MOON_DISTANCE, sdDeg: nearness / 60 }] : []),
+        ...ofDisc(year),
       ],
     }
+  }
+}
+
+/** Errors of the altitude that come of the body's size and distance. */
+export function errorsOfDisc(
+  inputs: SightlineInputs,
+  disc: Disc,
+  body: DiscBody,
+): (year: number) => Uncertain['errors'] {
+  const parallax = inputs.refraction.by === 'claim' ? 0 : body.parallaxArcsec
+  return (year) => {
+    const { arcmin, sdArcmin } = body.semidiameter(year)
+    const nearness = (parallax / 60 - horizonAboveCentreArcmin(disc, arcmin)) * body.nearnessSd
+    return [
+      ...(sdArcmin > 0 ? [{ source: 'the Sun’s size', sdDeg: sdArcmin / 60 }] : []),
+      ...(nearness !== 0 ? [{ source: MOON_DISTANCE, sdDeg: nearness / 60 }] : []),
+    ]
   }
 }

@@ -1,4 +1,4 @@
-import { horizonBranch, type Uncertain } from '../../inference/horizon-branch.ts'
+import type { Uncertain } from '../../inference/horizon-branch.ts'
 import {
   MOON_NEARNESS_SD,
   MOON_PARALLAX_ARCMIN,
@@ -10,7 +10,8 @@ import {
 } from '../../sky/moon.ts'
 import type { SettledTarget, SightlineInputs } from '../sightline-inputs.ts'
 import { discWords } from '../words.ts'
-import { discAltitude } from './disc-altitude.ts'
+import { type DiscBody, discAltitude } from './disc-altitude.ts'
+import { discBranch, discOnLine } from './disc-branch.ts'
 import { obliquityErrors } from './obliquity-errors.ts'
 import { SUN_MODELS } from './sun.ts'
 import type { TargetModel } from './target-model.ts'
@@ -26,11 +27,12 @@ export function moonTarget(
   const { standstill, at, disc } = target
   const event: StandstillEvent = `${standstill.side} ${standstill.size} standstill`
   const semidiameter = () => ({ arcmin: MOON_SEMIDIAMETER_ARCMIN, sdArcmin: 0 })
-  const altitude = discAltitude(inputs, disc, {
+  const body: DiscBody = {
     semidiameter,
     parallaxArcsec: MOON_PARALLAX_ARCMIN * 60,
     nearnessSd: MOON_NEARNESS_SD,
-  })
+  }
+  const altitude = discAltitude(inputs, disc, body)
   const declination = (year: number): Uncertain => ({
     deg: standstillDeclinationDeg(year, event, inputs.model),
     errors: [
@@ -42,12 +44,13 @@ export function moonTarget(
   return {
     event: words,
     description: `${words}, ${discWords(disc)}`,
-    branches: [horizonBranch({ latitudeDeg: inputs.latitudeDeg, at, altitude, declination })],
+    branches: [discBranch(inputs, { at, disc, body, declination })],
     declinationDeg: (year) => declination(year).deg,
     altitudeDeg: (year) => {
       const { deg, errors } = altitude(year)
       return { deg, sdDeg: Math.hypot(...errors.map(({ sdDeg }) => sdDeg)) }
     },
+    onLine: discOnLine(inputs, { at, disc, body }),
     seenAt: null,
     semidiameter,
     models: SUN_MODELS,

@@ -32,6 +32,7 @@ export function starPairTarget(
     branches: uppers.map((upper) => branchOf(inputs, stars, upper)),
     declinationDeg: () => null,
     altitudeDeg: () => null,
+    onLine: null,
     seenAt: null,
     semidiameter: () => null,
     models: STAR_MODELS,

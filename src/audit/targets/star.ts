@@ -13,6 +13,8 @@ import { unsteadinessOf } from '../../sky/unsteady-stars.ts'
 import { refractionAt } from '../refraction-at.ts'
 import type { SettledTarget, SightlineInputs } from '../sightline-inputs.ts'
 import { meridianBranch } from './meridian-branch.ts'
+import { placeOnLine } from './place-on-line.ts'
+import { skylineBranch } from './skyline-branch.ts'
 import type { TargetModel } from './target-model.ts'
 
 type SettledStar = Extract<SettledTarget, { body: 'star' }>
@@ -32,12 +34,13 @@ export function starTarget(inputs: SightlineInputs, target: SettledStar): Target
   return {
     event: `${at} of ${name}`,
     description: `${at} of ${name}${sightedWords(inputs, target, altitude)}`,
-    branches: [branchOf(inputs, at, declination, altitude)],
+    branches: [branchOf(inputs, target, declination, altitude)],
     declinationDeg: (year) => declination(year).deg,
     altitudeDeg: () =>
       altitude === null
         ? null
         : { deg: altitude.deg, sdDeg: Math.hypot(...altitude.errors.map(({ sdDeg }) => sdDeg)) },
+    onLine: onLineOf(inputs, target),
     seenAt: apparentAltitude(inputs, target),
     semidiameter: () => null,
     models: STAR_MODELS,
@@ -48,15 +51,29 @@ export function starTarget(inputs: SightlineInputs, target: SettledStar): Target
 
 function branchOf(
   inputs: SightlineInputs,
-  at: SettledStar['at'],
+  { star, at, sighted }: SettledStar,
   declination: (year: number) => Uncertain,
   altitude: Uncertain | null,
 ): Branch {
   if (at === 'rising' || at === 'setting') {
+    const seenFrom = sighted.by === 'rule' ? visibleFrom(star, sighted.rule) : null
+    if (inputs.horizon.nodes !== null && seenFrom !== null) {
+      return skylineBranch(inputs, { at, declination, seenFrom, altitudeErrors: () => [], ...POINT })
+    }
     return horizonBranch({ latitudeDeg: inputs.latitudeDeg, at, altitude: () => altitude, declination })
   }
   const culmination = at === 'upper culmination' ? 'upper' : 'lower'
   return meridianBranch(inputs, { culmination, declination, aboveCentreArcmin: () => 0, parallaxArcsec: 0 })
+}
+
+/** A star has neither width nor parallax. */
+const POINT = { aboveCentreArcmin: () => 0, parallaxArcsec: 0 }
+
+function onLineOf(inputs: SightlineInputs, { star, at, sighted }: SettledStar): TargetModel['onLine'] {
+  if ((at !== 'rising' && at !== 'setting') || inputs.horizon.nodes === null || sighted.by !== 'rule')
+    return null
+  const seenFrom = visibleFrom(star, sighted.rule)
+  return seenFrom === null ? null : placeOnLine(inputs, { at, seenFrom, ...POINT })
 }
 
 /** Declination of a star with what the catalogue and nutation leave open. */
@@ -108,11 +125,17 @@ function firstSeen(
   star: Star,
   rule: Parameters<typeof firstVisibility>[1],
 ): { deg: number; sdDeg: number } | null {
-  const visible = firstVisibility(star.magnitude, rule)
+  const visible = visibleFrom(star, rule)
   if (visible === null) return null
-  return visible.altitudeDeg > horizonDeg
-    ? { deg: visible.altitudeDeg, sdDeg: visible.sdDeg }
-    : { deg: horizonDeg, sdDeg: horizonSdDeg }
+  return visible.deg > horizonDeg ? visible : { deg: horizonDeg, sdDeg: horizonSdDeg }
+}
+
+function visibleFrom(
+  { magnitude }: Star,
+  rule: Parameters<typeof firstVisibility>[1],
+): { deg: number; sdDeg: number } | null {
+  const visible = firstVisibility(magnitude, rule)
+  return visible === null ? null : { deg: visible.altitudeDeg, sdDeg: visible.sdDeg }
 }
 
 function sightedWords(

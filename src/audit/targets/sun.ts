@@ -1,6 +1,5 @@
-import { horizonBranch, type Uncertain } from '../../inference/horizon-branch.ts'
+import type { Uncertain } from '../../inference/horizon-branch.ts'
 import { rememberLast } from '../../inference/remember-last.ts'
-import type { Branch } from '../../inference/sight.ts'
 import { DEG } from '../../quantity/degrees.ts'
 import { formatArcmin } from '../../quantity/format-angle.ts'
 import { formatNumber } from '../../quantity/format-number.ts'
@@ -27,6 +26,7 @@ import { tabulatedObliquityDeg } from '../../sky/tabulated-obliquity.ts'
 import type { SettledSunEvent, SettledTarget, SightlineInputs } from '../sightline-inputs.ts'
 import { discWords } from '../words.ts'
 import { type DiscBody, discAltitude } from './disc-altitude.ts'
+import { discBranch, discOnLine } from './disc-branch.ts'
 import { meridianBranch } from './meridian-branch.ts'
 import { obliquityErrors } from './obliquity-errors.ts'
 import type { TargetModel } from './target-model.ts'
@@ -59,6 +59,7 @@ export function sunTarget(inputs: SightlineInputs, target: SettledSun): TargetMo
     description: `${sunEventWords(event, at)}${senseWords(event)}, ${at === 'noon' ? disc.part : discWords(disc)}`,
     declinationDeg: (year) => course(year)?.declinationDeg ?? null,
     altitudeDeg: (year) => summed(altitude(year)),
+    onLine: at === 'noon' ? null : discOnLine(inputs, { at, disc, body }),
     seenAt: null,
     semidiameter,
     models: SUN_MODELS,
@@ -77,14 +78,8 @@ export function sunTarget(inputs: SightlineInputs, target: SettledSun): TargetMo
     )
     return { ...model, branches, altitudeDeg: () => null, notes: (year) => paceNotes(course(year)) }
   }
-  const branches = courses.map(
-    (day): Branch =>
-      horizonBranch({
-        latitudeDeg: inputs.latitudeDeg,
-        at,
-        altitude,
-        declination: uncertain(inputs, event, day),
-      }),
+  const branches = courses.map((day) =>
+    discBranch(inputs, { at, disc, body, declination: uncertain(inputs, event, day) }),
   )
   const notes = (year: number) =>
     isSolstice(event) ? dwellNotes(inputs, at, event.name, year, altitude(year).deg) : paceNotes(course(year))

@@ -1,7 +1,9 @@
 import type { Branch } from '../../inference/sight.ts'
 import type { ObliquityModelName } from '../../sky/obliquity-models.ts'
 import type { SightlineInputs } from '../sightline-inputs.ts'
+import type { CentreOnSkyline } from './known-skyline.ts'
 import { moonTarget } from './moon.ts'
+import { solsticeSpanTarget } from './solstice-span.ts'
 import { starTarget } from './star.ts'
 import { starPairTarget } from './star-pair.ts'
 import { sunTarget } from './sun.ts'
@@ -17,6 +19,8 @@ export interface TargetModel {
   declinationDeg: (year: number) => number | null
   /** True altitude of the body's centre where the line meets it, degrees; null likewise. */
   altitudeDeg: (year: number) => { deg: number; sdDeg: number } | null
+  /** Where its centre stands when it is sighted on the line, over a skyline known to both sides; null where that is level. */
+  onLine: ((year: number) => CentreOnSkyline | null) | null
   /** Apparent altitude at which it is seen where that is not the line's own; null where it is. */
   seenAt: { deg: number; sdDeg: number } | null
   /** Half the width of the body's disc; null for a star. */
@@ -34,6 +38,8 @@ export function targetModel(inputs: SightlineInputs): TargetModel {
   switch (target.body) {
     case 'sun':
       return sunTarget(inputs, target)
+    case 'sun at both solstices':
+      return solsticeSpanTarget(inputs, target)
     case 'moon':
       return moonTarget(inputs, target)
     case 'star':
