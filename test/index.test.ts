@@ -7,6 +7,7 @@ test('the library exports these and no others', () => {
     'figuresOf',
     'findStar',
     'formatProblem',
+    'magneticDates',
     'makeAudit',
     'newClaim',
     'readClaim',

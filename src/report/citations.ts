@@ -25,6 +25,12 @@ export const CITATIONS: Readonly<Record<string, Citation>> = {
     title: 'The calculation of astronomical refraction in marine navigation',
     where: 'Journal of Navigation 35, 255',
   },
+  chulliat2025: {
+    authors: 'Chulliat, A. et al.',
+    year: 2025,
+    title: 'The US/UK World Magnetic Model for 2025–2030, and its editions for 2015 and 2020',
+    where: 'National Centers for Environmental Information, NOAA',
+  },
   hoffleit1991: {
     authors: 'Hoffleit, D. & Warren, W. H.',
     year: 1991,
@@ -49,6 +55,18 @@ export const CITATIONS: Readonly<Record<string, Citation>> = {
     year: 2008,
     title: 'Evaluation of measurement data: guide to the expression of uncertainty in measurement',
     where: 'JCGM 100:2008',
+  },
+  karney2011: {
+    authors: 'Karney, C. F. F.',
+    year: 2011,
+    title: 'Transverse Mercator with an accuracy of a few nanometers',
+    where: 'Journal of Geodesy 85, 475',
+  },
+  karney2013: {
+    authors: 'Karney, C. F. F.',
+    year: 2013,
+    title: 'Algorithms for geodesics',
+    where: 'Journal of Geodesy 87, 43',
   },
   kass1995: {
     authors: 'Kass, R. E. & Raftery, A. E.',

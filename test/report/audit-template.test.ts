@@ -60,7 +60,11 @@ const AUDITS: readonly (readonly [name: string, audit: Audit])[] = [
 
 /** As little as an audit can hold. */
 function bareAudit(outcome: Outcome): Audit {
+  const { sightlines } = completeAudit(outcome)
+  const unsurveyed = { survey: [], skyline: null, refraction_check: null }
   return completeAudit(outcome, {
+    ...{ plan: { north: null, points: [], lines: [] }, placements: [], attachments: [] },
+    sightlines: sightlines.map((line) => ({ ...line, ...unsurveyed })),
     ...{ source: null, claim: {}, findings: [], assumptions: [], checks: [], reproduction: [], budget: [] },
     ...{ alternatives: [], warnings: [], references: [], assumed_precision_arcmin: null, today: [] },
   })
@@ -114,7 +118,10 @@ describe.each(AUDITS)('the report of an audit: %s', (_, audit) => {
     const files = figuresOf(tree)
     const names = files.map(({ name }) => name)
     expect(names[0]).toBe('premise')
-    expect(names).toHaveLength(1 + audit.sightlines.length)
+    const lines = audit.sightlines
+    const horizons = lines.filter(({ skyline }) => skyline !== null)
+    const plans = audit.plan.lines.length > 0 ? 1 : 0
+    expect(names).toHaveLength(1 + plans + horizons.length + lines.length)
     expect(new Set(names).size).toBe(names.length)
     for (const { name, svg } of files) {
       expect(svg).toContain('<svg')
@@ -124,17 +131,17 @@ describe.each(AUDITS)('the report of an audit: %s', (_, audit) => {
 })
 
 describe('the order of the sections', () => {
-  const FIXED_START = [
-    'Audit of a dating claim: Thornmere court',
-    'How the date depends on the premise',
-    'The target’s track and the dates that fit',
-    'Does the arithmetic reproduce?',
-  ]
+  const FIXED_START = ['Audit of a dating claim: Thornmere court', 'How the date depends on the premise']
+  const FIXED_MIDDLE = ['The target’s track and the dates that fit']
   const FIXED_END = ['What this audit does not say', 'Cautions', 'Methods', 'References', 'Provenance']
 
   it.each(OUTCOMES)('all of them: %s', (outcome) => {
     expect(headings(completeAudit(outcome))).toEqual([
       ...FIXED_START,
+      'The survey, the horizon and the place of the target',
+      ...FIXED_MIDDLE,
+      'Does it work today?',
+      'Does the arithmetic reproduce?',
       'Other readings of the same stones',
       'Uncertainty budget',
       'What the claim leaves open',
@@ -145,7 +152,12 @@ describe('the order of the sections', () => {
   })
 
   it.each(OUTCOMES)('without the sections that have nothing to say: %s', (outcome) => {
-    expect(headings(bareAudit(outcome))).toEqual([...FIXED_START, ...FIXED_END])
+    expect(headings(bareAudit(outcome))).toEqual([
+      ...FIXED_START,
+      ...FIXED_MIDDLE,
+      'Does the arithmetic reproduce?',
+      ...FIXED_END,
+    ])
   })
 })
 
@@ -159,6 +171,8 @@ describe('what must not be missing from any report', () => {
       'not about the person who made it',
       'A build tolerance is not a measurement error',
       'Never look at the Sun',
+      'To have it over the foresight, the eye has to be 1.9 m to the left of the backsight',
+      'beside it `skyline.csv`, SHA-256 `1111111111111111111111111111111111111111111111111111111111111111`',
       'Ask for permission before entering a site.',
       'for licensed people',
       'Astronomy & Astrophysics 534, A22; corrigendum 2012, 541, C1.',

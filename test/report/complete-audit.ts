@@ -1,4 +1,13 @@
-import type { Audit, Outcome, Reproduction, SightlineAudit, SweepStep } from '../../src/audit/audit.ts'
+import type {
+  Audit,
+  Outcome,
+  Placement,
+  PlanPoint,
+  Reproduction,
+  SightlineAudit,
+  SweepStep,
+  Today,
+} from '../../src/audit/audit.ts'
 import {
   carriedAudit,
   CASES as FIGURE_CASES,
@@ -68,7 +77,19 @@ function completed(audit: Audit): Audit {
         effect_of: 'moves no date that fits',
       },
     ],
-    sightlines: audit.sightlines.map(withDrift),
+    attachments: [{ path: 'skyline.csv', sha256: '1'.repeat(64) }],
+    sightlines: audit.sightlines.map((line) => withSurvey(withDrift(line))),
+    plan: {
+      north: { words: 'by compass', sd_deg: 0.5 },
+      points: [pointAt('hearthstone', 0, 0), pointAt('east-pillar', 84.7, 53.1)],
+      lines: audit.sightlines
+        .filter(({ measures }) => measures === 'azimuth')
+        .map(({ name, azimuth_deg }) => ({
+          ...{ sightline: name, from: 0, to: 1, span: null, length_m: 100 },
+          azimuth_deg: azimuth_deg?.value ?? null,
+        })),
+    },
+    placements: audit.sightlines.flatMap(placed),
     implied: audit.implied.map((implied) => ({
       ...implied,
       nearest_approach: implied.nearest_approach && { ...implied.nearest_approach, sd_arcmin: 2.5 },
@@ -107,6 +128,7 @@ function completed(audit: Audit): Audit {
     ],
     today: audit.sightlines.map(({ name, direction_at_asserted_deg: asserted }) => ({
       ...{ sightline: name, year: 2026.4 },
+      ...(asserted === null ? NO_CHANCE : CHANCE),
       ...(asserted === null
         ? { direction_deg: null, offset_arcmin: null, sun_widths: null, offset_cm: null }
         : { direction_deg: 59, offset_arcmin: -65, sun_widths: 2.1, offset_cm: 190 }),
@@ -148,7 +170,7 @@ export function severalLinesAudit(outcome: Outcome = 'premise'): Audit {
     ],
     today: [
       ...audit.today,
-      { ...audit.today[0]!, sightline: 'midwinter', direction_deg: null, offset_arcmin: null },
+      { ...audit.today[0]!, sightline: 'midwinter', direction_deg: null, offset_arcmin: null, ...NO_CHANCE },
     ],
     reproduction: [
       ...audit.reproduction,
@@ -211,4 +233,78 @@ function alternative(value: string, years: number[], nearest: number | null) {
     years,
     nearest_year: nearest,
   }
+}
+
+const CHANCE: Pick<Today, 'next' | 'next_reason'> = {
+  next: {
+    date: '2027-06-21',
+    utc: '2027-06-21T03:06Z',
+    days: ['2027-06-20', '2027-06-23'],
+    direction_deg: 59,
+    stand_right_m: -1.9,
+    notes: ['Take a coat.'],
+  },
+  next_reason: null,
+}
+const NO_CHANCE = { next: null, next_reason: 'none is reckoned here' } as const
+
+function pointAt(name: string, east_m: number, north_m: number): PlanPoint {
+  return { name, east_m, north_m, sd_m: 0.03, width_m: null, form: null }
+}
+
+/** A line with something said of its survey, its horizon and the claim's refraction. */
+function withSurvey(line: SightlineAudit): SightlineAudit {
+  const { azimuth_deg: azimuth, altitude_deg: altitude } = line
+  if (line.measures !== 'azimuth' || line.body === 'two stars' || azimuth === null || altitude === null)
+    return line
+  return {
+    ...line,
+    survey: ['Bearing on the plan 60°40′00″.', 'Bearings were turned by 2°45′44″ west.'],
+    skyline: {
+      from: 'altitude',
+      words: 'as measured',
+      nodes: [[azimuth.value, altitude.value]],
+      at_line_deg: altitude,
+    },
+    refraction_check: {
+      stated_arcmin: 34,
+      traced_arcmin: 22.9,
+      sea_level_arcmin: 34.5,
+      is_sea_level: true,
+      effect_years: -812.4,
+    },
+  }
+}
+
+function placed({
+  name,
+  measures,
+  body,
+  azimuth_deg,
+  altitude_deg,
+  semidiameter_arcmin,
+}: SightlineAudit): Placement[] {
+  if (azimuth_deg === null || altitude_deg === null) return []
+  const line = measures === 'azimuth' ? azimuth_deg.value : altitude_deg.value
+  const at = (kind: Placement['kind'], label: string, printed: string, arcmin: number): Placement => ({
+    ...{ sightline: name, kind, label, printed, year: 0, from: 0, to: 0 },
+    direction_deg: line + arcmin / 60,
+    direction_range_deg: [line + arcmin / 60 - 0.01, line + arcmin / 60 + 0.01],
+    offset_arcmin: -arcmin,
+    offset_sd_arcmin: 2.5,
+    offset_cm: measures === 'azimuth' ? Math.abs(arcmin) * 2.9 : null,
+    disc:
+      measures === 'azimuth' && (body === 'sun' || body === 'moon') && semidiameter_arcmin !== null
+        ? {
+            azimuth_deg: line + arcmin / 60,
+            altitude_deg: altitude_deg.value - semidiameter_arcmin.value / 60,
+            semidiameter_arcmin: semidiameter_arcmin.value,
+          }
+        : null,
+  })
+  return [
+    at('asserted', 'asserted date', '9701 to 9501 BCE', 1.8),
+    at('independent', 'radiocarbon', '801 to 501 BCE', 36),
+    at('today', 'today', '2026 CE', 65),
+  ]
 }

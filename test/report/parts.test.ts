@@ -227,7 +227,7 @@ describe('the track', () => {
 
   it('says where the target stands today', () => {
     expect(part('today', severalLinesAudit())).toBe(
-      'Today (2026 CE) the target of midsummer stands at azimuth 59°00′; the line points 1°05′ (2.1 times the Sun’s width, 1.9 m at the marker) to the left of it.\nToday (2026 CE) the target of midwinter is not to be seen: there is no December solstice sunset at that altitude.',
+      'midsummer. Today (2026 CE) the target stands at azimuth 59°00′; the line points 1°05′ (2.1 times the Sun’s width, 1.9 m at the marker) to the left of it. The next chance to look for oneself is on 21 June 2027, at 03:06 UTC. From 20 June 2027 to 23 June 2027 the Sun stands within 1′ of its declination of that day, and any of these does as well. To have it over the foresight, the eye has to be 1.9 m to the left of the backsight, as one looks along the line. Take a coat.\nmidwinter. Today (2026 CE) the target is not to be seen: there is no December solstice sunset at that altitude. There is no chance to look for oneself: none is reckoned here.',
     )
   })
 })
@@ -297,13 +297,13 @@ describe('the track of other targets', () => {
       'No date in the window or within 10,000 years of it puts the target exactly on the line midsummer. At this latitude there is no rising of Acrux at that altitude in any year of the window.',
     )
     expect(part('today', audit)).toBe(
-      'Today (2026 CE) the target of midsummer is not to be seen: there is no rising of Acrux at that altitude.',
+      'midsummer. Today (2026 CE) the target is not to be seen: there is no rising of Acrux at that altitude. There is no chance to look for oneself: none is reckoned here.',
     )
   })
 
   it('tells that the Moon stands there in some years only', () => {
     expect(part('today', auditOfKind('moon'))).toMatch(
-      /^Today \(2026 CE\), in a year of such a standstill, the target of midsummer stands at azimuth 59°00′;/,
+      /^midsummer\. Today \(2026 CE\), in a year of such a standstill, the target stands at azimuth 59°00′;/,
     )
   })
 })

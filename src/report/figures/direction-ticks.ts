@@ -1,3 +1,4 @@
+import type { SightlineAudit } from '../../audit/audit.ts'
 import { formatDegrees } from '../../quantity/format-angle.ts'
 import type { Tick } from './year-ticks.ts'
 
@@ -8,12 +9,13 @@ const STEPS_ARCMIN = [0.1, 0.2, 0.5, 1, 2, 5, 10, 15, 30, 60, 120, 300, 600, 900
  * begin again; altitudes end at 90° to either side.
  */
 export function directionTicks(
-  measures: 'azimuth' | 'altitude',
+  measures: SightlineAudit['measures'],
   fromDeg: number,
   toDeg: number,
   most: number,
 ): Tick[] {
-  const [from, to] = measures === 'azimuth' ? [fromDeg, toDeg] : [Math.max(-90, fromDeg), Math.min(90, toDeg)]
+  const [from, to] =
+    measures === 'altitude' ? [Math.max(-90, fromDeg), Math.min(90, toDeg)] : [fromDeg, toDeg]
   const span = (to - from) * 60
   const step = STEPS_ARCMIN.find((candidate) => span / candidate <= most - 1) ?? 3600
   const unit = step < 1 ? 'second' : 'minute'

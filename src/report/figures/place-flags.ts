@@ -41,7 +41,8 @@ export function rowCount(placed: readonly PlacedFlag[]): number {
   return placed.reduce((most, { row }) => Math.max(most, row + 1), 0)
 }
 
-function placeOnSides(
+/** The same with the side of each flag given; null where one would leave the bounds, or they stand in each other's way. */
+export function placeOnSides(
   flags: readonly Flag[],
   sides: readonly Side[],
   from: number,

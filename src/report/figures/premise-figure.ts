@@ -11,14 +11,14 @@ import { premiseSets } from './premise-sets.ts'
 import { text } from './shape.ts'
 import { type FigureDrawing, svgRoot } from './svg-root.ts'
 
-const TARGET_HEIGHT = 276
+const TARGET_HEIGHT = 252
 const LEAST_PLOT = 150
 const NOTE = 11
 
 /**
  * The figure of the audit: which dates fit the line, against the tolerance one is willing to give the builders.
  * Dates run upwards, the oldest at the bottom; tolerances to the right on a logarithmic scale, after a strip for
- * `exact`. Points; 440 wide, about 280 high.
+ * `exact`. Points; 440 wide, about 250 high.
  */
 export function premiseFigure(audit: Audit): FigureDrawing {
   const scales = premiseScales(audit)

@@ -1,5 +1,5 @@
 import type { Element } from 'hast'
-import type { Audit } from '../../audit/audit.ts'
+import type { Audit, SightlineAudit } from '../../audit/audit.ts'
 import { directionTicks } from './direction-ticks.ts'
 import { keepLegible } from './log-ticks.ts'
 import { PALETTE } from './palette.ts'
@@ -14,7 +14,7 @@ const MOST_DIRECTIONS = 8
 
 export function trackAxes(
   plot: TrackPlot,
-  measures: 'azimuth' | 'altitude',
+  measures: SightlineAudit['measures'],
   captionRight: number,
 ): Element[] {
   const { left, right, top, bottom } = plot.box

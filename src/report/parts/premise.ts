@@ -1,5 +1,5 @@
 import type { BlockContent } from 'mdast'
-import type { Audit } from '../../audit/audit.ts'
+import type { Audit, SightlineAudit } from '../../audit/audit.ts'
 import { formatArcmin } from '../../quantity/format-angle.ts'
 import { paragraph } from '../nodes.ts'
 import { lineOrLines } from '../wording/line-or-lines.ts'
@@ -25,10 +25,11 @@ export function premisePart(audit: Audit): BlockContent[] {
 
 /** In which plane the tolerance is counted. */
 function asAngle({ sightlines }: Audit): string {
-  const has = (measures: 'azimuth' | 'altitude') => sightlines.some((line) => line.measures === measures)
-  if (!has('altitude')) return 'as an angle along the horizon'
-  if (!has('azimuth')) return 'as an angle up or down'
-  return 'as an angle along the horizon or, for a measured altitude, up or down'
+  const has = (measures: SightlineAudit['measures']) => sightlines.some((line) => line.measures === measures)
+  const ofAngle = has('angle') ? '; an angle between two built lines has √2 times that' : ''
+  if (!has('altitude')) return `as an angle along the horizon${ofAngle}`
+  if (!has('azimuth') && !has('angle')) return 'as an angle up or down'
+  return `as an angle along the horizon or, for a measured altitude, up or down${ofAngle}`
 }
 
 function claimsPremise({ assumed_precision_arcmin }: Audit): string {

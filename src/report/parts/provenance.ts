@@ -1,4 +1,4 @@
-import type { BlockContent } from 'mdast'
+import type { BlockContent, PhrasingContent } from 'mdast'
 import type { Audit } from '../../audit/audit.ts'
 import { paragraph } from '../nodes.ts'
 
@@ -10,7 +10,17 @@ export function provenancePart(audit: Audit): BlockContent[] {
       { type: 'inlineCode', value: audit.file },
       ', SHA-256 ',
       { type: 'inlineCode', value: audit.input_sha256 },
+      ...audit.attachments.flatMap(besides),
       '. The audit’s JSON form holds every figure unrounded.',
     ),
+  ]
+}
+
+function besides({ path, sha256 }: Audit['attachments'][number]): (PhrasingContent | string)[] {
+  return [
+    '; beside it ',
+    { type: 'inlineCode', value: path },
+    ', SHA-256 ',
+    { type: 'inlineCode', value: sha256 },
   ]
 }

@@ -1,38 +1,70 @@
 import type { BlockContent } from 'mdast'
-import type { Audit, SightlineAudit, Today } from '../../audit/audit.ts'
+import type { Audit, NextChance, SightlineAudit, Today } from '../../audit/audit.ts'
 import { formatDegrees } from '../../quantity/format-angle.ts'
+import { formatDay } from '../../quantity/format-day.ts'
 import { formatCm } from '../../quantity/format-length.ts'
 import { formatYear } from '../../quantity/format-year.ts'
-import { paragraph } from '../nodes.ts'
+import { paragraph, strong } from '../nodes.ts'
 import { noEvent } from '../wording/no-event.ts'
 import { offsetFromLine, whatPoints } from '../wording/offset-from-line.ts'
 import { sunWidthShare } from '../wording/sun-width-share.ts'
 
-/** Where each line's target stands in the year of the audit. */
+/** Where each line's target stands in the year of the audit, and when and where to stand to see it for oneself. */
 export function todayPart(audit: Audit): BlockContent[] {
   return audit.today.flatMap((today) => {
     const line = audit.sightlines.find(({ name }) => name === today.sightline)
-    return line === undefined ? [] : [paragraph(sentence(today, line))]
+    return line === undefined
+      ? []
+      : [paragraph(strong(`${line.name}.`), ` ${sentence(today, line)}${chance(today, line)}`)]
   })
 }
 
 function sentence(
-  { sightline, year, direction_deg, offset_arcmin, sun_widths, offset_cm }: Today,
+  { year, direction_deg, offset_arcmin, sun_widths, offset_cm }: Today,
   line: SightlineAudit,
 ): string {
   const when = `Today (${formatYear(Math.floor(year))})`
   if (direction_deg === null || offset_arcmin === null) {
-    return `${when} the target of ${sightline} is not to be seen: there is ${noEvent(line)}.`
+    return `${when} the target is not to be seen: there is ${noEvent(line)}.`
   }
+  const { measures, body } = line
   const also = [
     ...(sun_widths === null ? [] : [sunWidthShare(sun_widths)]),
-    ...(offset_cm === null
+    ...(offset_cm === null || measures !== 'azimuth'
       ? []
       : [`${formatCm(Math.abs(offset_cm))} ${line.length_m === null ? 'at 100 m' : 'at the marker'}`]),
   ]
-  const { measures, body } = line
   const where = offsetFromLine({ arcmin: offset_arcmin, sdArcmin: null, measures, also })
   // The years of a standstill come and go: the audit's own need not be one.
   const then = body === 'moon' ? `${when}, in a year of such a standstill,` : when
-  return `${then} the target of ${sightline} stands at ${measures} ${formatDegrees(direction_deg, 'minute')}; ${whatPoints(measures, 'now')} ${where}.`
+  const placed = measures === 'angle' ? 'an angle of' : measures
+  return `${then} the target stands at ${placed} ${formatDegrees(direction_deg, 'minute')}; ${whatPoints(measures, 'now')} ${where}.`
+}
+
+function chance({ next, next_reason }: Today, line: SightlineAudit): string {
+  if (next === null)
+    return next_reason === null ? '' : ` There is no chance to look for oneself: ${next_reason}.`
+  const { date, utc, notes, days } = next
+  const hour =
+    utc === null
+      ? '; at what hour depends on the longitude, which the claim does not give'
+      : `, at ${utc.slice(11, 16)} UTC`
+  const alsoGood = days === null ? '' : ` ${others(days, date)}`
+  return ` The next chance to look for oneself is on ${formatDay(date)}${hour}.${alsoGood}${standing(next, line)}${notes.map((note) => ` ${note}`).join('')}`
+}
+
+function others([from, to]: readonly [string, string], date: string): string {
+  if (from === to) return ''
+  return `From ${formatDay(from)} to ${formatDay(to)} the Sun stands within 1′ of its declination of that day, and any of these${from === date ? ' days' : ''} does as well.`
+}
+
+function standing({ stand_right_m }: NextChance, { measures }: SightlineAudit): string {
+  if (stand_right_m === null) {
+    return measures === 'azimuth'
+      ? ' Where to stand follows from the length of the line, which is not known here.'
+      : ''
+  }
+  const size = formatCm(Math.abs(stand_right_m) * 100)
+  const side = stand_right_m > 0 ? 'right' : 'left'
+  return ` To have it over the foresight, the eye has to be ${size} to the ${side} of the backsight, as one looks along the line.`
 }

@@ -44,7 +44,7 @@ function atAsserted(line: SightlineAudit, audit: Audit): string {
     return `At the asserted date (${audit.asserted.printed}) there was ${noEvent(line)}.`
   }
   const where = offsetFromLine({ arcmin, sdArcmin: line.offset_at_asserted_sd_arcmin, measures })
-  return `At the asserted date the target stood at ${measures} ${formatDegrees(direction, 'minute')}; ${whatPoints(measures, 'now')} ${where}.`
+  return `At the asserted date the target stood at ${placed(measures)} ${formatDegrees(direction, 'minute')}; ${whatPoints(measures, 'now')} ${where}.`
 }
 
 /** Where the middle of the asserted date says too little of it: the year in it in which the line fits best. */
@@ -55,6 +55,11 @@ function closest(line: SightlineAudit): string {
   if (gain < best.sd_arcmin / 2) return ''
   const where = offsetFromLine({ arcmin: best.offset_arcmin, sdArcmin: best.sd_arcmin, measures })
   return `Of the asserted years the line fits ${formatYear(best.year)} best; ${whatPoints(measures, 'now')} ${where} as it stood then.`
+}
+
+/** An angle has an article where a direction has none. */
+function placed(measures: SightlineAudit['measures']): string {
+  return measures === 'angle' ? 'an angle of' : measures
 }
 
 function drift({ drift, length_m, measures }: SightlineAudit): string {
@@ -71,5 +76,6 @@ function drift({ drift, length_m, measures }: SightlineAudit): string {
 
 function towards(movement: number, measures: SightlineAudit['measures']): string {
   if (measures === 'altitude') return movement > 0 ? 'upwards' : 'downwards'
+  if (measures === 'angle') return movement > 0 ? 'wider' : 'narrower'
   return movement > 0 ? 'to the right' : 'to the left'
 }

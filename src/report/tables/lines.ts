@@ -27,6 +27,7 @@ function columnsFor(lines: readonly SightlineAudit[]): Column<SightlineAudit>[] 
   return [
     { head: 'Sightline', cell: (line) => line.name, width: 1.3 },
     { head: 'Azimuth', cell: azimuth, width: 1.5 },
+    { head: 'Angle', cell: ({ angle_deg: deg }) => degrees(deg), width: 1.5 },
     { head: altitudeHead(lines), cell: altitude, width: 1.3 },
     { head: 'Refraction', cell: refraction, width: 1.3 },
     { head: discHead(lines), cell: ({ semidiameter_arcmin: half }) => arcmin(half), width: 1.3 },
@@ -37,17 +38,29 @@ function columnsFor(lines: readonly SightlineAudit[]): Column<SightlineAudit>[] 
 
 /** An altitude is measured on the meridian, where the azimuth is no result. */
 function azimuth({ measures, azimuth_deg }: SightlineAudit): string {
+  if (azimuth_deg === null) return NONE
   if (measures === 'azimuth') return measuredDegrees(azimuth_deg)
   return azimuth_deg.value === 0 ? 'north, on the meridian' : 'south, on the meridian'
 }
 
 /** The direction of two stars one above the other does not depend on height or air. */
-function altitude({ body, altitude_deg }: SightlineAudit): string {
-  return body === 'two stars' ? NONE : measuredDegrees(altitude_deg)
+function altitude({ body, altitude_deg, solstices }: SightlineAudit): string {
+  if (solstices !== null) return eachSolstice(solstices, ({ altitude_deg }) => measuredDegrees(altitude_deg))
+  return body === 'two stars' ? NONE : degrees(altitude_deg)
 }
 
-function refraction({ body, refraction_arcmin }: SightlineAudit): string {
-  return body === 'two stars' ? NONE : measuredArcmin(refraction_arcmin)
+function refraction({ body, refraction_arcmin, solstices }: SightlineAudit): string {
+  if (solstices !== null) {
+    return eachSolstice(solstices, ({ refraction_arcmin }) => measuredArcmin(refraction_arcmin))
+  }
+  return body === 'two stars' ? NONE : arcmin(refraction_arcmin)
+}
+
+type Solstices = NonNullable<SightlineAudit['solstices']>
+
+/** The two lines of an angle: `June 1°00′ ± 1′; December 1°20′ ± 1′`. */
+function eachSolstice(solstices: Solstices, cell: (one: Solstices[number]) => string): string {
+  return solstices.map((one) => `${one.solstice} ${cell(one)}`).join('; ')
 }
 
 function arcmin(value: Value | null): string {
@@ -60,12 +73,16 @@ function degrees(value: Value | null): string {
 
 function altitudeHead(lines: readonly SightlineAudit[]): string {
   const measures = new Set(lines.map((line) => line.measures))
-  if (measures.size > 1) return 'Horizon, or altitude measured'
+  if (measures.size > 1 && measures.has('altitude')) return 'Horizon, or altitude measured'
   return measures.has('altitude') ? 'Altitude measured' : 'Horizon'
 }
 
 function discHead(lines: readonly SightlineAudit[]): string {
-  const bodies = new Set(lines.map(({ body }) => body).filter((body) => body === 'sun' || body === 'moon'))
+  const bodies = new Set(
+    lines.flatMap(({ body }) =>
+      body === 'star' || body === 'two stars' ? [] : [body === 'moon' ? 'moon' : 'sun'],
+    ),
+  )
   if (bodies.size > 1) return 'Half the disc’s width'
   return bodies.has('moon') ? 'Half the Moon’s width' : 'Half the Sun’s width'
 }

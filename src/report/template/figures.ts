@@ -1,8 +1,13 @@
 import type { Element } from 'hast'
 import type { PhrasingContent } from 'mdast'
 import type { Audit } from '../../audit/audit.ts'
+import { horizonCaption } from '../captions/horizon.ts'
+import { planCaption } from '../captions/plan.ts'
 import { premiseCaption } from '../captions/premise.ts'
 import { trackCaption } from '../captions/track.ts'
+import { horizonFigure } from '../figures/horizon-figure.ts'
+import { hasHorizon } from '../figures/horizon-source.ts'
+import { planFigure } from '../figures/plan-figure.ts'
 import { premiseFigure } from '../figures/premise-figure.ts'
 import { trackFigure } from '../figures/track-figure.ts'
 import { fileNames } from './file-names.ts'
@@ -19,6 +24,22 @@ export interface CaptionedDrawing {
 /** What `::figure{of="…"}` may name; some give one figure for each sightline. To add one, as with parts.ts. */
 export const FIGURES: Readonly<Record<string, (audit: Audit) => CaptionedDrawing[]>> = {
   premise: (audit) => [{ name: 'premise', ...premiseFigure(audit), caption: premiseCaption(audit) }],
+  plan: (audit) => {
+    const figure = planFigure(audit)
+    return figure === null ? [] : [{ name: 'plan', ...figure, caption: planCaption(audit) }]
+  },
+  horizon: (audit) => {
+    const lines = audit.sightlines.filter(hasHorizon)
+    const names = fileNames(
+      'horizon',
+      lines.map((line) => line.name),
+    )
+    return lines.map((line, index) => ({
+      name: names[index]!,
+      ...horizonFigure(audit, line.name),
+      caption: horizonCaption(audit, line),
+    }))
+  },
   track: (audit) => {
     const names = fileNames(
       'track',

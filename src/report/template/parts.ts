@@ -11,6 +11,7 @@ import { premisePart } from '../parts/premise.ts'
 import { provenancePart } from '../parts/provenance.ts'
 import { referencesPart } from '../parts/references.ts'
 import { secondWindowPart } from '../parts/second-window.ts'
+import { surveyPart } from '../parts/survey.ts'
 import { todayPart } from '../parts/today.ts'
 import { tracksPart } from '../parts/tracks.ts'
 import { warningsPart } from '../parts/warnings.ts'
@@ -28,6 +29,7 @@ export const PARTS: Readonly<Record<string, (audit: Audit) => BlockContent[]>> =
   provenance: provenancePart,
   references: referencesPart,
   second_window: secondWindowPart,
+  survey: surveyPart,
   today: todayPart,
   tracks: tracksPart,
   warnings: warningsPart,

@@ -6,6 +6,6 @@ export function noEvent({
   measures,
   event,
 }: Pick<SightlineAudit, 'body' | 'measures' | 'event'>): string {
-  if (body === 'two stars') return `no ${event}`
+  if (body === 'two stars' || measures === 'angle') return `no ${event}`
   return `no ${event} ${measures === 'altitude' ? 'above the horizon' : 'at that altitude'}`
 }

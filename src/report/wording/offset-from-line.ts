@@ -1,3 +1,4 @@
+import type { SightlineAudit } from '../../audit/audit.ts'
 import { formatArcmin } from '../../quantity/format-angle.ts'
 import { sideOfLine } from './side-of-line.ts'
 
@@ -5,14 +6,14 @@ import { sideOfLine } from './side-of-line.ts'
 export interface Offset {
   arcmin: number
   sdArcmin: number | null
-  measures: 'azimuth' | 'altitude'
+  measures: SightlineAudit['measures']
   /** Stands in brackets after the figure. */
   also?: readonly string[]
 }
 
 /**
- * Where the line points as seen from its target, for a sentence: `1.8′ ± 2.5′ to the left of it`, `5′ above it`, or
- * `at it` where the two print as one.
+ * Where the line points as seen from its target, for a sentence: `1.8′ ± 2.5′ to the left of it`, `5′ above it`,
+ * `12′ beyond it` for an angle, or `at it` where the two print as one.
  */
 export function offsetFromLine({ arcmin, sdArcmin, measures, also = [] }: Offset): string {
   const side = sideOfLine(arcmin, measures)
@@ -23,7 +24,7 @@ export function offsetFromLine({ arcmin, sdArcmin, measures, also = [] }: Offset
 }
 
 /** What is held against the target, with its verb: `the line points`, `the altitude measured lies`. */
-export function whatPoints(measures: 'azimuth' | 'altitude', when: 'now' | 'then'): string {
-  if (measures === 'altitude') return `the altitude measured ${when === 'now' ? 'lies' : 'lay'}`
+export function whatPoints(measures: SightlineAudit['measures'], when: 'now' | 'then'): string {
+  if (measures !== 'azimuth') return `the ${measures} measured ${when === 'now' ? 'lies' : 'lay'}`
   return `the line ${when === 'now' ? 'points' : 'pointed'}`
 }

@@ -466,7 +466,7 @@ export function calendarAudit(): Audit {
     })),
     today: lines.map(({ name }) => ({
       ...{ sightline: name, year: 2026, direction_deg: 59, offset_arcmin: -65 },
-      ...{ sun_widths: 2.1, offset_cm: 190 },
+      ...{ sun_widths: 2.1, offset_cm: 190, next: null, next_reason: 'none is reckoned here' },
     })),
   }
 }

@@ -117,7 +117,7 @@ describe('what is wrong, at its place, with what to write instead', () => {
     expect(problem).toMatchObject({
       severity: 'error',
       message: '`nothing` is not a name that `of` of `figure` knows',
-      expected: 'one of: premise, track',
+      expected: 'one of: premise, plan, horizon, track',
     })
   })
 })
