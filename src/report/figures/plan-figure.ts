@@ -18,6 +18,9 @@ import { TEXT_SIZE, text } from './shape.ts'
 import { type FigureDrawing, svgRoot } from './svg-root.ts'
 import { fitText, textWidth } from './text-width.ts'
 
+/** Room for the tails of the letters in the last row. */
+const DESCENT = 2
+
 /**
  * The survey from above, true north up and to scale; beside it the view along each line, drawn many times as wide as
  * it is deep, with the tolerances held plausible as a wedge and where the target stood at each date. Points; 440 wide,
@@ -35,7 +38,7 @@ export function planFigure(audit: Audit): FigureDrawing | null {
     ...(layout.planBottom < height ? [footHead(layout)] : []),
   ]
   return svgRoot(
-    { width, height },
+    { width, height: height + DESCENT },
     `Plan of the survey: ${audit.structure.name}`,
     planAlt(audit, layout),
     shapes,
