@@ -27,12 +27,18 @@ export function dateBudget(sight: Sight, branch: Branch, year: number): BudgetSh
   if (prediction === null || drift === null || drift === 0) return []
   const sources = [
     { source: MEASURED[sight.measures], effectDeg: sight.measuredSdDeg },
-    { source: 'the plan’s north', effectDeg: sight.northSdDeg },
+    {
+      source: sight.northOf === 'grid' ? 'the grid’s north' : 'the plan’s north',
+      effectDeg: sight.northSdDeg,
+    },
     ...prediction.errors,
   ]
-  const rows = sources
-    .map(({ source, effectDeg }) => ({ source, sd: Math.abs(effectDeg / drift) }))
-    .filter(({ sd }) => sd > 0)
+  // What one source does in several ways, as a star's place in two coordinates, is one row.
+  const bySource = new Map<string, number>()
+  for (const { source, effectDeg } of sources) {
+    bySource.set(source, Math.hypot(bySource.get(source) ?? 0, effectDeg / drift))
+  }
+  const rows = [...bySource].map(([source, sd]) => ({ source, sd })).filter(({ sd }) => sd > 0)
   const variance = rows.reduce((sum, row) => sum + row.sd ** 2, 0)
   return rows.map((row) => ({ ...row, share: row.sd ** 2 / variance })).sort((a, b) => b.sd - a.sd)
 }

@@ -1,4 +1,5 @@
 import { wrap180 } from '../quantity/degrees.ts'
+import { lnNormalBetween } from './normal.ts'
 import type { Branch, CurvePiece, Prediction, Sight } from './sight.ts'
 
 /**
@@ -18,6 +19,8 @@ export interface Straight {
   measuredVariance: number
   axis: string | null
   toleranceScale: number
+  /** Names the north that lines share the error of. */
+  northOf: string | null
   /** Effects of one standard deviation of the errors that lines share: north and obliquity, degrees. */
   shared: readonly [north: number, obliquity: number]
 }
@@ -26,10 +29,57 @@ export interface Curved {
   kind: 'curved'
   /** Whether the target gets there as it is, and not only by some of its likely errors. */
   reached: boolean
+  /** Of the measurement of this line alone, degrees². */
   variance: number
+  measuredVariance: number
+  axis: string | null
   toleranceScale: number
+  northOf: string | null
+  /** As of a straight one; the error of the obliquity is in the pieces. */
+  shared: readonly [north: number, obliquity: 0]
   /** Runs of likely errors, with offsets in place of directions. */
   pieces: readonly CurvePiece[]
+  /** What the pieces come to all in all. */
+  run: RunOfErrors
+}
+
+/** The offset over all likely errors of a curved comparison. */
+export interface RunOfErrors {
+  meanDeg: number
+  /** Of the offset about its mean, degrees². */
+  variance: number
+  /** Of that the part which no straight line through the errors explains: how far it is from a straight comparison. */
+  bend: number
+}
+
+/** Sums up the pieces of a curved comparison. */
+export function runOf(pieces: readonly CurvePiece[]): RunOfErrors {
+  let [total, z, zz, d, dd, zd] = [0, 0, 0, 0, 0, 0]
+  for (const { fromSd, toSd, fromDeg, toDeg } of pieces) {
+    const mass = Math.exp(lnNormalBetween(fromSd, toSd))
+    if (mass === 0) continue
+    // Moments of a normal error cut to the piece, in which the offset is start + slope · error.
+    const first = density(fromSd) - density(toSd)
+    const second = mass + fromSd * density(fromSd) - toSd * density(toSd)
+    const slope = (toDeg - fromDeg) / (toSd - fromSd)
+    const start = fromDeg - slope * fromSd
+    total += mass
+    z += first
+    zz += second
+    d += start * mass + slope * first
+    dd += start * start * mass + 2 * start * slope * first + slope * slope * second
+    zd += start * first + slope * second
+  }
+  if (total === 0) return { meanDeg: 0, variance: 0, bend: 0 }
+  const [meanZ, meanDeg] = [z / total, d / total]
+  const variance = Math.max(0, dd / total - meanDeg ** 2)
+  const [spreadZ, together] = [zz / total - meanZ ** 2, zd / total - meanZ * meanDeg]
+  const explained = spreadZ > 0 ? together ** 2 / spreadZ : 0
+  return { meanDeg, variance, bend: Math.max(0, variance - explained) }
+}
+
+function density(sd: number): number {
+  return Math.exp(-(sd * sd) / 2) / Math.sqrt(2 * Math.PI)
 }
 
 /** Whether the target gets there as it is. */
@@ -59,20 +109,27 @@ function straight(sight: Sight, { directionDeg, errors }: Prediction): Straight 
     measuredVariance: sight.measuredSdDeg ** 2,
     axis: sight.axis,
     toleranceScale: sight.toleranceScale,
+    northOf: sight.northOf,
     shared: [sight.northSdDeg, obliquity],
   }
 }
 
 function curved(sight: Sight, pieces: readonly CurvePiece[], reached: boolean): Curved {
+  const offsets = pieces.map(({ fromSd, toSd, fromDeg, toDeg }) => {
+    const offset = wrap180(sight.measuredDeg - fromDeg)
+    return { fromSd, toSd, fromDeg: offset, toDeg: offset - (toDeg - fromDeg) }
+  })
   return {
     kind: 'curved',
     reached,
-    variance: sight.measuredSdDeg ** 2 + sight.northSdDeg ** 2,
+    variance: sight.measuredSdDeg ** 2,
+    measuredVariance: sight.measuredSdDeg ** 2,
+    axis: sight.axis,
     toleranceScale: sight.toleranceScale,
-    pieces: pieces.map(({ fromSd, toSd, fromDeg, toDeg }) => {
-      const offset = wrap180(sight.measuredDeg - fromDeg)
-      return { fromSd, toSd, fromDeg: offset, toDeg: offset - (toDeg - fromDeg) }
-    }),
+    northOf: sight.northOf,
+    shared: [sight.northSdDeg, 0],
+    pieces: offsets,
+    run: runOf(offsets),
   }
 }
 

@@ -11,8 +11,13 @@ export interface Sight {
   axis: string | null
   /** Of the measurement, this line's alone. */
   measuredSdDeg: number
-  /** Of the plan's north, an error this line shares with the others of its plan; 0 for a measured azimuth. */
+  /**
+   * Of the north it rests on, an error that this line shares with all others of the same north; 0 for a measured
+   * azimuth. Negative where that error turns this line the other way round.
+   */
   northSdDeg: number
+  /** Names that north, such as the plan's or the grid's; null where there is none. */
+  northOf: string | null
   /** The standard deviation of what was built, in build tolerances: 1, or √2 for the angle between two built lines. */
   toleranceScale: number
   /** The directions its target may have in one year, all as likely: a date counts as the mean over them. */

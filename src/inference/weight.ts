@@ -1,4 +1,4 @@
-import type { Comparison, Curved, Straight } from './comparison.ts'
+import type { Comparison, Straight } from './comparison.ts'
 import { lnNormalBetween } from './normal.ts'
 import type { CurvePiece } from './sight.ts'
 
@@ -10,9 +10,12 @@ const SMALLEST_SD_DEG = 0.01 / 3600
  * each was built with a standard deviation of `toleranceDeg` about its target.
  *
  * For one line and branch ln[(1/s) exp(−d²/2s²)] with s² = τ² + the comparison's variances; for several branches of a
- * target the mean over them. For several lines the multivariate normal density with the errors they share (north,
- * obliquity) as its correlation; a curved comparison, and a target of several branches, counts as independent of the
- * others. −∞ where one of the targets is not to be seen so at all.
+ * target the mean over them. Several lines are taken one after the other, each given those before it, by the errors
+ * that they share: their north, their build error and survey where they stand on one axis, and the obliquity. For
+ * straight comparisons that is the multivariate normal density. Curved ones come after them, the less bent first, and
+ * last those of several branches; the last one is exact, to those after it each other one counts as normal about its
+ * mean.
+ * The obliquity is in the pieces of a curved one, and so not shared. −∞ where a target is not to be seen so at all.
  *
  * @param comparisons One list for each line, with one entry for each branch of its target.
  */
@@ -20,28 +23,91 @@ export function lnWeight(
   comparisons: readonly (readonly (Comparison | null)[])[],
   toleranceDeg: number,
 ): number {
-  const straight: Straight[] = []
+  const { straight, others } = sorted(comparisons)
+  const factor: Factor = []
   let sum = 0
+  for (const line of straight) {
+    const given = givenThe(factor, line, toleranceDeg)
+    sum += lnOfStraight(line, given)
+    if (straight.length + others.length > 1) append(factor, line, given, line.offsetDeg, 0)
+  }
+  for (const [i, branches] of others.entries()) {
+    const logs = branches.map((branch) =>
+      branch === null ? -Infinity : lnOfBranch(branch, givenThe(factor, branch, toleranceDeg)),
+    )
+    const top = Math.max(...logs)
+    if (top === -Infinity) return -Infinity
+    sum += top + Math.log(logs.reduce((total, ln) => total + Math.exp(ln - top), 0) / logs.length)
+    if (i < others.length - 1) appendBranch(factor, branches[logs.indexOf(top)]!, toleranceDeg)
+  }
+  return sum
+}
+
+/** Lines of one straight course, and the rest. */
+function sorted(comparisons: readonly (readonly (Comparison | null)[])[]): {
+  straight: Straight[]
+  others: (readonly (Comparison | null)[])[]
+} {
+  const straight: Straight[] = []
+  const others: (readonly (Comparison | null)[])[] = []
   for (const branches of comparisons) {
     const only = branches.length === 1 ? branches[0]! : null
     if (only?.kind === 'straight') straight.push(only)
-    else sum += lnMeanOf(branches, toleranceDeg)
+    else others.push(branches)
   }
-  if (straight.length === 0) return sum
-  return (
-    sum + (straight.length === 1 ? lnOfOne(straight[0]!, toleranceDeg) : lnOfSeveral(straight, toleranceDeg))
-  )
+  // The more a line bends, the less it counts as normal to those after it: the most bent one comes last.
+  return { straight, others: others.sort((a, b) => bendOf(a) - bendOf(b)) }
 }
 
-/** ln of the mean weight over the branches of one target; a branch that is not to be seen weighs nothing. */
-function lnMeanOf(branches: readonly (Comparison | null)[], toleranceDeg: number): number {
-  const logs = branches.map((branch) => {
-    if (branch === null) return -Infinity
-    return branch.kind === 'straight' ? lnOfOne(branch, toleranceDeg) : lnOfCurved(branch, toleranceDeg)
+function bendOf(branches: readonly (Comparison | null)[]): number {
+  const only = branches.length === 1 ? branches[0]! : null
+  return only?.kind === 'curved' ? only.run.bend : Infinity
+}
+
+/**
+ * Lines taken so far: the rows of Cholesky's factor L of their covariance Σ = L Lᵀ, and their offsets in it, L⁻¹ d.
+ */
+type Factor = { line: Comparison; row: readonly number[]; scaled: number }[]
+
+/** What a line's offset is to be expected as, given the lines before it. */
+interface Given {
+  row: readonly number[]
+  meanDeg: number
+  /** Of the offset about that mean, degrees². */
+  variance: number
+}
+
+function givenThe(factor: Factor, line: Comparison, toleranceDeg: number): Given {
+  const row: number[] = []
+  let meanDeg = 0
+  let variance = ownVariance(line, toleranceDeg) + line.shared[0] ** 2 + line.shared[1] ** 2
+  factor.forEach((before, j) => {
+    let entry = covariance(line, before.line, toleranceDeg)
+    for (let k = 0; k < j; k++) entry -= row[k]! * before.row[k]!
+    entry /= before.row[j]!
+    row.push(entry)
+    meanDeg += entry * before.scaled
+    variance -= entry * entry
   })
-  const top = Math.max(...logs)
-  if (top === -Infinity) return -Infinity
-  return top + Math.log(logs.reduce((sum, ln) => sum + Math.exp(ln - top), 0) / logs.length)
+  return { row, meanDeg, variance: Math.max(variance, SMALLEST_SD_DEG ** 2) }
+}
+
+/** @param spread Variance that the line has besides what it is given to have, degrees². */
+function append(
+  factor: Factor,
+  line: Comparison,
+  { row, meanDeg, variance }: Given,
+  offsetDeg: number,
+  spread: number,
+): void {
+  const sd = Math.sqrt(variance + spread)
+  factor.push({ line, row: [...row, sd], scaled: (offsetDeg - meanDeg) / sd })
+}
+
+function appendBranch(factor: Factor, branch: Comparison, toleranceDeg: number): void {
+  const given = givenThe(factor, branch, toleranceDeg)
+  if (branch.kind === 'straight') append(factor, branch, given, branch.offsetDeg, 0)
+  else append(factor, branch, given, branch.run.meanDeg, branch.run.variance)
 }
 
 /** Variance of one line's own errors together with its build tolerance, degrees². */
@@ -52,55 +118,22 @@ function ownVariance(
   return Math.max(SMALLEST_SD_DEG ** 2, variance + (toleranceScale * toleranceDeg) ** 2)
 }
 
-function lnOfOne(line: Straight, toleranceDeg: number): number {
-  const { offsetDeg, shared } = line
-  const total = ownVariance(line, toleranceDeg) + shared[0] ** 2 + shared[1] ** 2
-  return -(Math.log(total) + (offsetDeg * offsetDeg) / total) / 2
+function lnOfBranch(branch: Comparison, given: Given): number {
+  return branch.kind === 'straight'
+    ? lnOfStraight(branch, given)
+    : lnOfCurved(branch.pieces, given.variance, given.meanDeg)
 }
 
-/** ln of the normal density: −½(ln det + dᵀ Σ⁻¹ d). */
-function lnOfSeveral(lines: readonly Straight[], toleranceDeg: number): number {
-  const { lnDeterminant, squared } = whitened(lines, toleranceDeg)
-  return -(lnDeterminant + squared) / 2
+function lnOfStraight({ offsetDeg }: Straight, { meanDeg, variance }: Given): number {
+  return -(Math.log(variance) + (offsetDeg - meanDeg) ** 2 / variance) / 2
 }
 
-/**
- * Squared distance of several lines from their targets in units of their joint errors, dᵀ Σ⁻¹ d, and the logarithm of
- * the determinant of Σ, by Cholesky's factors L Lᵀ of the covariance. Lines share the errors of north and of the
- * obliquity; lines on one axis share their build error and their survey.
- */
-function whitened(
-  lines: readonly Straight[],
-  toleranceDeg: number,
-): { lnDeterminant: number; squared: number } {
-  const factor: number[][] = []
-  const scaled: number[] = []
-  let lnDeterminant = 0
-  lines.forEach((line, i) => {
-    const row: number[] = []
-    let diagonal = ownVariance(line, toleranceDeg) + line.shared[0] ** 2 + line.shared[1] ** 2
-    let rest = line.offsetDeg
-    for (let j = 0; j < i; j++) {
-      let entry = covariance(line, lines[j]!, toleranceDeg)
-      for (let k = 0; k < j; k++) entry -= row[k]! * factor[j]![k]!
-      entry /= factor[j]![j]!
-      row.push(entry)
-      diagonal -= entry * entry
-      rest -= entry * scaled[j]!
-    }
-    row.push(Math.sqrt(Math.max(diagonal, SMALLEST_SD_DEG ** 2)))
-    factor.push(row)
-    scaled.push(rest / row[i]!)
-    lnDeterminant += 2 * Math.log(row[i]!)
-  })
-  return { lnDeterminant, squared: scaled.reduce((sum, value) => sum + value * value, 0) }
+function covariance(a: Comparison, b: Comparison, toleranceDeg: number): number {
+  const ofNorth = a.northOf === b.northOf ? a.shared[0] * b.shared[0] : 0
+  return ofNorth + a.shared[1] * b.shared[1] + axisCovariance(a, b, toleranceDeg)
 }
 
-function covariance(a: Straight, b: Straight, toleranceDeg: number): number {
-  return a.shared[0] * b.shared[0] + a.shared[1] * b.shared[1] + axisCovariance(a, b, toleranceDeg)
-}
-
-function axisCovariance(a: Straight, b: Straight, toleranceDeg: number): number {
+function axisCovariance(a: Comparison, b: Comparison, toleranceDeg: number): number {
   if (a.axis === null || a.axis !== b.axis) return 0
   const built = a.toleranceScale * b.toleranceScale * toleranceDeg ** 2
   return built + Math.min(a.measuredVariance, b.measuredVariance)
@@ -114,21 +147,31 @@ function axisCovariance(a: Straight, b: Straight, toleranceDeg: number): number 
  * errors either.
  */
 export function squaredDeviation(comparisons: readonly (readonly (Comparison | null)[])[]): number {
-  const straight: Straight[] = []
+  const { straight, others } = sorted(comparisons)
+  const factor: Factor = []
   let sum = 0
-  for (const branches of comparisons) {
-    const only = branches.length === 1 ? branches[0]! : null
-    if (only?.kind === 'straight') straight.push(only)
-    else sum += Math.min(...branches.map(squaredOfBranch))
+  for (const line of straight) {
+    const given = givenThe(factor, line, 0)
+    sum += squaredOf(line, given)
+    append(factor, line, given, line.offsetDeg, 0)
   }
-  return straight.length === 0 ? sum : sum + whitened(straight, 0).squared
+  for (const branches of others) {
+    const squares = branches.map((branch) =>
+      branch === null ? Infinity : squaredOf(branch, givenThe(factor, branch, 0)),
+    )
+    const least = Math.min(...squares)
+    if (least === Infinity) return Infinity
+    sum += least
+    appendBranch(factor, branches[squares.indexOf(least)]!, 0)
+  }
+  return sum
 }
 
-function squaredOfBranch(branch: Comparison | null): number {
-  if (branch === null) return Infinity
-  if (branch.kind === 'straight') return whitened([branch], 0).squared
-  const best = Math.max(...likelyTurns(branch.pieces).map((turn) => lnOfCurved(branch, 0, turn)))
-  return leastError(branch.pieces) ** 2 + Math.max(0, 2 * (best - lnOfCurved(branch, 0)))
+function squaredOf(branch: Comparison, { meanDeg, variance }: Given): number {
+  if (branch.kind === 'straight') return (branch.offsetDeg - meanDeg) ** 2 / variance
+  const { pieces } = branch
+  const best = Math.max(...likelyTurns(pieces).map((turn) => lnOfCurved(pieces, variance, turn)))
+  return leastError(pieces) ** 2 + Math.max(0, 2 * (best - lnOfCurved(pieces, variance, meanDeg)))
 }
 
 /** The error that it takes for the target to be seen at all, in standard deviations. */
@@ -151,13 +194,8 @@ function likelyTurns(pieces: readonly CurvePiece[]): number[] {
 const NEGLIGIBLE = 20
 
 /** ln of the density averaged over the errors, exact where direction runs straight inside each piece. */
-function lnOfCurved(
-  curved: Pick<Curved, 'pieces' | 'variance' | 'toleranceScale'>,
-  toleranceDeg: number,
-  turnedBackDeg = 0,
-): number {
-  const { pieces } = curved
-  const sd = Math.sqrt(ownVariance(curved, toleranceDeg))
+function lnOfCurved(pieces: readonly CurvePiece[], variance: number, turnedBackDeg: number): number {
+  const sd = Math.sqrt(variance)
   let [highest, likeliest] = [-Infinity, pieces[0]!]
   for (const piece of pieces) {
     const bound = boundOf(piece, turnedBackDeg, sd)

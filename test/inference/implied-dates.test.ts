@@ -233,6 +233,7 @@ describe('a direction that leaps past the line', () => {
     measuredSdDeg: 0.01,
     northSdDeg: 0,
     toleranceScale: 1,
+    northOf: null,
     branches: [
       { predict: (year) => ({ directionDeg: (year < 500 ? before : after) + year * 1e-5, errors: [] }) },
     ],

@@ -45,6 +45,7 @@ export function horizonSight(line: HorizonLine): Sight {
     measuredDeg: line.azimuthDeg,
     axis: line.axis,
     toleranceScale: 1,
+    northOf: 'plan',
     measuredSdDeg: line.azimuthSdDeg,
     northSdDeg: line.northSdDeg,
     branches: [horizonBranch({ latitudeDeg: line.latitudeDeg, at: line.at, altitude, declination })],
@@ -149,6 +150,7 @@ export function branchedSight(branches: readonly Branch[], changes: Partial<Sigh
     measuredDeg: 60,
     axis: null,
     toleranceScale: 1,
+    northOf: 'plan',
     measuredSdDeg: 0,
     northSdDeg: 0,
     branches,
@@ -185,6 +187,7 @@ export function straightAt(offsetDeg: number, variance: number): Straight {
     measuredVariance: 0,
     axis: null,
     toleranceScale: 1,
+    northOf: 'plan',
     shared: [0, 0],
   }
 }

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import type { Comparison, Curved, Straight } from '../../src/inference/comparison.ts'
+import { type Comparison, type Curved, runOf, type Straight } from '../../src/inference/comparison.ts'
 import { lnWeight as lnWeightOf, squaredDeviation } from '../../src/inference/weight.ts'
 import { expectWithin } from '../published/expect-within.ts'
 import { straightAt } from './sights.ts'
@@ -99,17 +99,23 @@ describe('the weight of a curved comparison', () => {
   /** Offsets that run straight from one end to the other while the errors run through a stretch of theirs. */
   const pieces = (fromSd: number, toSd: number, fromDeg: number, toDeg: number, n: number): Curved => {
     const cut = (from: number, to: number, i: number) => from + ((to - from) * i) / n
+    const runs = Array.from({ length: n }, (_, i) => ({
+      fromSd: cut(fromSd, toSd, i),
+      toSd: cut(fromSd, toSd, i + 1),
+      fromDeg: cut(fromDeg, toDeg, i),
+      toDeg: cut(fromDeg, toDeg, i + 1),
+    }))
     return {
       kind: 'curved',
       reached: true,
       variance: 0.02,
+      measuredVariance: 0.02,
+      axis: null,
       toleranceScale: 1,
-      pieces: Array.from({ length: n }, (_, i) => ({
-        fromSd: cut(fromSd, toSd, i),
-        toSd: cut(fromSd, toSd, i + 1),
-        fromDeg: cut(fromDeg, toDeg, i),
-        toDeg: cut(fromDeg, toDeg, i + 1),
-      })),
+      northOf: null,
+      shared: [0, 0],
+      pieces: runs,
+      run: runOf(runs),
     }
   }
 
@@ -224,12 +230,68 @@ describe('the weight of a target of several branches', () => {
     expectWithin(got, lnOfOne(10, 0.1) - Math.LN2, 1e-9, 'nepers')
   })
 
-  test('counts beside other lines as independent of them', () => {
+  test('shares north with the other lines in each of its branches', () => {
     const branches = [straight(0.1, 0.1, 0.3), straight(-0.3, 0.2, 0.3)]
     const others = [straight(0.2, 0.1, 0.3), straight(0.25, 0.1, 0.3)]
-    const want = lnWeightOf([branches], 0.1) + lnWeight(others, 0.1)
+    const each = branches.map((branch) => lnWeight([...others, branch], 0.1))
+    const want = Math.log((Math.exp(each[0]!) + Math.exp(each[1]!)) / 2)
     const got = lnWeightOf([[others[0]!], branches, [others[1]!]], 0.1)
-    expectWithin(got, want, 1e-12, 'nepers')
+    expectWithin(got, want, 1e-9, 'nepers')
+  })
+})
+
+describe('a north that lines share', () => {
+  const [a, b] = [straight(0.5, 0.1, 0.4), straight(0.55, 0.1, 0.4)]
+
+  test('is one error in lines of one north, and two in lines of two', () => {
+    const together = lnWeight([a, b], 0)
+    const apart = lnWeight([a, { ...b, northOf: 'grid' }], 0)
+    expectWithin(
+      apart,
+      lnOfOne(0.5, Math.hypot(0.1, 0.4)) + lnOfOne(0.55, Math.hypot(0.1, 0.4)),
+      1e-9,
+      'nepers',
+    )
+    expect(together).toBeGreaterThan(apart + 0.5)
+  })
+
+  /** A straight line written as a curved one: offsets that run evenly through its likely errors. */
+  const asCurved = (line: Straight, sd: number): Curved => {
+    const pieces = [-8, -1, 0.5, 8].flatMap((toSd, i, cuts) => {
+      const fromSd = cuts[i - 1]
+      if (fromSd === undefined) return []
+      return [{ fromSd, toSd, fromDeg: line.offsetDeg + fromSd * sd, toDeg: line.offsetDeg + toSd * sd }]
+    })
+    return {
+      kind: 'curved',
+      reached: true,
+      variance: line.variance - sd ** 2,
+      measuredVariance: line.variance - sd ** 2,
+      axis: line.axis,
+      toleranceScale: 1,
+      northOf: line.northOf,
+      shared: [line.shared[0], 0],
+      pieces,
+      run: runOf(pieces),
+    }
+  }
+
+  test.each([0, 0.1, 0.5])('is shared with a curved line as with a straight one: τ = %s°', (tolerance) => {
+    const curved = asCurved(b, 0.08)
+    expectWithin(lnWeight([a, curved], tolerance), lnWeight([a, b], tolerance), 1e-6, 'nepers')
+    const twice = lnWeight([asCurved(a, 0.08), curved], tolerance)
+    expectWithin(twice, lnWeight([a, b], tolerance), 1e-6, 'nepers')
+  })
+
+  test('is shared with a curved line in the squared deviation', () => {
+    const want = squaredDeviation([[a], [b]])
+    expectWithin(squaredDeviation([[a], [asCurved(b, 0.001)]]), want, 0.02, 'of a squared deviation')
+  })
+
+  test('counts in lines on one axis, curved or not', () => {
+    const [one, other] = [a, b].map((line) => ({ ...line, axis: 'p\nq', measuredVariance: 0.002 }))
+    const curved = { ...asCurved(other!, 0.08), measuredVariance: 0.002 }
+    expectWithin(lnWeight([one!, curved], 0.5), lnWeight([one!, other!], 0.5), 1e-6, 'nepers')
   })
 })
 
