@@ -50,18 +50,6 @@ export const KRASSOVSKY_1940: Ellipsoid = {
   inverseFlattening: 298.3,
 }
 
-/** Every ellipsoid above. */
-export const ELLIPSOIDS: readonly Ellipsoid[] = [
-  WGS84,
-  GRS80,
-  AIRY_1830,
-  BESSEL_1841,
-  CLARKE_1866,
-  CLARKE_1880_IGN,
-  INTERNATIONAL_1924,
-  KRASSOVSKY_1940,
-]
-
 function fromAxes(name: string, equatorialRadiusM: number, polarRadiusM: number): Ellipsoid {
   return {
     name,

@@ -1,6 +1,5 @@
 import { DEG, wrap360 } from '../quantity/degrees.ts'
-import { geodesicLine } from './geodesic-line.ts'
-import { type GridPoint, geographicOf, type TransverseMercatorGrid } from './transverse-mercator.ts'
+import type { GridPoint } from './transverse-mercator.ts'
 
 /** A line between two places of a map grid, on the plane of the grid and on the Earth. */
 export interface GridLine {
@@ -9,20 +8,6 @@ export interface GridLine {
   planeLengthM: number
   /** From true north through east where the line starts, degrees, 0 to 360. */
   azimuthDeg: number
-}
-
-/**
- * The line from one place of a known map grid to another, with its length on the ellipsoid besides. Convergence,
- * scale and the curvature that a straight line has on the grid are all in it: both ends are taken to the ellipsoid.
- * Throws a RangeError where both are the same place, and as `geographicOf` does.
- */
-export function gridLine(
-  from: GridPoint,
-  to: GridPoint,
-  grid: TransverseMercatorGrid,
-): GridLine & { lengthM: number } {
-  const plane = planeLine(from, to)
-  return { ...plane, ...geodesicLine(geographicOf(from, grid), geographicOf(to, grid), grid.ellipsoid) }
 }
 
 /**

@@ -47,6 +47,22 @@ export function horizonCrossing(
   }
 }
 
+/**
+ * ∂δ/∂h: what a degree of true altitude does to the declination at one azimuth, degrees per degree. It is the cosine of
+ * the parallactic angle, (sin φ − sin δ sin h)/(cos δ cos h), and so from −1 to 1. All angles in degrees; a body at a
+ * pole or in the zenith has no such angle.
+ */
+export function declinationPerAltitude(
+  declination: number,
+  altitudeDeg: number,
+  latitudeDeg: number,
+): number {
+  const delta = declination * DEG
+  const h = altitudeDeg * DEG
+  const phi = latitudeDeg * DEG
+  return (Math.sin(phi) - Math.sin(delta) * Math.sin(h)) / (Math.cos(delta) * Math.cos(h))
+}
+
 /** True altitudes between which a body of a declination moves in a day at a latitude; all in degrees. */
 export function altitudeRangeDeg(declination: number, latitudeDeg: number): { low: number; high: number } {
   return { low: Math.abs(latitudeDeg + declination) - 90, high: 90 - Math.abs(latitudeDeg - declination) }

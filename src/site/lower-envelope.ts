@@ -25,10 +25,18 @@ export function lowerEnvelope(lines: readonly Polyline[]): EnvelopePoint[] {
   return envelope
 }
 
+/** A stretch, in x, of one edge of a line. */
+interface Piece {
+  line: Polyline
+  edge: number
+  from: number
+  to: number
+}
+
 /** Where only one of the two is, that one; where both are, the lower; where they cross, the crossing twice. */
 function lowerOfTwo(first: Polyline, second: Polyline): EnvelopePoint[] {
   if (first.length < 2) return [...first, ...second]
-  const lower: EnvelopePoint[] = []
+  const pieces: Piece[] = []
   let x = Math.min(first[0]!.x, second[0]!.x)
   let [i, k] = [0, 0]
   for (;;) {
@@ -36,41 +44,45 @@ function lowerOfTwo(first: Polyline, second: Polyline): EnvelopePoint[] {
     k = edgeAt(second, k, x)
     const a = x >= first[i]!.x && i < first.length - 1
     const b = x >= second[k]!.x && k < second.length - 1
-    if (!a && !b) return lower
+    if (!a && !b) return pointsOf(pieces)
     const end = Math.min(nextX(first, i, x), nextX(second, k, x))
-    if (a && b) pushLower(lower, first, i, second, k, x, end)
-    else if (a) pushBoth(lower, pointAt(first, i, x), pointAt(first, i, end))
-    else pushBoth(lower, pointAt(second, k, x), pointAt(second, k, end))
+    const ofFirst = { line: first, edge: i, from: x, to: end }
+    const ofSecond = { line: second, edge: k, from: x, to: end }
+    if (a && b) addLower(pieces, ofFirst, ofSecond)
+    else add(pieces, a ? ofFirst : ofSecond)
     x = end
   }
 }
 
-function pushLower(
-  lower: EnvelopePoint[],
-  first: Polyline,
-  i: number,
-  second: Polyline,
-  k: number,
-  x: number,
-  end: number,
-): void {
-  const [a0, a1] = [pointAt(first, i, x), pointAt(first, i, end)]
-  const [b0, b1] = [pointAt(second, k, x), pointAt(second, k, end)]
-  const before = a0.y - b0.y
-  const after = a1.y - b1.y
-  if (before <= 0 && after <= 0) pushBoth(lower, a0, a1)
-  else if (before >= 0 && after >= 0) pushBoth(lower, b0, b1)
+/** Of two pieces over the same stretch. */
+function addLower(pieces: Piece[], first: Piece, second: Piece): void {
+  const { from, to } = first
+  const apart = (x: number) => pointAt(first, x).y - pointAt(second, x).y
+  const [before, after] = [apart(from), apart(to)]
+  if (before <= 0 && after <= 0) add(pieces, first)
+  else if (before >= 0 && after >= 0) add(pieces, second)
   else {
-    const middle = x + (before / (before - after)) * (end - x)
-    const [a, b] = [pointAt(first, i, middle), pointAt(second, k, middle)]
-    pushBoth(lower, ...(before < 0 ? ([a0, a] as const) : ([b0, b] as const)))
-    pushBoth(lower, ...(before < 0 ? ([b, b1] as const) : ([a, a1] as const)))
+    const middle = from + (before / (before - after)) * (to - from)
+    const [lower, then] = before < 0 ? [first, second] : [second, first]
+    add(pieces, { ...lower, to: middle })
+    add(pieces, { ...then, from: middle })
   }
 }
 
-function pushBoth(line: EnvelopePoint[], from: EnvelopePoint, to: EnvelopePoint): void {
-  push(line, from)
-  push(line, to)
+/** An edge goes on as one: where a line that lies above it has its points, it gets none, or they would pile up. */
+function add(pieces: Piece[], piece: Piece): void {
+  const last = pieces.at(-1)
+  if (last?.line === piece.line && last.edge === piece.edge && last.to === piece.from) last.to = piece.to
+  else pieces.push(piece)
+}
+
+function pointsOf(pieces: readonly Piece[]): EnvelopePoint[] {
+  const points: EnvelopePoint[] = []
+  for (const piece of pieces) {
+    push(points, pointAt(piece, piece.from))
+    push(points, pointAt(piece, piece.to))
+  }
+  return points
 }
 
 function push(line: EnvelopePoint[], point: EnvelopePoint): void {
@@ -91,9 +103,9 @@ function nextX(line: Polyline, i: number, x: number): number {
   return line[i + 1]?.x ?? Infinity
 }
 
-function pointAt(line: Polyline, i: number, x: number): EnvelopePoint {
-  const from = line[i]!
-  const to = line[i + 1]!
+function pointAt({ line, edge }: Piece, x: number): EnvelopePoint {
+  const from = line[edge]!
+  const to = line[edge + 1]!
   if (x === from.x) return from
   if (x === to.x) return to
   const share = (x - from.x) / (to.x - from.x)

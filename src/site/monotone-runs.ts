@@ -14,22 +14,24 @@ export interface MonotoneRuns {
    * the values fall there. A level that the values only touch is passed twice or not at all.
    */
   passings: (level: number, found: (index: number, share: number, falls: boolean) => void) => void
-  /** The values at which passings come or go, in order of size. */
-  turns: readonly number[]
 }
 
-/** Cuts a list of values into runs that only grow or only fall, so that a level is found in each by bisection. */
+/**
+ * Cuts a list of values into runs that only grow or only fall, so that a level is found in each by bisection. Of all
+ * the runs only those that hold the level are looked at: a query takes the time of its passings, each times the
+ * logarithm of the number of runs.
+ */
 export function monotoneRuns(values: Float64Array): MonotoneRuns {
   const runs = runsOf(values)
+  const layers = layersOver(runs)
   const passings: MonotoneRuns['passings'] = (level, found) => {
-    for (const { first, last, low, high, falls } of runs) {
-      if (level < low || level >= high) continue
+    visitHolding(layers, level, layers.length - 1, 0, (run) => {
+      const { first, last, falls } = runs[run]!
       const index = indexBefore(values, level, first, last, falls)
       found(index, (level - values[index]!) / (values[index + 1]! - values[index]!), falls)
-    }
+    })
   }
-  const ends = runs.flatMap(({ low, high }) => [low, high])
-  return { passings, turns: [...new Set(ends)].sort((a, b) => a - b) }
+  return { passings }
 }
 
 function runsOf(values: Float64Array): Run[] {
@@ -49,6 +51,49 @@ function runsOf(values: Float64Array): Run[] {
     }
   }
   return runs
+}
+
+/** From where to where the values go in each run, or in each two neighbours of the layer below. */
+interface Layer {
+  lows: Float64Array
+  highs: Float64Array
+}
+
+/** The runs' own layer first; the last has one entry, for all of them. */
+function layersOver(runs: readonly Run[]): Layer[] {
+  const layers: Layer[] = [
+    { lows: Float64Array.from(runs, ({ low }) => low), highs: Float64Array.from(runs, ({ high }) => high) },
+  ]
+  for (let layer = layers[0]!; layer.lows.length > 1; layer = layers.at(-1)!) {
+    const { lows, highs } = layer
+    const halves = { length: Math.ceil(lows.length / 2) }
+    layers.push({
+      lows: Float64Array.from(halves, (_, i) => Math.min(...lows.subarray(2 * i, 2 * i + 2))),
+      highs: Float64Array.from(halves, (_, i) => Math.max(...highs.subarray(2 * i, 2 * i + 2))),
+    })
+  }
+  return layers
+}
+
+/**
+ * Goes down to the runs that hold a level, in order. Each run begins where the one before it ended, so that neighbours
+ * that reach from below a level to above it have a run between them that holds it: no way down leads to nothing.
+ */
+function visitHolding(
+  layers: readonly Layer[],
+  level: number,
+  depth: number,
+  entry: number,
+  visit: (run: number) => void,
+): void {
+  const { lows, highs } = layers[depth]!
+  // Written so that an entry past the end of the layer, which is undefined, holds nothing.
+  if (!(level >= lows[entry]! && level < highs[entry]!)) return
+  if (depth === 0) visit(entry)
+  else {
+    visitHolding(layers, level, depth - 1, 2 * entry, visit)
+    visitHolding(layers, level, depth - 1, 2 * entry + 1, visit)
+  }
 }
 
 /** The last index of a run before its values reach a level. */

@@ -6,13 +6,11 @@ export interface SeaHorizon {
   /** Apparent altitude, degrees: 0 or negative. */
   deg: number
   sdDeg: number
-  /** Along the water, metres. */
-  distanceM: number
 }
 
 /**
  * The sea horizon from an eye at a height above the water, metres: cos(dip) = R′/(R′ + H), with R′ = R/(1 − k) the
- * radius of the Earth over which a bent ray counts as straight; distance R′ · dip.
+ * radius of the Earth over which a bent ray counts as straight.
  *
  * The standard deviation is that of the height and of k together: dip goes as √(H(1 − k)).
  * @param coefficient Of terrestrial refraction; 0.13 comes to 1.80′√H, the navigator's 1.76′√H is 0.165.
@@ -36,7 +34,7 @@ export function seaDip(
       ? (dip * eyeHeightSdM) / (2 * eyeHeightM)
       : dipOver(radius, eyeHeightM + eyeHeightSdM) - dip
   const byRefraction = (dip * TERRESTRIAL_REFRACTION.sd) / (2 * (1 - coefficient))
-  return { deg: -dip / DEG || 0, sdDeg: Math.hypot(byHeight, byRefraction) / DEG, distanceM: radius * dip }
+  return { deg: -dip / DEG || 0, sdDeg: Math.hypot(byHeight, byRefraction) / DEG }
 }
 
 /** By the tangent, since a cosine near 1 has half of the digits; radians. */

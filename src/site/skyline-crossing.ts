@@ -1,4 +1,4 @@
-import { DEG, wrap360 } from '../quantity/degrees.ts'
+import { wrap360 } from '../quantity/degrees.ts'
 import { altitudeRangeDeg } from './horizontal.ts'
 import { monotoneRuns } from './monotone-runs.ts'
 import { sightedPassing } from './sighted-passing.ts'
@@ -15,9 +15,8 @@ export type SkylineCrossing =
       /** Geocentric and true. */
       centreAltitudeDeg: number
       contactAzimuthDeg: number
-      /** Change of `azimuthDeg` for each degree of declination, and for each by which the whole skyline is raised. */
+      /** Change of `azimuthDeg` for each degree of declination. */
       perDeclination: number
-      perAltitude: number
     }
   /** If it happens, then where the skyline is not known. */
   | { kind: 'outside profile' }
@@ -26,8 +25,6 @@ export type SkylineCrossing =
 
 export interface SkylineCrossings {
   crossing: (declinationDeg: number) => SkylineCrossing
-  /** Lowest and highest declination of those that cross within the profile; there may be gaps. Null: none does. */
-  reach: { lowDeg: number; highDeg: number } | null
 }
 
 /**
@@ -51,65 +48,32 @@ export function skylineCrossings(skyline: TrueSkyline, sighting: SkylineSighting
     if (!(Math.abs(declination) <= 90))
       throw new RangeError(`a declination is from −90° to 90°, got ${declination}`)
     const passing = sightedPassing(path, runs, declination, sighting, skyline.isClosed)
-    if (passing !== null) return crossingAt(path, passing, declination, sighting)
+    if (passing !== null) return crossingAt(path, passing, sighting)
     const { low, high } = altitudeRangeDeg(declination, sighting.latitudeDeg)
     const misses = skyline.isClosed || high < path.lowestDeg || low > path.highestDeg
     return { kind: misses ? 'never' : 'outside profile' }
   }
-  return { crossing, reach: reachOf(runs.turns, (level) => crossing(level).kind === 'crossing') }
+  return { crossing }
 }
 
 function crossingAt(
   path: SkylinePath,
   passing: Passing,
-  declination: number,
-  { latitudeDeg, aboveCentreArcmin }: SkylineSighting,
+  { aboveCentreArcmin }: SkylineSighting,
 ): SkylineCrossing {
   const sighted = aboveCentreArcmin > 0 ? path.contacts : path.azimuths
-  const perDeclination = stepAt(sighted, passing) / stepAt(path.declinations, passing)
-  const centreAzimuthDeg = between(path.azimuths, passing)
-  const altitude = between(path.altitudes, passing)
   return {
     kind: 'crossing',
     azimuthDeg: wrap360(between(sighted, passing)),
-    centreAzimuthDeg: wrap360(centreAzimuthDeg),
-    centreAltitudeDeg: altitude,
+    centreAzimuthDeg: wrap360(between(path.azimuths, passing)),
+    centreAltitudeDeg: between(path.altitudes, passing),
     contactAzimuthDeg: wrap360(between(path.contacts, passing)),
-    perDeclination,
-    // To raise the skyline does what to lower the body by ∂δ/∂h does.
-    perAltitude:
-      -perDeclination * declinationPerAltitude(centreAzimuthDeg, altitude, declination, latitudeDeg),
+    perDeclination: stepAt(sighted, passing) / stepAt(path.declinations, passing),
   }
 }
 
 function stepAt(values: Float64Array, { index }: Passing): number {
   return values[index + 1]! - values[index]!
-}
-
-/** ∂δ/∂h at a constant azimuth, which is the cosine of the parallactic angle. */
-function declinationPerAltitude(
-  azimuthDeg: number,
-  altitudeDeg: number,
-  declination: number,
-  latitudeDeg: number,
-): number {
-  const h = altitudeDeg * DEG
-  const phi = latitudeDeg * DEG
-  const across = Math.cos(phi) * Math.sin(h) * Math.cos(azimuthDeg * DEG)
-  return (Math.sin(phi) * Math.cos(h) - across) / Math.cos(declination * DEG)
-}
-
-/** What becomes of a body changes only at declinations at which passings come or go: one between each two will do. */
-function reachOf(
-  turns: readonly number[],
-  crosses: (declination: number) => boolean,
-): SkylineCrossings['reach'] {
-  const stretches = turns.slice(1).flatMap((high, i) => {
-    const low = turns[i]!
-    return crosses((low + high) / 2) ? [{ low, high }] : []
-  })
-  if (stretches.length === 0) return null
-  return { lowDeg: stretches[0]!.low, highDeg: stretches.at(-1)!.high }
 }
 
 function check({

@@ -19,7 +19,7 @@ export interface Skyline {
 
 /** Altitudes between which skylines are: lower than any that is seen from a mountain, higher than any cliff. */
 export const LOWEST_SKYLINE_DEG = -5
-export const HIGHEST_SKYLINE_DEG = 80
+const HIGHEST_SKYLINE_DEG = 80
 
 /** So that an end of a skyline lies within its reach, however its azimuth was rounded. */
 const ROUNDING_DEG = 1e-9
@@ -56,8 +56,8 @@ export function skylineAltitude(
 ): { deg: number; sdDeg: number } | null {
   const start = nodes[0]!.azimuthDeg
   const azimuth = start + wrap360(azimuthDeg - start + ROUNDING_DEG) - ROUNDING_DEG
-  const next = nodes.findIndex((node) => node.azimuthDeg >= azimuth - ROUNDING_DEG)
-  if (next === -1) return null
+  const next = firstFrom(nodes, azimuth - ROUNDING_DEG)
+  if (next === nodes.length) return null
   const to = nodes[next]!
   const from = nodes[Math.max(0, next - 1)]!
   const share = next === 0 ? 1 : (azimuth - from.azimuthDeg) / (to.azimuthDeg - from.azimuthDeg)
@@ -65,6 +65,17 @@ export function skylineAltitude(
     deg: from.altitudeDeg + share * (to.altitudeDeg - from.altitudeDeg),
     sdDeg: from.sdDeg + share * (to.sdDeg - from.sdDeg),
   }
+}
+
+/** The index of the first node at an azimuth or after it, by bisection; their number where there is none. */
+function firstFrom(nodes: readonly SkylineNode[], azimuthDeg: number): number {
+  let [from, to] = [0, nodes.length]
+  while (from < to) {
+    const middle = (from + to) >> 1
+    if (nodes[middle]!.azimuthDeg >= azimuthDeg) to = middle
+    else from = middle + 1
+  }
+  return from
 }
 
 function checkNode({ azimuthDeg, altitudeDeg, sdDeg }: SkylineNode): void {

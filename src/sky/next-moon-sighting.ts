@@ -1,9 +1,9 @@
 import { crossingNear } from './altitude-crossing.ts'
 import { STANDSTILL_CYCLE_YEARS, type StandstillEvent } from './moon.ts'
 import { type NextSighting, type NoSighting, type SoughtSighting, sightingAt } from './next-sighting.ts'
-import { julianEpochOf, moonLitShare, seenBody, utDaysOf } from './present-sky.ts'
-import { isoMinute, type LocatedPlace, locatedPlace, type SkyPlace } from './sky-place.ts'
-import { type MonthlyExtreme, type StandstillSeason, standstillSeason } from './standstill-season.ts'
+import { julianEpochOf, moonLitShare, utDaysOf } from './present-sky.ts'
+import { type LocatedPlace, locatedPlace, type SkyPlace } from './sky-place.ts'
+import { type StandstillSeason, standstillSeason } from './standstill-season.ts'
 import { isSunUp } from './sun-up.ts'
 
 /** The Moon at a standstill where it is sighted. */
@@ -22,12 +22,8 @@ export interface MoonNote {
   litShare: number
   /** Whether the Sun is up at the sighting; null where the longitude is not known. */
   isSunUp: boolean | null
-  /** Topocentric, degrees. */
-  declinationDeg: number
-  /** The monthly extreme to which this is the nearest rising or setting. */
-  extreme: { utc: string; declinationDeg: number }
-  /** Calendar years of the first and the last month of the season, and its most extreme declination. */
-  season: { fromYear: number; toYear: number; mostExtremeDeclinationDeg: number }
+  /** Calendar years of the first and the last month of the season. */
+  season: { fromYear: number; toYear: number }
 }
 
 /** The first of all. */
@@ -76,7 +72,7 @@ function firstSightingIn(
     const crossing = crossingNear('moon', located, extreme.utDays, at, centreAltitudeDeg)
     if ('because' in crossing) because ??= crossing.because
     else if (crossing.utDays >= start) {
-      const sighting = moonSightingAt(place, located, season, extreme, crossing.utDays)
+      const sighting = moonSightingAt(place, located, season, crossing.utDays)
       first ??= sighting
       if (sighting.note.isSunUp === false) return { ...first, withSunDown: sighting }
     }
@@ -88,19 +84,14 @@ function moonSightingAt(
   place: SkyPlace,
   located: LocatedPlace,
   season: StandstillSeason,
-  extreme: MonthlyExtreme,
   utDays: number,
 ): NextSighting<MoonNote> {
-  const seen = seenBody('moon', located, utDays)
-  return sightingAt(place, utDays, seen, {
+  return sightingAt(place, utDays, {
     litShare: moonLitShare(utDays),
     isSunUp: place.longitudeDeg === null ? null : isSunUp(located, utDays),
-    declinationDeg: seen.declinationDeg,
-    extreme: { utc: isoMinute(extreme.utDays), declinationDeg: extreme.declinationDeg },
     season: {
       fromYear: Math.floor(julianEpochOf(season.extremes[0]!.utDays)),
       toYear: Math.floor(julianEpochOf(season.extremes.at(-1)!.utDays)),
-      mostExtremeDeclinationDeg: season.mostExtreme.declinationDeg,
     },
   })
 }

@@ -1,15 +1,12 @@
 import { isoDay, isoMinute, type SkyPlace } from './sky-place.ts'
 
 /** The next chance to see a target for oneself. */
-export interface NextSighting<Note> {
+export interface NextSighting<Note = null> {
   /** Calendar day, ISO 8601: by the place's mean time, or of UTC where its longitude is not known. */
   date: string
   /** Instant to the minute, ISO 8601; null where the longitude is not known. */
   utc: string | null
-  /** Where the body's centre is then, topocentric and without air, degrees; null together with `utc`. */
-  azimuthDeg: number | null
-  altitudeDeg: number | null
-  /** What else a person who goes to see it should know. */
+  /** What else a person who goes to see it should know; null where there is nothing. */
   note: Note
 }
 
@@ -30,14 +27,11 @@ export type SoughtSighting<Sighting> =
   | { sighting: Sighting; because: null }
   | { sighting: null; because: NoSighting }
 
-/** A sighting at an instant, told as exactly as the place is known. Azimuth in degrees of any turn. */
-export function sightingAt<Note>(
-  place: SkyPlace,
-  utDays: number,
-  seen: { azimuthDeg: number; altitudeDeg: number },
-  note: Note,
-): NextSighting<Note> {
-  const date = isoDay(utDays, place.longitudeDeg)
-  if (place.longitudeDeg === null) return { date, utc: null, azimuthDeg: null, altitudeDeg: null, note }
-  return { date, utc: isoMinute(utDays), azimuthDeg: seen.azimuthDeg, altitudeDeg: seen.altitudeDeg, note }
+/** A sighting at an instant, told as exactly as the place is known. */
+export function sightingAt<Note>({ longitudeDeg }: SkyPlace, utDays: number, note: Note): NextSighting<Note> {
+  return {
+    date: isoDay(utDays, longitudeDeg),
+    utc: longitudeDeg === null ? null : isoMinute(utDays),
+    note,
+  }
 }

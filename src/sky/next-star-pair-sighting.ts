@@ -1,4 +1,4 @@
-import { wrap180, wrap360 } from '../quantity/degrees.ts'
+import { wrap180 } from '../quantity/degrees.ts'
 import { momentsOneAboveOther, type OneAboveOther } from './above-one-another.ts'
 import { nextDarkMoment } from './next-dark-moment.ts'
 import { type NextSighting, type SoughtSighting, sightingAt } from './next-sighting.ts'
@@ -17,17 +17,12 @@ export interface StarPairSight {
 }
 
 export interface StarPairNote {
-  /** Altitude of the Sun's centre at the sighting, degrees: −12 or lower. */
-  sunAltitudeDeg: number
   /** Index of the star that is the upper one. */
   above: 0 | 1
-  /** True altitudes of both stars, in their order, degrees. */
-  altitudesDeg: readonly [number, number]
 }
 
 /**
- * The next instant in the dark at which two stars above the horizon have the same azimuth; the sighting's altitude is
- * that of the upper one.
+ * The next instant in the dark at which two stars above the horizon have the same azimuth.
  *
  * Throws a RangeError for an impossible place or date.
  */
@@ -40,17 +35,14 @@ export function nextStarPairSighting(
   const start = utDaysOf(now)
   const moments = momentsSighted(place, sight, julianEpochOf(start))
   if (moments.length === 0) return { sighting: null, because: 'never one above the other' }
-  const dark = moments.flatMap((moment) => {
-    const found = nextDarkMoment(located, moment.siderealDeg, start)
-    return found === null ? [] : [{ ...moment, ...found }]
+  const dark = moments.flatMap(({ siderealDeg, above }) => {
+    const utDays = nextDarkMoment(located, siderealDeg, start)
+    return utDays === null ? [] : [{ utDays, above }]
   })
   const [next] = dark.sort((a, b) => a.utDays - b.utDays)
   if (next === undefined) return { sighting: null, because: 'never on a dark night' }
-  const above = next.above === 'first' ? 0 : 1
-  const { altitudesDeg, sunAltitudeDeg } = next
-  const seen = { azimuthDeg: wrap360(next.azimuthDeg), altitudeDeg: altitudesDeg[above] }
-  const note = { sunAltitudeDeg, above, altitudesDeg } as const
-  return { sighting: sightingAt(place, next.utDays, seen, note), because: null }
+  const note = { above: next.above === 'first' ? 0 : 1 } as const
+  return { sighting: sightingAt(place, next.utDays, note), because: null }
 }
 
 /** The moments of a day that are meant: for each star that may be the upper one, at most one. */

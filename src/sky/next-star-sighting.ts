@@ -1,4 +1,4 @@
-import { DEG, wrap360 } from '../quantity/degrees.ts'
+import { DEG } from '../quantity/degrees.ts'
 import { horizontalPlace } from './horizontal-place.ts'
 import { nextDarkMoment } from './next-dark-moment.ts'
 import { type NextSighting, type NoSighting, type SoughtSighting, sightingAt } from './next-sighting.ts'
@@ -17,24 +17,13 @@ export type StarSight = { star: Star } & (
   | { at: 'upper culmination' | 'lower culmination' }
 )
 
-export interface StarNote {
-  /** Altitude of the Sun's centre at the sighting, degrees: −12 or lower. */
-  sunAltitudeDeg: number
-  /** Mean declination of the star in that year, degrees. */
-  declinationDeg: number
-}
-
 /**
  * The next night in the dark of which a star passes an altitude or the meridian, by sidereal time. Aberration and
  * nutation, 0.5′ together, are left out of the star's place.
  *
  * Throws a RangeError for an impossible place, altitude or date.
  */
-export function nextStarSighting(
-  place: SkyPlace,
-  sight: StarSight,
-  now: Date,
-): SoughtSighting<NextSighting<StarNote>> {
+export function nextStarSighting(place: SkyPlace, sight: StarSight, now: Date): SoughtSighting<NextSighting> {
   const located = locatedPlace(place, now)
   const start = utDaysOf(now)
   const star = starPlace(sight.star, julianEpochOf(start))
@@ -42,10 +31,7 @@ export function nextStarSighting(
   if (typeof sidereal === 'string') return { sighting: null, because: sidereal }
   const moment = nextDarkMoment(located, sidereal, start)
   if (moment === null) return { sighting: null, because: 'never on a dark night' }
-  const { azimuthDeg, altitudeDeg } = horizontalPlace(star, sidereal, place.latitudeDeg)
-  const seen = { azimuthDeg: wrap360(azimuthDeg), altitudeDeg }
-  const note = { sunAltitudeDeg: moment.sunAltitudeDeg, declinationDeg: star.decDeg }
-  return { sighting: sightingAt(place, moment.utDays, seen, note), because: null }
+  return { sighting: sightingAt(place, moment, null), because: null }
 }
 
 /** Local sidereal time of the sighting, degrees, or why there is none. */

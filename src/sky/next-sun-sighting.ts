@@ -1,7 +1,7 @@
 import { type Crossing, crossingNear, transitNear } from './altitude-crossing.ts'
 import { type NextSighting, type SoughtSighting, sightingAt } from './next-sighting.ts'
 import { julianEpochOf, seenBody, utDaysOf } from './present-sky.ts'
-import { isoDay, isoMinute, type LocatedPlace, locatedPlace, type SkyPlace } from './sky-place.ts'
+import { isoDay, type LocatedPlace, locatedPlace, type SkyPlace } from './sky-place.ts'
 import { type SolsticeEvent, solsticeDwellDays } from './sun.ts'
 import { type SunMoment, sunMoments } from './sun-moments.ts'
 import { tabulatedObliquityDeg } from './tabulated-obliquity.ts'
@@ -20,16 +20,12 @@ export type SunSight = { moment: SunMoment | { name: 'zenith passage' } } & (
 )
 
 export interface SunNote {
-  /** The instant meant, such as that of the solstice, to the minute; the sighting is the nearest one to it. */
-  momentUtc: string
-  /** Apparent declination of the Sun's centre at the sighting, topocentric, degrees. */
-  declinationDeg: number
   /** At a solstice: first and last day whose sighting finds the declination within 1′ of its extreme; else null. */
   steady: { from: string; to: string } | null
 }
 
 /** The Sun's declination may stray so far from its extreme for a day to do as well as that of the solstice. */
-export const STEADY_MARGIN_DEG = 1 / 60
+const STEADY_MARGIN_DEG = 1 / 60
 
 /**
  * The next sighting of the Sun on a day of the year: of all risings (settings, noons) the nearest to the instant meant,
@@ -51,7 +47,7 @@ export function nextSunSighting(
   const crossings = moments.map((moment) => ({ moment, ...sunCrossing(located, moment, sight) }))
   for (const crossing of crossings)
     if ('utDays' in crossing && crossing.utDays >= start)
-      return { sighting: sunSighting(place, located, sight, crossing), because: null }
+      return { sighting: sunSighting(place, sight, crossing), because: null }
   const without = crossings.find((crossing) => 'because' in crossing)
   return { sighting: null, because: without?.because ?? 'never at that declination' }
 }
@@ -72,16 +68,12 @@ function sunCrossing(place: LocatedPlace, moment: number, sight: SunSight): Cros
 
 function sunSighting(
   place: SkyPlace,
-  located: LocatedPlace,
   sight: SunSight,
   { moment, utDays }: { moment: number; utDays: number },
 ): NextSighting<SunNote> {
-  const seen = seenBody('sun', located, utDays)
   const { name } = sight.moment
   const isSolstice = name === 'june solstice' || name === 'december solstice'
-  return sightingAt(place, utDays, seen, {
-    momentUtc: isoMinute(moment),
-    declinationDeg: seen.declinationDeg,
+  return sightingAt(place, utDays, {
     steady: isSolstice ? steadyDays(place, name, moment, utDays) : null,
   })
 }

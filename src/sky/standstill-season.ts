@@ -19,9 +19,9 @@ export interface StandstillSeason {
 }
 
 /** Months within so much of the most extreme one are counted as the standstill: our choice. */
-export const STANDSTILL_MARGIN_ARCMIN = 15
+const STANDSTILL_MARGIN_ARCMIN = 15
 /** They are looked for so long before and after the node is in the equinox. */
-export const STANDSTILL_REACH_YEARS = 1.5
+const STANDSTILL_REACH_YEARS = 1.5
 
 const TROPICAL_MONTH_DAYS = 27.321_582
 

@@ -66,12 +66,16 @@ function atDeclination(declination: number, from: number): number[] {
     .sort(byTime)
 }
 
-/** By sin δ = sin ε sin λ with the obliquity of the day itself; the Sun's latitude, 1″, is left out. */
+/**
+ * By sin δ = sin ε sin λ with the obliquity of the day itself; the Sun's latitude, 1″, is left out. Where the obliquity
+ * has fallen short of that declination since it was asked about, by seconds of arc, the solstice is the nearest to it.
+ */
 function nextAtDeclination(declination: number, southward: boolean, start: number): number {
-  const turned = (northward: number) => (southward ? 180 - northward : northward)
-  const first = sunAtLongitude(turned(longitudeNorthward(declination, start) ?? 0), start)
-  const longitude = longitudeNorthward(declination, first)
-  return longitude === null ? first : sunAtLongitude(turned(longitude), start)
+  const atObliquityOf = (utDays: number) => {
+    const northward = longitudeNorthward(declination, utDays) ?? Math.sign(declination) * 90
+    return sunAtLongitude(southward ? 180 - northward : northward, start)
+  }
+  return atObliquityOf(atObliquityOf(start))
 }
 
 function longitudeNorthward(declination: number, utDays: number): number | null {

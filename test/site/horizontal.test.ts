@@ -2,7 +2,12 @@ import * as Astronomy from 'astronomy-engine'
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { DEG, wrap180 } from '../../src/quantity/degrees.ts'
-import { altitudeRangeDeg, declinationDeg, horizonCrossing } from '../../src/site/horizontal.ts'
+import {
+  altitudeRangeDeg,
+  declinationDeg,
+  declinationPerAltitude,
+  horizonCrossing,
+} from '../../src/site/horizontal.ts'
 import { expectWithin } from '../published/expect-within.ts'
 
 const within = (min: number, max: number) => fc.double({ min, max, noNaN: true })
@@ -144,3 +149,17 @@ describe('where a body never crosses an altitude', () => {
     )
   })
 })
+
+test.each([
+  [51.2, 70, 3],
+  [51.2, 250, 12],
+  [-35, 10, 40],
+  [4, 100, 0.5],
+])(
+  'at latitude %s°, azimuth %s°, altitude %s°, a little more altitude changes the declination so',
+  (latitude, azimuth, altitude) => {
+    const at = (turn: number) => declinationDeg(azimuth, altitude + turn, latitude)
+    const want = (at(1e-4) - at(-1e-4)) / 2e-4
+    expectWithin(declinationPerAltitude(at(0), altitude, latitude), want, 1e-7, 'degrees per degree')
+  },
+)

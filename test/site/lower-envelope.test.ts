@@ -55,3 +55,12 @@ test('has a crossing twice, once for each line', () => {
     { x: 2, y: 0, along: 5 },
   ])
 })
+
+test('has no points of a line where that lies above another', () => {
+  const level = [
+    { x: 0, y: 0, along: 0 },
+    { x: 10, y: 0, along: 10 },
+  ]
+  const above = Array.from({ length: 9 }, (_, i) => ({ x: i + 1, y: 1 + (i % 2), along: i }))
+  expect(lowerEnvelope([level, above])).toEqual(level)
+})

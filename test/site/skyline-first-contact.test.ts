@@ -55,6 +55,19 @@ const CASES = [
   { name: 'through north', start: 350, step: 0.7, roughness: 0.4, latitude: 62, at: 'rising', above: 16 },
 ] as const
 
+/** The last declination to one side of another that crosses within the profile, less than a step off. */
+function endOf(crossing: (declination: number) => SkylineCrossing, from: number, side: 1 | -1): number {
+  let [inside, outside] = [from, from + side * 0.01]
+  while (Math.abs(outside - inside) > 1e-9) {
+    const middle = (inside + outside) / 2
+    if (crossing(middle).kind === 'crossing') inside = middle
+    else outside = middle
+  }
+  return inside
+}
+
+const DECLINATIONS = Array.from({ length: 18_001 }, (_, i) => i / 100 - 90)
+
 describe('skylineCrossings finds what following the body through the sky finds', () => {
   test.each(CASES)('$name', ({ start, step, roughness, latitude, at, above }) => {
     const { uniform } = seededRandom(77)
@@ -62,8 +75,10 @@ describe('skylineCrossings finds what following the body through the sky finds',
     for (let seed = 1; seed <= 2; seed++) {
       const skyline = jagged(seed, start, step, roughness)
       const sighting = { latitudeDeg: latitude, at, aboveCentreArcmin: above, parallaxArcsec: 0 }
-      const { crossing, reach } = skylineCrossings(skyline, sighting)
-      const [low, high] = [reach!.lowDeg - 0.5, reach!.highDeg + 0.5]
+      const { crossing } = skylineCrossings(skyline, sighting)
+      const within = DECLINATIONS.filter((declination) => crossing(declination).kind === 'crossing')
+      const low = endOf(crossing, within[0]!, -1) - 0.5
+      const high = endOf(crossing, within.at(-1)!, 1) + 0.5
       let before: number | null = null
       for (let i = 0; i < 14; i++) {
         const declination = low + ((i + uniform()) / 14) * (high - low)

@@ -1,6 +1,5 @@
 import { describe, expect, test } from 'vitest'
 import { skylineAltitude, skylineOf } from '../../src/site/skyline.ts'
-import { skylineStretch } from '../../src/site/skyline-stretch.ts'
 import { expectWithin } from '../published/expect-within.ts'
 
 const nodes = (...rows: [number, number, number?][]) =>
@@ -78,34 +77,5 @@ describe('skylineOf', () => {
   ])('refuses %s', (_, given, message) => {
     expect(() => skylineOf(given)).toThrow(RangeError)
     expect(() => skylineOf(given)).toThrow(message)
-  })
-})
-
-describe('skylineStretch', () => {
-  test.each([
-    ['inside', east, 61, 71],
-    ['beyond its end', east, 65, 100],
-    ['from before its beginning', east, 300, 65],
-    ['through north', north, 355, 5],
-    ['across the seam of a closed one', round, 20, 200],
-    ['elsewhere on a closed one', round, 200, 300],
-  ])('%s has the same altitudes', (_, skyline, from, to) => {
-    const stretch = skylineStretch(skyline, from, to)
-    let known = 0
-    for (let azimuth = 0; azimuth < 360; azimuth += 0.5) {
-      const isAsked = (azimuth - from + 360) % 360 <= (to - from + 360) % 360
-      const whole = skylineAltitude(skyline, azimuth)
-      const part = skylineAltitude(stretch, azimuth)
-      if (!isAsked || whole === null) expect(part, `${azimuth}°`).toBeNull()
-      else {
-        known++
-        expectWithin(part!.deg, whole.deg, 1e-9, 'degrees', azimuth)
-      }
-    }
-    expect(known).toBeGreaterThan(10)
-  })
-
-  test('says where there is nothing', () => {
-    expect(() => skylineStretch(east, 80, 100)).toThrow('nothing between 80° and 100°')
   })
 })

@@ -45,12 +45,8 @@ describe.each(PAIRS)('the next sighting of %s and %s one above the other', (...n
     const upper = first.altitude > second.altitude ? 0 : 1
     expect(sighting!.note.above).toBe(upper)
     if (above !== null) expect(upper).toBe(above)
-    const azimuthOff = ((sky.stars[upper]!.azimuth - sighting!.azimuthDeg! + 540) % 360) - 180
-    expectWithin(azimuthOff, 0, (8.5 * across) / 60, 'degrees')
-    expectWithin(sky.stars[upper]!.altitude, sighting!.altitudeDeg!, 8.5 / 60, 'degrees')
-    expectWithin(sighting!.altitudeDeg!, Math.max(...sighting!.note.altitudesDeg), 0, 'degrees')
     expect(sky.sun.altitude).toBeLessThan(-12 + 8 / 60)
-    expect(Math.min(...sighting!.note.altitudesDeg)).toBeGreaterThan(0)
+    expect(Math.min(first.altitude, second.altitude)).toBeGreaterThan(-8.5 / 60)
   })
 
   test('with either above is the earlier of the two', () => {
@@ -85,5 +81,5 @@ describe('two stars that have no such sighting', () => {
 test('without a longitude tells the night alone', () => {
   const sight = { stars: pairOf(['Kochab', 'Mizar']), above: null, nearAzimuthDeg: 0 }
   const { sighting } = nextStarPairSighting({ ...PLACE, longitudeDeg: null }, sight, NOW)
-  expect(sighting).toMatchObject({ utc: null, azimuthDeg: null, altitudeDeg: null })
+  expect(sighting).toMatchObject({ utc: null, note: { above: expect.any(Number) } })
 })

@@ -1,6 +1,6 @@
 import * as Astronomy from 'astronomy-engine'
 import { describe, expect, test } from 'vitest'
-import { utDaysOf } from '../../src/sky/present-sky.ts'
+import { trueObliquityDeg, utDaysOf } from '../../src/sky/present-sky.ts'
 import { type SunMoment, sunMoments } from '../../src/sky/sun-moments.ts'
 import { expectWithin } from '../published/expect-within.ts'
 import { readTextTable } from '../published/read-text-table.ts'
@@ -65,6 +65,18 @@ describe('the moments of the Sun', () => {
     for (const moment of got) expectWithin(declinationDeg(moment) * 3600, declination * 3600, 2, 'arcsec')
     const [first, second] = got.map((moment) => declinationDeg(moment + 1) - declinationDeg(moment))
     expect(Math.sign(first!)).toBe(-Math.sign(second!))
+  })
+
+  // The obliquity itself: nutation changes that by 3″ a year at most, and it falls by 0.5″ a year besides.
+  test.each([1, -1])('at the very end of its way, %s, the Sun has it about the solstice', (side) => {
+    for (let year = 0; year < 19; year++) {
+      const from = NOW + year * 365.25
+      const declination = side * (trueObliquityDeg(from) - 1e-6)
+      for (const moment of sunMoments({ name: 'declination', declinationDeg: declination }, from)) {
+        expect(moment).toBeGreaterThanOrEqual(from)
+        expectWithin(declinationDeg(moment) * 3600, declination * 3600, 2 + 2 * 3.5, 'arcsec', year)
+      }
+    }
   })
 
   test('there are none at a declination beyond the obliquity', () => {
