@@ -171,7 +171,7 @@ describe('what must not be missing from any report', () => {
       'not about the person who made it',
       'A build tolerance is not a measurement error',
       'Never look at the Sun',
-      'To have it over the foresight, the eye has to be 1.9 m to the left of the backsight',
+      'The place from which it stands over the foresight is 1.9 m ± 30 cm to the left of the backsight',
       'beside it `skyline.csv`, SHA-256 `1111111111111111111111111111111111111111111111111111111111111111`',
       'Ask for permission before entering a site.',
       'for licensed people',

@@ -242,6 +242,7 @@ const CHANCE: Pick<Today, 'next' | 'next_reason'> = {
     days: ['2027-06-20', '2027-06-23'],
     direction_deg: 59,
     stand_right_m: -1.9,
+    stand_sd_m: 0.3,
     notes: ['Take a coat.'],
   },
   next_reason: null,

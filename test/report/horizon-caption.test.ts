@@ -27,6 +27,10 @@ describe('the caption of a horizon', () => {
     ['north', 'The crosses are the rising of Sirius, seen from 2°24′ up: thick red'],
     ['crowded', 'grey at the independent dates'],
     ['far', 'An arrow points to what lies beyond the picture.'],
+    [
+      'sea',
+      'held plausible (an arrow head where they reach beyond the picture), the whisker at its foot one standard',
+    ],
     ['nowhere', 'There is no June solstice sunrise at that altitude in 9700 to 9500 BCE (asserted date).'],
   ])('says what is so of the case `%s`', (name, words) => {
     expect(caption(name)).toContain(words)
@@ -39,6 +43,8 @@ describe('the caption of a horizon', () => {
     ['sea', 'the line and the skyline'],
     ['crowded', 'a bar on a stem'],
     ['level', 'arrow'],
+    ['level', 'whisker'],
+    ['sea', 'the grey about'],
     ['level', 'There is no'],
     ['nowhere', 'asserted date, grey'],
     // Nothing is drawn but the line and the skyline.

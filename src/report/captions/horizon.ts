@@ -4,6 +4,7 @@ import { formatDegrees } from '../../quantity/format-angle.ts'
 import { listed } from '../../quantity/listed.ts'
 import { hasSkylineBand } from '../figures/horizon-ground.ts'
 import { type HorizonPlot, layHorizon } from '../figures/horizon-layout.ts'
+import { isBracketCut, isWideError } from '../figures/horizon-line.ts'
 import { type HorizonMark, type HorizonSource, horizonSource } from '../figures/horizon-source.ts'
 import { phrasing, strong } from '../nodes.ts'
 import { noEvent } from '../wording/no-event.ts'
@@ -59,12 +60,15 @@ function isStar({ body }: SightlineAudit): boolean {
 /** The line, its errors and its tolerances. */
 function marks(source: HorizonSource, plot: HorizonPlot): string {
   const { skyline, line } = source
+  const isWide = isWideError(source, plot)
   const grey = [
-    ...(line.sd > 0 ? ['the line'] : []),
+    ...(line.sd > 0 && !isWide ? ['the line'] : []),
     ...(hasSkylineBand(source, plot) ? ['the skyline'] : []),
   ]
   return [
     'The upright is the line as measured, the bracket under it the build tolerances held plausible',
+    ...(isBracketCut(source, plot) ? [' (an arrow head where they reach beyond the picture)'] : []),
+    ...(isWide ? [', the whisker at its foot one standard deviation of the line'] : []),
     ...(grey.length > 0 ? [`, the grey about ${listed(grey)} one standard deviation`] : []),
     ...(plot.spreads.length > 0 ? [', a bar on a stem the directions over the whole of that date'] : []),
     ...(skyline.nodes.length === 1 ? ['; the skyline is drawn level'] : []),

@@ -6,7 +6,7 @@ import { horizonAxes } from './horizon-axes.ts'
 import { discs, spreads, stems } from './horizon-discs.ts'
 import { skylineBand, skylineShapes } from './horizon-ground.ts'
 import { HORIZON_ROWS, HORIZON_WIDTH, layHorizon, NOTE_HEIGHT } from './horizon-layout.ts'
-import { lineBand, lineMark, lineTexts, toleranceBracket } from './horizon-line.ts'
+import { lineError, lineMark, lineTexts, toleranceBracket } from './horizon-line.ts'
 import { skylineNames } from './horizon-names.ts'
 import { type HorizonSource, horizonSource } from './horizon-source.ts'
 import { PALETTE } from './palette.ts'
@@ -22,7 +22,7 @@ export function horizonFigure(audit: Audit, sightline: string): FigureDrawing {
   const source = horizonSource(audit, sightline)
   const { plot, flags } = layHorizon(source)
   const shapes = [
-    ...lineBand(source, plot),
+    ...lineError(source, plot),
     ...skylineBand(source, plot),
     ...lineMark(source, plot),
     ...stems(flags.labels, plot),

@@ -2,24 +2,20 @@ import type { Element } from 'hast'
 import type { Skyline } from '../../audit/audit.ts'
 import { measuredDegrees } from '../wording/measured-angle.ts'
 import { type Box, sharedArea } from './box.ts'
-import { type Point, skylinePoints } from './horizon-ground.ts'
+import type { Point } from './horizon-ground.ts'
 import type { HorizonLabel } from './horizon-labels.ts'
 import type { HorizonPlot } from './horizon-layout.ts'
+import { CLEAR, HEIGHT, markOf, spotsAlong, spotsNear } from './horizon-name-spots.ts'
 import { horizonObstacles } from './horizon-obstacles.ts'
 import { skylineEnds } from './horizon-skyline.ts'
 import type { HorizonSource } from './horizon-source.ts'
 import { PALETTE } from './palette.ts'
 import { costOf, type Obstacle } from './place-around.ts'
-import { TEXT_SIZE, text } from './shape.ts'
+import { line, shape, TEXT_SIZE, text } from './shape.ts'
 import { textWidth } from './text-width.ts'
 
-const HEIGHT = 8
-/** From the skyline to its name. */
-const CLEAR = 3
 /** A name that would cover more of a disc than this is left out, square points. */
 const COVERED = 12
-/** Where along the plot a name may stand, as shares of the room, the best first. */
-const PLACES = [1, 0, 0.9, 0.1, 0.75, 0.25, 0.6, 0.4]
 
 const NAMES: Partial<Record<Skyline['from'], string>> = {
   sea: 'sea horizon',
@@ -33,21 +29,58 @@ export function skylineNames(
   labels: readonly HorizonLabel[],
 ): Element[] {
   const taken = horizonObstacles(source, plot, labels)
-  const named = namesOf(source).flatMap((content) => {
-    const box = freest(spotsAlong(content, source, plot), taken)
-    return box === null || costOf(box, taken) > COVERED ? [] : [{ content, box }]
-  })
-  // The short name where there is no free place for the long one; none where there is none for either.
-  const names = named.slice(0, 1)
-  return [...names, ...endNames(source, plot, taken, names[0]?.box)].map(({ content, box }) =>
-    text(box.left, box.bottom - 2, content, { fill: PALETTE.muted }),
-  )
+  const name = nameOf(source, plot, taken)
+  const ends = endNames(source, plot, taken, name?.box)
+  return [...(name === null ? [] : nameShapes(name, markOf(source, plot))), ...ends.map(nameText)]
 }
 
-function namesOf({ skyline: { from, at_line_deg } }: HorizonSource): string[] {
-  const altitude = `${measuredDegrees(at_line_deg)}${from === 'profile' ? ' at the line' : ''}`
-  const name = NAMES[from] ?? 'skyline'
-  return [`${name}, ${altitude}`, name]
+function nameText({ content, box }: Pick<Name, 'content' | 'box'>): Element {
+  return text(box.left, box.bottom - 2, content, { fill: PALETTE.muted })
+}
+
+/** Set from the side that faces its leader, since estimated widths err on the wide side. */
+function nameShapes(name: Name, mark: Point): Element[] {
+  const { content, box, hasLeader } = name
+  if (!hasLeader) return [nameText(name)]
+  const isLeft = box.right < mark[0]
+  const at = isLeft ? box.right : box.left
+  return [
+    ...leader(box, mark),
+    text(at, box.bottom - 2, content, { anchor: isLeft ? 'end' : 'start', fill: PALETTE.muted }),
+  ]
+}
+
+interface Name {
+  content: string
+  box: Box
+  hasLeader: boolean
+}
+
+/**
+ * The name with the altitude, in a profile near the line or with a leader to it; the short name where there is no free
+ * place for that; null where there is none for either.
+ */
+function nameOf(source: HorizonSource, plot: HorizonPlot, taken: readonly Obstacle[]): Name | null {
+  const { from, at_line_deg } = source.skyline
+  const [short, altitude] = [NAMES[from] ?? 'skyline', measuredDegrees(at_line_deg)]
+  const named = (content: string, spots: readonly Box[], hasLeader = false) => {
+    const box = freest(spots, taken)
+    return box === null || costOf(box, taken) > COVERED ? null : { content, box, hasLeader }
+  }
+  const along = (content: string) => spotsAlong(content, source, plot)
+  const plain = () => named(short, along(short))
+  if (from !== 'profile') return named(`${short}, ${altitude}`, along(`${short}, ${altitude}`)) ?? plain()
+  const [near, far] = [`${short}, ${altitude} at the line`, `${short}; ${altitude} at the line`]
+  return named(near, spotsNear(near, source, plot)) ?? named(far, along(far), true) ?? plain()
+}
+
+/** From a name far off to what it speaks of. */
+function leader({ left, right, top, bottom }: Box, [x, y]: Point): Element[] {
+  const from = [x < left ? left - 1 : right + 1, (top + bottom) / 2] as const
+  return [
+    line(from, [x, y], { stroke: PALETTE.muted, strokeWidth: 0.4 }),
+    shape('rect', { x: x - 1.2, y: y - 1.2, width: 2.4, height: 2.4, fill: PALETTE.muted }),
+  ]
 }
 
 /** In the void beyond an end where there is room, else on this side of it. */
@@ -75,38 +108,6 @@ function endNames(
     if (spot === null) return []
     placed.push(spot)
     return [{ content, box: spot }]
-  })
-}
-
-/** Places right over and right under the skyline that lie in the plot. */
-function spotsAlong(content: string, source: HorizonSource, plot: HorizonPlot): Box[] {
-  const width = textWidth(content, TEXT_SIZE)
-  const { left, right, top, bottom } = plot.box
-  const parts = skylinePoints(source, plot)
-  return PLACES.flatMap((share) => {
-    const start = left + 3 + share * (right - left - width - 6)
-    const side = { left: start, right: start + width }
-    const part = parts.find((each) => each[0]![0] <= side.left && each.at(-1)![0] >= side.right)
-    if (part === undefined) return []
-    const heights = heightsBetween(part, side.left, side.right)
-    const over = Math.min(...heights) - CLEAR
-    const under = Math.max(...heights) + CLEAR
-    return [
-      { ...side, top: over - HEIGHT, bottom: over },
-      { ...side, top: under, bottom: under + HEIGHT },
-    ].filter((box) => box.top >= top && box.bottom <= bottom)
-  })
-}
-
-/** Heights of a line of points between two positions, those at the two included. */
-function heightsBetween(points: readonly Point[], from: number, to: number): number[] {
-  return points.flatMap(([x, y], index) => {
-    const before = points[index - 1]
-    const own = x >= from && x <= to ? [y] : []
-    if (before === undefined || before[0] >= x) return own
-    const cut = (at: number) =>
-      at > before[0] && at < x ? [before[1] + ((y - before[1]) * (at - before[0])) / (x - before[0])] : []
-    return [...cut(from), ...cut(to), ...own]
   })
 }
 

@@ -1,6 +1,7 @@
 import { ARROW_ROW } from './horizon-discs.ts'
 import type { HorizonLabel } from './horizon-labels.ts'
 import { type HorizonPlot, SPREAD_ROW } from './horizon-layout.ts'
+import { isWideError, whiskerY } from './horizon-line.ts'
 import { skylineEnds } from './horizon-skyline.ts'
 import type { HorizonSource } from './horizon-source.ts'
 import type { Obstacle } from './place-around.ts'
@@ -8,18 +9,23 @@ import type { Obstacle } from './place-around.ts'
 /** How far the arrows of what lies beyond reach into the plot. */
 const ARROW_REACH = 30
 
-/** What the names in the plot had better not cover: the line, discs, stems, spreads, arrows, a profile's ends. */
+/** What the names in the plot had better not cover: the line and its error, discs, stems, spreads, arrows, a profile's ends. */
 export function horizonObstacles(
-  { line, skyline }: HorizonSource,
-  { box, azimuths, x, y, perDegree, inside, outside, spreads }: HorizonPlot,
+  source: HorizonSource,
+  plot: HorizonPlot,
   labels: readonly HorizonLabel[],
 ): Obstacle[] {
+  const { line, skyline } = source
+  const { box, azimuths, x, y, perDegree, inside, outside, spreads } = plot
   const about = (left: number, right: number, top: number, bottom: number): Obstacle => ({
     ...{ left, right, top, bottom },
     weight: 1,
   })
   return [
     about(x(line.value) - 2, x(line.value) + 2, box.top, box.bottom),
+    ...(isWideError(source, plot)
+      ? [about(x(line.value - line.sd), x(line.value + line.sd), whiskerY(plot) - 2, whiskerY(plot) + 2)]
+      : []),
     ...inside.map(({ azimuthDeg, altitudeDeg, radiusDeg }) => {
       const [middle, height] = [x(azimuthDeg), y(altitudeDeg)]
       const reach = (radiusDeg ?? 0) * perDegree + 4

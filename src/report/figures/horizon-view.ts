@@ -15,7 +15,7 @@ export interface HorizonView {
 }
 
 /** The Sun's width for the limits of the scale, degrees; what is drawn has its own. */
-const SUN = 0.533
+export const SUN = 0.533
 /** Points to a degree where the Sun is so many points wide. */
 const LARGEST = 72 / SUN
 /** No smaller for the sake of the plausible tolerances, of errors. */

@@ -6,6 +6,7 @@ import { listed, listedShort } from '../../quantity/listed.ts'
 import { measuredDegrees } from '../wording/measured-angle.ts'
 import { noEvent } from '../wording/no-event.ts'
 import type { PlanLayout } from './plan-layout.ts'
+import { isNorthTold } from './plan-north.ts'
 import { offsetLines } from './plan-offset.ts'
 import type { PlanSource } from './plan-source.ts'
 
@@ -13,19 +14,21 @@ import type { PlanSource } from './plan-source.ts'
 export function planAlt(audit: Audit, { views, scene, factor }: PlanLayout): string {
   return [
     ...(scene === null ? [] : [survey(audit)]),
-    `${scene === null ? 'The' : 'Beside it the'} view along ${views.length > 1 ? 'each line' : 'the line'}, drawn ${factor} times as wide, with wedges of ${tolerances(audit)}.`,
+    `${scene === null ? 'The' : 'Beside it the'} surroundings of ${views.length > 1 ? 'each line' : 'the line'}, stretched ${factor} times across, with wedges of ${tolerances(audit)}.`,
     ...views.flatMap(({ source }) => [lineSentence(audit, source), targetSentence(source)]),
   ].join(' ')
 }
 
-function survey({ plan: { points, north } }: Audit): string {
+function survey(audit: Audit): string {
+  const { points, north } = audit.plan
   const names = listedShort(
     points.map(({ name }) => name),
     8,
   )
   const error = north === null || north.sd_deg === 0 ? '' : ` within ${formatArcmin(north.sd_deg * 60)}`
+  const up = isNorthTold(audit) ? 'true north up' : 'north up as the plan has it'
   const shown = points.length === 0 ? 'The directions' : 'The survey'
-  return `${shown} from above, true north up${error}${names === '' ? '' : `: ${names}`}.`
+  return `${shown} from above, ${up}${error}${names === '' ? '' : `: ${names}`}.`
 }
 
 function tolerances({ plausible: { low_arcmin, high_arcmin } }: Audit): string {

@@ -71,10 +71,15 @@ function sightOf(
     : [line(eye, [scale.x(right * 60), bottom], stroke)]
 }
 
-/** One standard deviation of the line as measured, where it shows. */
+/** Whether one standard deviation of the line as measured is wide enough to be drawn. */
+export function hasWhisker({ measured }: Pick<PlanSource, 'measured'>, scale: AcrossScale): boolean {
+  return measured.sd * 60 * scale.pointsPerArcmin >= 2
+}
+
+/** That standard deviation, where it shows. */
 function measuredError({ measured }: PlanSource, scale: AcrossScale, y: number): Element[] {
   const arcmin = measured.sd * 60
-  if (arcmin * scale.pointsPerArcmin < 2) return []
+  if (!hasWhisker({ measured }, scale)) return []
   const ends = [-1, 1].map((side) => side * arcmin)
   const xs = ends.map((end) => Math.max(scale.left, Math.min(scale.right, scale.x(end)))) as [number, number]
   return [

@@ -22,7 +22,7 @@ import { fitText, textWidth } from './text-width.ts'
 const DESCENT = 2
 
 /**
- * The survey from above, true north up and to scale; beside it the view along each line, drawn many times as wide as
+ * The survey from above, north up and to scale; beside it the surroundings of each line, drawn many times as wide as
  * it is deep, with the tolerances held plausible as a wedge and where the target stood at each date. Points; 440 wide,
  * about 280 high for up to three lines. Null where no line has a place on a plan.
  */
@@ -34,7 +34,12 @@ export function planFigure(audit: Audit): FigureDrawing | null {
     ...(scene === null ? [] : mapShapes(audit, scene, layout)),
     ...views.flatMap((view) => viewShapes(view, layout)),
     ...viewsHead(layout),
-    ...planFoot(audit, layout.scale, layout.foot),
+    ...planFoot(
+      audit,
+      views.map(({ source }) => source),
+      layout.scale,
+      layout.foot,
+    ),
     ...(layout.planBottom < height ? [footHead(layout)] : []),
   ]
   return svgRoot(
@@ -82,7 +87,11 @@ function head({ sightline, measured }: PlanSource, left: number, right: number, 
 }
 
 /** Over the scales of the views, where they stand under the plan. */
-function footHead({ foot: [left, top] }: PlanLayout): Element {
+function footHead({
+  foot: {
+    at: [left, top],
+  },
+}: PlanLayout): Element {
   return text(left, top - 1, 'along each line', { fill: PALETTE.muted })
 }
 

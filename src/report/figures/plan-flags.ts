@@ -74,10 +74,14 @@ function flagOf(
   return [{ mark, lines, width, x: x(Math.max(shown[0], Math.min(shown[1], right * 60))) }]
 }
 
+/** Where room is scarce, the length gives way to the name. */
 function shortLine(source: PlanSource, { placement, weight }: PlanMark, widest: number): string {
-  const offset = shortOffset(source, placement)
-  const room = widest - textWidth(` ${offset}`, TEXT_SIZE, weight)
-  return `${fitText(nameOf(placement), room, TEXT_SIZE, weight)} ${offset}`
+  const parts = shortOffset(source, placement)
+  const [angle, name] = [parts[0] ?? '', nameOf(placement)]
+  const whole = `${name} ${parts.join(', ')}`
+  if (textWidth(whole, TEXT_SIZE, weight) <= widest) return whole
+  const room = widest - textWidth(` ${angle}`, TEXT_SIZE, weight)
+  return `${fitText(name, room, TEXT_SIZE, weight)} ${angle}`
 }
 
 /** Name and date in one line or in two, the offset likewise. */

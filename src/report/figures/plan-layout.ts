@@ -2,8 +2,7 @@ import type { Audit } from '../../audit/audit.ts'
 import { DEG } from '../../quantity/degrees.ts'
 import { type AcrossScale, acrossScale } from './plan-across.ts'
 import { dateLines } from './plan-dates.ts'
-import { FOOT_HEIGHT } from './plan-foot.ts'
-import type { Spot } from './plan-rim.ts'
+import { FOOT_HEIGHT, type FootPlace } from './plan-foot.ts'
 import { type PlanScene, planScene } from './plan-scene.ts'
 import { type PlanSource, planSources } from './plan-source.ts'
 import { type PlanView, stackViews } from './plan-views.ts'
@@ -22,7 +21,7 @@ export interface PlanLayout {
   /** The dates, where the flags have no room for them. */
   dates: readonly string[]
   /** Where the scales of the views begin: under the last view, or under the plan where the views take more height. */
-  foot: Spot
+  foot: FootPlace
   /** Where the plan ends below. */
   planBottom: number
 }
@@ -69,13 +68,14 @@ type Bottoms = Pick<PlanLayout, 'height' | 'foot' | 'planBottom'>
 
 function footUnderViews(viewsBottom: number, left: number): Bottoms {
   const height = Math.ceil(Math.max(LEAST_HEIGHT, viewsBottom + FOOT_HEIGHT))
-  return { height, foot: [left, viewsBottom], planBottom: height }
+  return { height, foot: { at: [left, viewsBottom], right: RIGHT }, planBottom: height }
 }
 
 /** Two lines above it part it from the plan. */
 function footUnderPlan(viewsBottom: number): Bottoms {
   const height = Math.ceil(Math.max(LEAST_HEIGHT + FOOT_HEIGHT, viewsBottom))
-  return { height, foot: [2, height - FOOT_HEIGHT], planBottom: height - FOOT_HEIGHT - 2 * LINE }
+  const top = height - FOOT_HEIGHT
+  return { height, foot: { at: [2, top], right: PLAN_PANE }, planBottom: top - 2 * LINE }
 }
 
 function sceneOf(audit: Audit, sources: readonly PlanSource[], height: number): PlanScene | null {

@@ -18,12 +18,13 @@ export function offsetLines(source: PlanSource, placement: Placement): string[] 
   return [`${formatArcmin(Math.abs(offset))}${error} ${side}`, ...lengthOf(placement)]
 }
 
-/** The same in short, without the error and the side: `36′, 1.1 m`. */
-export function shortOffset(source: PlanSource, placement: Placement): string {
+/** The same in short, without the error: `36′ right` and `1.1 m`. */
+export function shortOffset(source: PlanSource, placement: Placement): string[] {
   const { offset_arcmin: offset } = placement
-  if (offset === null) return ''
-  if (sideOf(source, placement) === null) return 'on the line'
-  return [formatArcmin(Math.abs(offset)), ...lengthOf(placement)].join(', ')
+  if (offset === null) return []
+  const side = sideOf(source, placement)
+  if (side === null) return ['on the line']
+  return [`${formatArcmin(Math.abs(offset))} ${side}`, ...lengthOf(placement)]
 }
 
 /** What an angle spans at a distance as the crow flies, centimetres. */

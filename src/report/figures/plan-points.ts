@@ -22,6 +22,11 @@ function uncertainty({ point, at }: ScenePoint, { scale, rim }: PlanScene): Elem
   return [shape('circle', { cx: at[0], cy: at[1], r: radius, fill: 'none', ...stroke })]
 }
 
+/** Whether a point is drawn as a hollow dot: a gap too narrow to be drawn to scale. */
+export function isHollow({ point: { form, width_m } }: ScenePoint, { scale }: PlanScene): boolean {
+  return form === 'gap' && (width_m ?? 0) * (scale ?? 0) < VISIBLE
+}
+
 function pointMark(point: ScenePoint, scene: PlanScene): Element[] {
   const { at } = point
   const { width_m, form } = point.point
@@ -29,7 +34,7 @@ function pointMark(point: ScenePoint, scene: PlanScene): Element[] {
   const across = (lineThrough(point, scene) ?? 0) + 90
   const dot = { cx: at[0], cy: at[1], r: DOT, stroke: PALETTE.ink, strokeWidth: 0.9 }
   if (form === null || width < VISIBLE) {
-    return [shape('circle', { ...dot, fill: form === 'gap' ? PALETTE.paper : PALETTE.ink })]
+    return [shape('circle', { ...dot, fill: isHollow(point, scene) ? PALETTE.paper : PALETTE.ink })]
   }
   const [left, right] = [along(at, across, -width / 2), along(at, across, width / 2)]
   if (form === 'post') return [line(left, right, { stroke: PALETTE.ink, strokeWidth: 3 })]

@@ -28,7 +28,7 @@ function setsSentence(audit: Audit): string {
     .map((step) => `${tolerance(step)} ${setsInWords(step, audit)}`)
   const lead =
     audit.outcome === 'none'
-      ? 'No date in reach fits the line; the 95 % sets hold the dates that weigh most among misses'
+      ? `No date in reach fits ${audit.sightlines.length === 1 ? 'the line' : 'the lines together'}; the 95 % sets hold the dates that weigh most among misses`
       : 'The 95 % set holds'
   return parts.length === 0 ? 'No sets were found.' : `${lead}: ${parts.join('; ')}.`
 }

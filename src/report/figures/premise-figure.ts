@@ -44,7 +44,7 @@ export function premiseFigure(audit: Audit): FigureDrawing {
     ...exactFrame(audit, scales, plot),
     ...toleranceAxes(audit, scales, plot),
     ...marginLabels(placed, marginOf(scales, plot)),
-    ...(note > 0 ? [noteOfNone(scales)] : []),
+    ...(note > 0 ? [noteOfNone(audit, scales)] : []),
   ]
   return svgRoot({ width: scales.width, height: Math.ceil(height) }, title(audit), premiseAlt(audit), shapes)
 }
@@ -58,7 +58,8 @@ function marginOf(scales: PremiseScales, plot: PremisePlot) {
   return { edge: scales.right, left, right, top: plot.box.top, bottom: plot.box.bottom }
 }
 
-function noteOfNone(scales: PremiseScales) {
-  const content = 'No date in reach fits this line: the sets only weigh misses against each other.'
+function noteOfNone({ sightlines }: Audit, scales: PremiseScales) {
+  const which = sightlines.length === 1 ? 'this line' : 'these lines together'
+  const content = `No date in reach fits ${which}: the sets only weigh misses against each other.`
   return text(scales.left, NOTE - 3, content, { weight: 600, fill: PALETTE.ink })
 }

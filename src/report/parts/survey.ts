@@ -10,8 +10,8 @@ export function surveyPart(audit: Audit): BlockContent[] {
   return [
     ...northOf(audit),
     ...audit.sightlines.flatMap((line) => {
-      const sentences = [...line.survey, ...horizon(line), ...refraction(line)]
-      return sentences.length === 0 ? [] : [paragraph(strong(`${line.name}.`), ` ${sentences.join(' ')}`)]
+      const sentences = [...line.survey, measured(line), ...horizons(line), ...refraction(line)]
+      return [paragraph(strong(`${line.name}.`), ` ${sentences.join(' ')}`)]
     }),
   ]
 }
@@ -24,7 +24,21 @@ function northOf({ plan }: Audit): BlockContent[] {
   return [paragraph(`North of the plan: ${words}${error}.${shared}`)]
 }
 
-function horizon({ skyline }: SightlineAudit): string[] {
+function measured({ azimuth_deg, angle_deg, altitude_deg, measures }: SightlineAudit): string {
+  if (angle_deg !== null) {
+    return `Angle between its two lines: ${measuredDegrees(angle_deg)}; no north has a part in it.`
+  }
+  if (measures === 'altitude' && altitude_deg !== null) return `Altitude: ${measuredDegrees(altitude_deg)}.`
+  return azimuth_deg === null ? '' : `Azimuth: ${measuredDegrees(azimuth_deg)}.`
+}
+
+function horizons({ skyline, solstices }: SightlineAudit): string[] {
+  if (solstices !== null) {
+    return solstices.map(
+      ({ solstice, horizon, altitude_deg }) =>
+        `${solstice} horizon: ${horizon}; ${measuredDegrees(altitude_deg)}.`,
+    )
+  }
   if (skyline === null) return []
   return [`Horizon: ${skyline.words}; where the line meets it ${measuredDegrees(skyline.at_line_deg)}.`]
 }
@@ -39,7 +53,7 @@ function refraction({ refraction_check }: SightlineAudit): string[] {
   const years =
     effect_years === null
       ? ''
-      : `, which moves the date by ${formatNumber(Math.abs(effect_years), 2)} years ${effect_years < 0 ? 'into the past' : 'towards today'}`
+      : `; with the claim’s figure the date comes out ${formatNumber(Math.abs(effect_years), 2)} years ${effect_years < 0 ? 'earlier' : 'later'} than with the traced one`
   return [
     `The claim takes the refraction as ${formatArcmin(stated_arcmin)}; a ray trace through the air of the place gives ${formatArcmin(traced_arcmin)}, a difference of ${formatArcmin(Math.abs(stated_arcmin - traced_arcmin))}${years}.${source}`,
   ]

@@ -41,30 +41,50 @@ function sentence(
   return `${then} the target stands at ${placed} ${formatDegrees(direction_deg, 'minute')}; ${whatPoints(measures, 'now')} ${where}.`
 }
 
-function chance({ next, next_reason }: Today, line: SightlineAudit): string {
+function chance({ next, next_reason, offset_arcmin }: Today, line: SightlineAudit): string {
   if (next === null)
     return next_reason === null ? '' : ` There is no chance to look for oneself: ${next_reason}.`
-  const { date, utc, notes, days } = next
-  const hour =
-    utc === null
-      ? '; at what hour depends on the longitude, which the claim does not give'
-      : `, at ${utc.slice(11, 16)} UTC`
-  const alsoGood = days === null ? '' : ` ${others(days, date)}`
-  return ` The next chance to look for oneself is on ${formatDay(date)}${hour}.${alsoGood}${standing(next, line)}${notes.map((note) => ` ${note}`).join('')}`
+  const { notes, days, date } = next
+  const alsoGood = days === null ? '' : others(days, date)
+  const where = standing(next, line, offset_arcmin)
+  const more = notes.map((note) => ` ${note}`).join('')
+  return ` The next chance to look for oneself is on ${dayAndHour(next)}.${alsoGood}${where}${more}`
+}
+
+/** The place's own day, and universal time with its day where that is another. */
+function dayAndHour({ date, utc }: NextChance): string {
+  if (utc === null)
+    return `${formatDay(date)}; at what hour depends on the longitude, which the claim does not give`
+  const utcDay = utc.slice(0, 10)
+  const hour = `at ${utc.slice(11, 16)} UTC`
+  return utcDay === date
+    ? `${formatDay(date)}, ${hour}`
+    : `${formatDay(date)} by the place’s own time, ${hour} on ${formatDay(utcDay)}`
 }
 
 function others([from, to]: readonly [string, string], date: string): string {
   if (from === to) return ''
-  return `From ${formatDay(from)} to ${formatDay(to)} the Sun stands within 1′ of its declination of that day, and any of these${from === date ? ' days' : ''} does as well.`
+  return ` From ${formatDay(from)} to ${formatDay(to)} the Sun stands within 1′ of its declination of that day, and any of these${from === date ? ' days' : ''} does as well.`
 }
 
-function standing({ stand_right_m }: NextChance, { measures }: SightlineAudit): string {
+/** From further to the side than this the foresight and the skyline are no longer what they were, metres. */
+const NEAR_M = 5
+
+function standing(
+  { stand_right_m, stand_sd_m }: NextChance,
+  { measures, length_m }: SightlineAudit,
+  offsetArcmin: number | null,
+): string {
+  if (measures !== 'azimuth' || offsetArcmin === null) return ''
   if (stand_right_m === null) {
-    return measures === 'azimuth'
+    return length_m === null
       ? ' Where to stand follows from the length of the line, which is not known here.'
-      : ''
+      : ' It is too far off the line for any place beside the backsight.'
   }
   const size = formatCm(Math.abs(stand_right_m) * 100)
+  const sd = stand_sd_m === null ? '' : ` ± ${formatCm(stand_sd_m * 100)}`
   const side = stand_right_m > 0 ? 'right' : 'left'
-  return ` To have it over the foresight, the eye has to be ${size} to the ${side} of the backsight, as one looks along the line.`
+  const far =
+    Math.abs(stand_right_m) > NEAR_M ? ' From there the skyline can be another than from the backsight.' : ''
+  return ` The place from which it stands over the foresight is ${size}${sd} to the ${side} of the backsight, as one looks along the line.${far}`
 }

@@ -74,7 +74,18 @@ function degrees(value: Value | null): string {
 function altitudeHead(lines: readonly SightlineAudit[]): string {
   const measures = new Set(lines.map((line) => line.measures))
   if (measures.size > 1 && measures.has('altitude')) return 'Horizon, or altitude measured'
+  if (lines.some(isSeenAbove)) return 'Horizon, or where seen'
   return measures.has('altitude') ? 'Altitude measured' : 'Horizon'
+}
+
+/** A star that is first seen higher than the skyline is. */
+function isSeenAbove({ body, altitude_deg, skyline }: SightlineAudit): boolean {
+  return (
+    body === 'star' &&
+    skyline !== null &&
+    altitude_deg !== null &&
+    altitude_deg.value > skyline.at_line_deg.value
+  )
 }
 
 function discHead(lines: readonly SightlineAudit[]): string {

@@ -8,6 +8,7 @@ import { trackCaption } from '../captions/track.ts'
 import { horizonFigure } from '../figures/horizon-figure.ts'
 import { hasHorizon } from '../figures/horizon-source.ts'
 import { planFigure } from '../figures/plan-figure.ts'
+import { planParts } from '../figures/plan-parts.ts'
 import { premiseFigure } from '../figures/premise-figure.ts'
 import { trackFigure } from '../figures/track-figure.ts'
 import { fileNames } from './file-names.ts'
@@ -24,10 +25,12 @@ export interface CaptionedDrawing {
 /** What `::figure{of="…"}` may name; some give one figure for each sightline. To add one, as with parts.ts. */
 export const FIGURES: Readonly<Record<string, (audit: Audit) => CaptionedDrawing[]>> = {
   premise: (audit) => [{ name: 'premise', ...premiseFigure(audit), caption: premiseCaption(audit) }],
-  plan: (audit) => {
-    const figure = planFigure(audit)
-    return figure === null ? [] : [{ name: 'plan', ...figure, caption: planCaption(audit) }]
-  },
+  plan: (audit) =>
+    planParts(audit).flatMap((part, index, parts) => {
+      const figure = planFigure(part)
+      const name = index === 0 ? 'plan' : `plan-${index + 1}`
+      return figure === null ? [] : [{ name, ...figure, caption: planCaption(part, parts.length > 1) }]
+    }),
   horizon: (audit) => {
     const lines = audit.sightlines.filter(hasHorizon)
     const names = fileNames(

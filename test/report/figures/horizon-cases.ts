@@ -172,6 +172,22 @@ function cliffAudit(): Audit {
   })
 }
 
+/** A slope with the discs about the line, which is known to 39′ only. */
+function slopeAudit(): Audit {
+  const nodes = [
+    [55, 1.9],
+    [56.9, 1.2],
+    [57.2, 1.25],
+    [58.9, 2.2],
+    [61, 2.6],
+  ] as const
+  return horizonAudit({
+    lineDeg: { value: 57.9, sd: 0.65 },
+    skyline: { from: 'profile', nodes, at_line_deg: { value: 1.25 + (0.7 / 1.7) * 0.95, sd: 0.02 } },
+    places: [asserted(-6, 1.35), independent('radiocarbon', 1, 1.42), today(20, 1.62)],
+  })
+}
+
 /** A star over a skyline that runs through north, at dates that it moves far in. */
 function northAudit(): Audit {
   const nodes = [
@@ -244,6 +260,7 @@ export const HORIZON_CASES: Readonly<Record<string, () => Audit>> = {
   high: highAudit,
   sea: seaAudit,
   cliff: cliffAudit,
+  slope: slopeAudit,
   north: northAudit,
   star: starAudit,
   far: farAudit,

@@ -243,6 +243,24 @@ describe('the skyline', () => {
     textOf(figure('sea').drawing, 'sea horizon, −0°30′00″ ± 18″')
     textOf(figure('nowhere').drawing, 'level horizon, assumed, 1°30′ ± 2′')
   })
+
+  it('has its altitude at the line near the line, or with a leader to it', () => {
+    const leaders = (drawing: Element) =>
+      linesOf(drawing).filter(({ element }) => Number(element.properties.strokeWidth) === 0.4)
+    const { drawing } = figure('north')
+    const name = textOf(drawing, 'skyline, 0°46′ ± 1.2′ at the line')
+    const mark = linesOf(drawing).find(({ element }) => Number(element.properties.strokeWidth) === 1.1)!
+    expect(name.box.left - mark.x1).toBeGreaterThan(0)
+    expect(name.box.left - mark.x1).toBeLessThan(14)
+    expect(leaders(drawing).filter(({ y1, y2 }) => Math.max(y1, y2) < plotOf(drawing).bottom)).toEqual([])
+    const crowded = figure('slope').drawing
+    textOf(crowded, 'skyline; 1°38′ ± 1.2′ at the line')
+    const own = leaders(crowded).filter(({ y1, y2 }) => Math.max(y1, y2) < plotOf(crowded).bottom)
+    const to = scalesOf(crowded)
+    expect(own.map(({ x2, y2 }) => [x2, y2])).toEqual([
+      [near(to.x(57.9)), near(to.y(1.25 + (0.7 / 1.7) * 0.95))],
+    ])
+  })
 })
 
 describe('the line and its tolerances', () => {
@@ -263,11 +281,32 @@ describe('the line and its tolerances', () => {
     textOf(drawing, 'plausible tolerance: 10′ to 1°')
   })
 
-  it('leave a bracket open that runs out of the plot', () => {
+  it('draw a wide error as a whisker at the foot, not as a block', () => {
+    const { drawing } = figure('sea')
+    const { bottom } = plotOf(drawing)
+    expect(shapesOf(drawing, 'rect').filter(({ properties }) => properties.fill === PALETTE.set95)).toEqual(
+      [],
+    )
+    const { x } = scalesOf(drawing)
+    const bar = linesOf(drawing).find(({ y1, y2 }) => y1 === y2 && Math.abs(y1 - (bottom - 4)) < 0.02)!
+    // 57.9° ± 2°; the printed scale is good to 0.1 points.
+    expect([bar.x1, bar.x2]).toEqual([near(x(55.9)), near(x(59.9))])
+  })
+
+  it('end a bracket that runs out of the plot in arrow heads', () => {
     const { drawing } = figure('sea')
     const { bottom } = plotOf(drawing)
     const caps = linesOf(drawing).filter(({ x1, x2, y1, y2 }) => x1 === x2 && y2 - y1 === 6 && y1 > bottom)
     expect(caps.every(({ x1 }) => Math.abs(x1 - scalesOf(drawing).x(57.9)) < 0.1)).toBe(true)
+    const tips = (name: string) => {
+      const { drawing } = figure(name)
+      const y = plotOf(drawing).bottom + 6
+      const heads = linesOf(drawing).filter((l) => Math.abs(l.y2 - y) < 0.02 && Math.abs(l.y1 - y) === 3)
+      return [...new Set(heads.map(({ x2 }) => x2))]
+    }
+    expect(tips('sea')).toEqual([46, 437])
+    expect(tips('far')).toEqual([437])
+    expect(tips('level')).toEqual([])
     textOf(drawing, 'plausible tolerance: exact to 5°')
   })
 

@@ -1,4 +1,5 @@
 import type { Audit, Placement, PlanPoint, SightlineAudit } from '../../../src/audit/audit.ts'
+import { planParts } from '../../../src/report/figures/plan-parts.ts'
 import { makeShapedAudit } from './make-audit.ts'
 
 /**
@@ -275,10 +276,25 @@ export function datesPlan(): Audit {
   })
 }
 
+/** Five lines of it: as many as one figure holds. */
+function fivePlan(): Audit {
+  const round = roundPlan()
+  return { ...round, plan: { ...round.plan, lines: round.plan.lines.slice(0, 5) } }
+}
+
+/** A plan whose claim does not say where its north points. */
+export function untoldPlan(): Audit {
+  const audit = calendarPlan()
+  return { ...audit, plan: { ...audit.plan, north: { words: 'not said; taken as true', sd_deg: 0 } } }
+}
+
 export const PLAN_CASES: Readonly<Record<string, () => Audit>> = {
   one: onePlan,
   calendar: calendarPlan,
-  round: roundPlan,
+  five: fivePlan,
+  round: () => planParts(roundPlan())[0]!,
+  'round-2': () => planParts(roundPlan())[1]!,
+  untold: untoldPlan,
   north: northPlan,
   axis: axisPlan,
   angle: anglePlan,

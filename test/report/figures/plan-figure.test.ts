@@ -18,6 +18,7 @@ import {
   PLAN_CASES,
   point,
   roundPlan,
+  untoldPlan,
 } from './plan-cases.ts'
 import {
   badNumbers,
@@ -163,8 +164,20 @@ describe('the plan to scale', () => {
   })
 
   it('says how well north is known, where a plan says so', () => {
-    textOf(drawingOf(calendarPlan()), '± 30′')
-    expect(textsOf(drawing).some(({ content }) => content.startsWith('±'))).toBe(false)
+    textOf(drawingOf(calendarPlan()), 'true north ± 30′')
+    expect(textsOf(drawing).filter(({ content }) => /north/.test(content)).length).toBe(1)
+    textOf(drawing, 'true north')
+  })
+
+  it('does not claim true north where nothing tells of it', () => {
+    const unknown = { ...calendarPlan().plan, north: { words: 'unknown', sd_deg: 2 } }
+    const found = [untoldPlan(), anglePlan(), { ...calendarPlan(), plan: unknown }].map((audit) => {
+      const { drawing, alt } = planFigure(audit)!
+      expect(alt).toContain('The survey from above, north up as the plan has it')
+      expect(textsOf(drawing).filter(({ content }) => content.includes('true')).length).toBe(0)
+      return textsOf(drawing).find(({ content }) => content.startsWith('as the plan has it'))?.content
+    })
+    expect(found).toEqual(['as the plan has it', 'as the plan has it', 'as the plan has it ± 2°'])
   })
 
   it('has no bar of metres for bare azimuths', () => {
@@ -265,6 +278,31 @@ describe('the view along a line', () => {
     expect(bar('50 cm at the marker, 100 m off') / perArcmin).toBeCloseTo(17.2, 1)
   })
 
+  it('has no bar of lengths where the markers are not equally far off, and says the sides', () => {
+    // 51.02, 51.50 and 51.91 m.
+    const texts = textsOf(drawingOf(calendarPlan())).map(({ content }) => content)
+    expect(texts.filter((content) => / (?:at 100 m|at the marker)/.test(content))).toEqual([])
+    expect(texts).toContain('asserted 2.4′ right, 3.6 cm')
+    expect(texts).toContain('20′, one tick')
+  })
+
+  it('has a bar of the Sun as long as it fits, with its words in a gap, and says where it does not', () => {
+    const plausible = { low_arcmin: 2, high_arcmin: 10, stated: true }
+    const line = { name: 'x', azimuthDeg: 90, lengthM: 50 }
+    const wide = drawingOf(makePlanAudit({ plausible, lines: [{ ...line, offsets: [1, 9, -25] }] }))
+    const { y, x, anchor } = textOf(wide, 'the Sun, 32′ wide')
+    const row = linesOf(wide).filter((l) => l.y1 === l.y2 && l.x1 >= VIEWS && Math.abs(l.y1 - y) < 4)
+    const tick = textOf(wide, '5′, one tick')
+    const perArcmin =
+      lengthOf(linesOf(wide).find((l) => l.y1 === l.y2 && l.x1 === VIEWS && Math.abs(l.y1 - tick.y) < 4)!) / 5
+    const [start, end] = [Math.min(...row.map(({ x1 }) => x1)), Math.max(...row.map(({ x2 }) => x2))]
+    // The fixture's sweep takes 32.4′ for the Sun's width.
+    expect((end - start) / perArcmin).toBeCloseTo(32.4, 1)
+    expect([anchor, row.length]).toEqual(['middle', 2])
+    expect(x).toBeCloseTo((start + end) / 2, 1)
+    textOf(drawingOf(exactPlan()), 'the Sun, 32′ wide, is wider than this view')
+  })
+
   it('points an arrow to a target that is degrees off', () => {
     const away = drawingOf(northPlan())
     textOf(away, '7°20′ ± 2.5′ left, 13 m')
@@ -337,7 +375,7 @@ describe('a line with no place on a plan', () => {
 describe('the words for who cannot see the plan', () => {
   it('name points, line, tolerances, and where the target stood', () => {
     expect(planFigure(onePlan())!.alt).toBe(
-      'The survey from above, true north up: hearthstone and east-pillar. Beside it the view along the line, drawn 50 times as wide, with wedges of 10′ and 1°, the build tolerances held plausible. midsummer runs from hearthstone to east-pillar at 57°54′ ± 2′, 100 m long. Against it the June solstice sunrise stood: asserted date, 9701 to 9501 BCE, 1.8′ ± 2.5′ right, 5.2 cm; radiocarbon, 801 to 501 BCE, 37′ ± 2.5′ right, 1.1 m; today, 2026 CE, 1°05′ ± 2.5′ right, 1.9 m.',
+      'The survey from above, true north up: hearthstone and east-pillar. Beside it the surroundings of the line, stretched 50 times across, with wedges of 10′ and 1°, the build tolerances held plausible. midsummer runs from hearthstone to east-pillar at 57°54′ ± 2′, 100 m long. Against it the June solstice sunrise stood: asserted date, 9701 to 9501 BCE, 1.8′ ± 2.5′ right, 5.2 cm; radiocarbon, 801 to 501 BCE, 37′ ± 2.5′ right, 1.1 m; today, 2026 CE, 1°05′ ± 2.5′ right, 1.9 m.',
     )
   })
 
