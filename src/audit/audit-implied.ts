@@ -14,12 +14,17 @@ interface Stretch {
   to: number
 }
 
-/** Every date at which the target stands on the line by one model, in the window and just outside it. */
+/**
+ * Every date at which the target stands on the line by one model, in the window and just outside it.
+ *
+ * @param yardstickYear Year whose Sun angles are told in, the same throughout an audit.
+ */
 export function auditImplied(
   line: SightlineInputs,
   model: ObliquityModelName,
   window: Stretch,
   presentYear: number,
+  yardstickYear: number,
 ): Implied {
   const inputs = { ...line, model }
   const sight = sightOf(inputs)
@@ -38,17 +43,19 @@ export function auditImplied(
     sightline: line.name,
     model,
     dates,
-    nearest_approach: inWindow ? null : approachOf(inputs, computableStretch(model, window.from, window.to)),
+    nearest_approach: inWindow
+      ? null
+      : approachOf(inputs, computableStretch(model, window.from, window.to), yardstickYear),
   }
 }
 
-function approachOf(inputs: SightlineInputs, { from, to }: Stretch): NearestApproach {
+function approachOf(inputs: SightlineInputs, { from, to }: Stretch, yardstickYear: number): NearestApproach {
   const sight = sightOf(inputs)
   const { year, offsetDeg } = nearestApproach(sight, from, to)
   const sd = nearestOffset(sight, year)?.sdDeg ?? null
   if (offsetDeg === null || sd === null)
     return { year, offset_arcmin: null, sd_arcmin: null, sun_widths: null }
-  const semidiameter = yardstickSemidiameterArcmin(year)
+  const semidiameter = yardstickSemidiameterArcmin(yardstickYear)
   return {
     year,
     offset_arcmin: offsetDeg * 60,

@@ -1,10 +1,9 @@
 import type { Claim, Point } from '../claim/claim.ts'
-import { DEG } from '../quantity/degrees.ts'
-import { geodesicLine } from '../site/geodesic-line.ts'
 import type { Plan, PlanLine, PlanPoint } from './audit.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
+import { metresOnEarth } from './survey/line-on-earth.ts'
 import { northOfPlan } from './survey/north-of-plan.ts'
-import { placeOfPoint, pointSdM, turned } from './survey/place-of-point.ts'
+import { pointSdM, turned } from './survey/place-of-point.ts'
 import { surveyedLine } from './survey/surveyed-line.ts'
 
 /** The points that a claim's lines use, and the lines, seen from above with true north up. */
@@ -66,11 +65,8 @@ function fromOrigin(claim: Claim, origin: Point, point: Point): { eastM: number;
     const onPlan = { eastM: point.eastM - origin.eastM, northM: point.northM - origin.northM }
     return turned(onPlan, northOfPlan(claim).turnDeg)
   }
-  const [from, to] = [placeOfPoint(claim, origin), placeOfPoint(claim, point)]
-  if (from !== null && to !== null) {
-    const { azimuthDeg, lengthM } = geodesicLine(from, to)
-    return { eastM: lengthM * Math.sin(azimuthDeg * DEG), northM: lengthM * Math.cos(azimuthDeg * DEG) }
-  }
+  const metres = metresOnEarth(claim, origin, point)
+  if (metres !== null) return metres
   // Neither is on the Earth: both are on a grid of which only the convergence is known, or on the plan and a grid.
   if (origin.by !== 'grid' || point.by !== 'grid' || claim.grid?.by !== 'convergence') return null
   const onGrid = { eastM: point.eastingM - origin.eastingM, northM: point.northingM - origin.northingM }

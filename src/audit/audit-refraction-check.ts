@@ -20,7 +20,7 @@ const STEP = 20
 
 /**
  * The refraction that a claim took for one line, held against a ray trace through the air of the place, and what the
- * difference is worth in years. Null where the claim states none, or the line meets no horizon.
+ * difference is worth in years. Null where the claim states none, or the line meets no horizon, or two.
  */
 export function auditRefractionCheck(
   claim: Claim,
@@ -29,10 +29,12 @@ export function auditRefractionCheck(
   near: number,
 ): RefractionCheck | null {
   const stated = statedRefractionArcmin(claim, line)
-  if (stated === null || !usesHorizon(line) || line.pair !== null || line.horizonDeg < 0) return null
+  if (stated === null || !usesHorizon(line) || line.pair !== null) return null
   const air = airOf(claim)
   const traced = refractionArcmin(line.horizonDeg, air, line.latitudeDeg)
-  const seaLevel = bennettRefractionArcmin(line.horizonDeg, TEXTBOOK.temperatureC, TEXTBOOK.pressureHpa)
+  // Textbooks go no lower than the level.
+  const altitudeDeg = Math.max(0, line.horizonDeg)
+  const seaLevel = bennettRefractionArcmin(altitudeDeg, TEXTBOOK.temperatureC, TEXTBOOK.pressureHpa)
   const dateBy = (arcmin: number) => {
     const from = window.from - YEARS_BEYOND_WINDOW
     const to = window.to + YEARS_BEYOND_WINDOW

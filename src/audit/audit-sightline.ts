@@ -91,9 +91,10 @@ function surveyOf({ survey, ends, lengthM }: SightlineInputs): string[] {
 function solsticesOf({ pair }: SightlineInputs): SightlineAudit['solstices'] {
   if (pair === null) return null
   return (['june', 'december'] as const).map((side) => {
-    const { horizonDeg, horizonSdDeg, refractionSdArcmin } = pair[side]
+    const { horizon, horizonDeg, horizonSdDeg, refractionSdArcmin } = pair[side]
     return {
       solstice: side === 'june' ? 'June' : 'December',
+      horizon: horizon.words,
       altitude_deg: { value: horizonDeg, sd: horizonSdDeg },
       refraction_arcmin: { value: refractionAtHorizon(pair[side]).arcmin, sd: refractionSdArcmin },
     }

@@ -8,8 +8,17 @@ import { sightOf } from './sight-of.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 import { yardstickSemidiameterArcmin } from './sun-yardstick.ts'
 
-/** How far the line is from its target in the year the audit was made, and when it is next to be seen. */
-export function auditToday(inputs: SightlineInputs, place: SkyPlace, now: Date): Today {
+/**
+ * How far the line is from its target in the year the audit was made, and when it is next to be seen.
+ *
+ * @param yardstickYear Year whose Sun angles are told in, the same throughout an audit.
+ */
+export function auditToday(
+  inputs: SightlineInputs,
+  place: SkyPlace,
+  now: Date,
+  yardstickYear: number,
+): Today {
   const year = now.getUTCFullYear()
   const { next, reason } = nextChance(inputs, place, now)
   const nearest = nearestOffset(sightOf(inputs), year)
@@ -31,7 +40,11 @@ export function auditToday(inputs: SightlineInputs, place: SkyPlace, now: Date):
     year,
     direction_deg: nearest.directionDeg,
     offset_arcmin: offset,
-    sun_widths: sunWidths(Math.abs(offset), yardstickSemidiameterArcmin(year), widthAltitude(inputs)),
+    sun_widths: sunWidths(
+      Math.abs(offset),
+      yardstickSemidiameterArcmin(yardstickYear),
+      widthAltitude(inputs),
+    ),
     offset_cm: inputs.measures === 'angle' ? null : centimetres(Math.abs(offset), markerOf(inputs.lengthM)),
     next,
     next_reason: reason,

@@ -137,7 +137,15 @@ export interface SightlineAudit {
   altitude_deg: Value | null
   refraction_arcmin: Value | null
   /** Of an angle: the horizon and the refraction of each of its lines. */
-  solstices: readonly { solstice: string; altitude_deg: Value; refraction_arcmin: Value }[] | null
+  solstices:
+    | readonly {
+        solstice: string
+        /** How its horizon was had. */
+        horizon: string
+        altitude_deg: Value
+        refraction_arcmin: Value
+      }[]
+    | null
   /** The refraction that the claim took, held against the air of the place; null where it states none. */
   refraction_check: RefractionCheck | null
   /** What the line meets the sky at; null where no horizon plays a part. */
@@ -183,7 +191,7 @@ export interface Skyline {
 export interface RefractionCheck {
   stated_arcmin: number
   traced_arcmin: number
-  /** What textbooks give at sea level, 10 °C and 1010 hPa for the same apparent altitude (Bennett 1982). */
+  /** What textbooks give at sea level, 10 °C and 1010 hPa for the same apparent altitude (Bennett 1982), or for the level where it is lower. */
   sea_level_arcmin: number
   /** Whether the one stated is, to 1.5′, the one for sea level, while that of the place is further from it. */
   is_sea_level: boolean
@@ -460,6 +468,8 @@ export interface NextChance {
   direction_deg: number | null
   /** To have it over the foresight, stand so many metres beside the backsight, to the right positive; null where unknown. */
   stand_right_m: number | null
+  /** One standard deviation of that. */
+  stand_sd_m: number | null
   /** Sentences on what else matters: phase of the Moon, hour of the night. */
   notes: readonly string[]
 }

@@ -1,4 +1,4 @@
-import type { Claim, Direction, Sightline } from '../claim/claim.ts'
+import type { Claim, Direction, Sightline, Span } from '../claim/claim.ts'
 import { DEG } from '../quantity/degrees.ts'
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatCm } from '../quantity/format-length.ts'
@@ -7,6 +7,8 @@ import { DEFAULTS } from './defaults.ts'
 import type { Gap } from './gap.ts'
 import { northGaps } from './gaps-of-north.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
+import { pointNamed, pointSdM } from './survey/place-of-point.ts'
+import { surveyedSpan } from './survey/surveyed-span.ts'
 import { turnedLine } from './turned-line.ts'
 
 /** What one sightline leaves open of its direction: its uncertainty, and north. */
@@ -33,12 +35,15 @@ export function directionGaps(
       })
     case 'points':
       return [
-        ...pointGaps(claim, [direction.from, direction.to], inputs, 'the line', 'further left or right'),
+        ...pointGaps(claim, [direction.from, direction.to], (name) => turnOfLine(claim, name, inputs), [
+          'the line',
+          'further left or right',
+        ]),
         ...tieGaps(claim, direction, inputs),
         ...northGaps(claim, direction, inputs),
       ]
     case 'span':
-      return spanGaps(claim, direction, inputs, of)
+      return spanGaps(claim, direction, of)
   }
 }
 
@@ -73,14 +78,13 @@ function tieGaps(
   ]
 }
 
-function spanGaps(
-  claim: Claim,
-  { span }: Extract<Direction, { by: 'span' }>,
-  inputs: SightlineInputs,
-  of: string,
-): Gap[] {
+function spanGaps(claim: Claim, { span }: Extract<Direction, { by: 'span' }>, of: string): Gap[] {
   if (span.by === 'points') {
-    return pointGaps(claim, [span.from, span.june, span.december], inputs, 'the angle', 'wider or narrower')
+    const { from, june, december } = span
+    return pointGaps(claim, [from, june, december], (name) => turnOfSpan(claim, name, span), [
+      'the angle',
+      'wider or narrower',
+    ])
   }
   return measuredGap(span.angleDeg.sd, {
     what: `uncertainty of the angle${of}`,
@@ -110,25 +114,37 @@ const BASIS_OF_POINT = {
   grid: 'coordinates off a large-scale map or a satellite survey; our choice',
 } as const
 
+/** @param turnDeg What one standard deviation of a point turns the line by, or widens the angle. */
 function pointGaps(
   claim: Claim,
   names: readonly string[],
-  inputs: SightlineInputs,
-  what: string,
-  ways: string,
+  turnDeg: (name: string) => number,
+  [what, ways]: readonly [string, string],
 ): Gap[] {
-  const sd = formatArcmin(inputs.measuredSdDeg * 60)
   return [...new Set(names)].flatMap((name): Gap[] => {
     const point = claim.points.get(name)
     if (point === undefined || !isUnstated(point.uncertaintyM)) return []
+    const turn = turnDeg(name)
     return [
       {
         what: `uncertainty of the point ${name}`,
         said: point.uncertaintyM,
         used: `± ${formatCm(DEFAULTS.pointSdM[point.by] * 100)}`,
         basis: BASIS_OF_POINT[point.by],
-        change: { words: `${what} ${sd} ${ways}`, of: turnedLine(inputs.measuredSdDeg) },
+        change: { words: `${what} ${formatArcmin(turn * 60)} ${ways}`, of: turnedLine(turn) },
       },
     ]
   })
+}
+
+function turnOfLine(claim: Claim, name: string, { lengthM }: SightlineInputs): number {
+  return lengthM === null ? 0 : pointSdM(pointNamed(claim, name)) / lengthM / DEG
+}
+
+/** The standard deviation of the angle where no other point had any. */
+function turnOfSpan(claim: Claim, name: string, span: Extract<Span, { by: 'points' }>): number {
+  const points = new Map(
+    [...claim.points].map(([held, point]) => [held, held === name ? point : { ...point, uncertaintyM: 0 }]),
+  )
+  return surveyedSpan({ ...claim, points }, span).sdDeg
 }

@@ -1,5 +1,5 @@
 import type { Claim, Horizon, Sightline } from '../claim/claim.ts'
-import { DEG } from '../quantity/degrees.ts'
+import { DEG, wrap360 } from '../quantity/degrees.ts'
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatCm } from '../quantity/format-length.ts'
 import { isUnstated, type Unstated } from '../quantity/unstated.ts'
@@ -7,6 +7,7 @@ import { horizonFromDistance } from '../site/horizon-from-distance.ts'
 import { seaDip } from '../site/sea-dip.ts'
 import { skylineOf } from '../site/skyline.ts'
 import { MEAN_EARTH_RADIUS_M, TERRESTRIAL_REFRACTION } from '../site/terrestrial-refraction.ts'
+import { NORTH_SD_DEG } from '../site/true-north.ts'
 import { DEFAULTS } from './defaults.ts'
 import type { Gap } from './gap.ts'
 import { raisedHorizon } from './raised-horizon.ts'
@@ -19,8 +20,12 @@ interface HorizonName {
   of: string
 }
 
-/** A change of a line's horizon, of which an angle has two. */
-type Raise = (line: SightlineInputs, deg: number) => SightlineInputs
+/** Makes a change to the line whose horizon it is: of an angle, to one of its two. */
+type OnSide = (
+  change: (side: SightlineInputs) => SightlineInputs,
+) => (line: SightlineInputs) => SightlineInputs
+
+const ONLY_SIDE: OnSide = (change) => change
 
 /** What a sightline leaves open of its horizon; of an angle, of both. */
 export function horizonGaps(
@@ -35,15 +40,13 @@ export function horizonGaps(
       direction.by === 'points' && !isUnstated(horizon) && horizon.by === 'point'
         ? heightGaps(claim, [direction.from, horizon.point], inputs)
         : []
-    return [...gapsOf(horizon, inputs, { noun: 'the horizon', of }, raisedHorizon), ...heights]
+    return [...gapsOf(horizon, inputs, { noun: 'the horizon', of }, ONLY_SIDE), ...heights]
   }
   return (['june', 'december'] as const).flatMap((side) => {
-    const raise: Raise = (line, deg) =>
-      line.pair === null
-        ? line
-        : { ...line, pair: { ...line.pair, [side]: raisedHorizon(line.pair[side], deg) } }
+    const onSide: OnSide = (change) => (line) =>
+      line.pair === null ? line : { ...line, pair: { ...line.pair, [side]: change(line.pair[side]) } }
     const month = side === 'june' ? 'June' : 'December'
-    return gapsOf(direction.horizons[side], pair[side], { noun: `the ${month} horizon`, of }, raise)
+    return gapsOf(direction.horizons[side], pair[side], { noun: `the ${month} horizon`, of }, onSide)
   })
 }
 
@@ -51,11 +54,11 @@ function gapsOf(
   horizon: Horizon | Unstated,
   { horizonSdDeg, horizon: settled }: SightlineInputs,
   name: HorizonName,
-  raise: Raise,
+  onSide: OnSide,
 ): Gap[] {
   const moved = (deg: number, instead?: string): Gap['change'] => ({
     words: instead ?? `a horizon ${formatArcmin(deg * 60)} higher or lower`,
-    of: (line) => [raise(line, deg), raise(line, -deg)],
+    of: (line) => [deg, -deg].map((raise) => onSide((side) => raisedHorizon(side, raise))(line)),
   })
   const sd = formatArcmin(horizonSdDeg * 60)
   if (isUnstated(horizon)) {
@@ -84,7 +87,7 @@ function gapsOf(
         : []
     case 'profile': {
       const said = horizon.nodes.map(({ sdDeg }) => sdDeg).find(isUnstated)
-      const beyond = goesRound(horizon) ? [] : [beyondGap(name)]
+      const beyond = [turnedGap(name, onSide), ...(goesRound(horizon) ? [] : [beyondGap(name)])]
       return said === undefined
         ? beyond
         : [
@@ -130,6 +133,28 @@ function heightGaps(claim: Claim, names: readonly string[], { horizon }: Sightli
       },
     ]
   })
+}
+
+/** A profile that was taken with a compass is turned as a whole, which on a slope moves the gleam. */
+function turnedGap({ noun, of }: HorizonName, onSide: OnSide): Gap {
+  const turned = (deg: number) =>
+    onSide((side) => {
+      const nodes = side.horizon.nodes?.map((node) => ({
+        ...node,
+        azimuthDeg: wrap360(node.azimuthDeg + deg),
+      }))
+      return { ...side, horizon: { ...side.horizon, nodes: nodes ?? null } }
+    })
+  return {
+    what: `north of ${noun}’s profile${of}`,
+    said: 'omitted',
+    used: 'true north, without error',
+    basis: 'the claim’s own premise: it gives azimuths',
+    change: {
+      words: `the profile turned by ${formatArcmin(NORTH_SD_DEG.compass * 60)} to either side, the best a compass does`,
+      of: (line) => [turned(NORTH_SD_DEG.compass)(line), turned(-NORTH_SD_DEG.compass)(line)],
+    },
+  }
 }
 
 function beyondGap({ noun, of }: HorizonName): Gap {

@@ -21,7 +21,7 @@ export function northGaps(
   if (!kinds.includes('plan')) return []
   // Of a line from the plan to a place on the Earth only the part on the plan turns with its north.
   const effectDeg = claim.north === 'omitted' ? turnByCompass(claim, from, to) : inputs.northSdDeg
-  return effectDeg > SMALLEST_TURN_DEG ? ofPlan(claim, effectDeg) : []
+  return Math.abs(effectDeg) > SMALLEST_TURN_DEG ? ofPlan(claim, Math.abs(effectDeg)) : []
 }
 
 /** 0.4″: a plan's north that turns a line by less is not worth a row. */

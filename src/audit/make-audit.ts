@@ -19,6 +19,7 @@ import { auditTracks } from './audit-tracks.ts'
 import { nearestYear } from './dated-label.ts'
 import { deepFreeze } from './deep-freeze.ts'
 import { DEFAULTS, YEARS_BEYOND_WINDOW } from './defaults.ts'
+import { isUnsteady } from './is-unsteady.ts'
 import { verdictOf } from './outcome.ts'
 import { referencesOf } from './references.ts'
 import { auditSecondWindow } from './second-window.ts'
@@ -45,17 +46,17 @@ export interface AuditContext {
 /** Audits a claim: settles its gaps, looks for its dates, sweeps over build tolerances and words the findings. */
 export function makeAudit(claim: Claim, context: AuditContext): Audit {
   const settled = settleClaim(claim)
-  const { lines, sights, dates, year, plausible, yardstick, wantedArcmin } = settled
+  const { lines, sights, joint, dates, year, plausible, yardstick, wantedArcmin } = settled
   const { asserted, others, window } = dates
   const present = context.now.getUTCFullYear()
-  const ground = groundOf(sights, dates)
+  const ground = groundOf(joint, dates)
   const sweep = auditSweep(ground, dates, yardstick, wantedArcmin)
   const limits = auditLimits(ground, dates, yardstick.marker)
   const sightlines = lines.map((line) =>
     auditSightline(line, asserted, ownSweep(line, settled), auditRefractionCheck(claim, line, window, year)),
   )
   const implied = lines.flatMap((line) =>
-    modelsOfDates(claim, line).map((model) => auditImplied(line, model, window, present)),
+    modelsOfDates(claim, line).map((model) => auditImplied(line, model, window, present, year)),
   )
   const ours = implied.filter(({ model }) => model === 'vondrak2011')
   const checks = auditChecks(
@@ -68,6 +69,7 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
   const reproduction = auditReproduction(claim, lines, window)
   const { outcome, misfits } = verdictOf({
     sights,
+    joint,
     dates,
     ground,
     limits,
@@ -96,6 +98,7 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
       atOffset,
       taken,
       northTaken: isNorthTaken(claim),
+      isUnsteady: lines.some((line) => isUnsteady(line, year)),
     }),
     findings: writeFindings({ ...facts, implied, checks, reproduction }),
     assumptions: listAssumptions(claim, lines, window),
@@ -105,11 +108,11 @@ export function makeAudit(claim: Claim, context: AuditContext): Audit {
     implied,
     checks,
     reproduction,
-    second_window: auditSecondWindow(sights, dates, wantedArcmin),
+    second_window: auditSecondWindow(joint, dates, wantedArcmin),
     ...budgetOf(settled, ours[0]!.dates),
     alternatives: lines.flatMap((line) => auditAlternatives(line, window, year)),
     chance: null,
-    today: lines.map((line) => auditToday(line, placeOf(claim), context.now)),
+    today: lines.map((line) => auditToday(line, placeOf(claim), context.now, year)),
     warnings: listWarnings(claim, settled, ours, sweep, context.readingWarnings),
     references: referencesOf(claim, lines),
   })

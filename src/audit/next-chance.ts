@@ -43,6 +43,7 @@ export function nextChance(line: SightlineInputs, place: SkyPlace, now: Date): C
       days,
       direction_deg: direction.directionDeg,
       stand_right_m: standRightM(line, direction.offsetDeg),
+      stand_sd_m: standRightM(line, direction.sdDeg),
       notes,
     },
     reason: null,
@@ -91,7 +92,7 @@ function soughtSighting(line: SightlineInputs, place: SkyPlace, now: Date, year:
       const { star, at } = target
       const sight =
         at === 'rising' || at === 'setting'
-          ? { star, at, altitudeDeg: targetModel(line).altitudeDeg(year)?.deg ?? 0 }
+          ? { star, at, altitudeDeg: starAltitudeDeg(line, year) }
           : { star, at }
       const found = nextStarSighting(place, sight, now)
       return found.sighting === null
@@ -180,6 +181,18 @@ function centreAltitudeDeg(line: SightlineInputs, year: number): number {
   const trueDeg = seenDeg - arcmin / 60
   // A refraction given less parallax leads to the altitude from the Earth's centre, where nobody stands.
   return lessParallax ? trueDeg - (parallaxArcmin(target) / 60) * Math.cos(trueDeg * DEG) : trueDeg
+}
+
+/** True altitude at which a star is seen: over a skyline, where it clears that. */
+function starAltitudeDeg(line: SightlineInputs, year: number): number {
+  const onSkyline = nearestBranch(sightOf(line), year).predict(year)?.discCentre
+  if (onSkyline !== undefined) {
+    return onSkyline.altitudeDeg - refractionAt(line, onSkyline.altitudeDeg).arcmin / 60
+  }
+  const altitude = targetModel(line).altitudeDeg(year)
+  // Whoever asks has made sure that the target has a direction, and so an altitude.
+  if (altitude === null) throw new Error('a star that is never seen has no next chance')
+  return altitude.deg
 }
 
 /** Mean horizontal parallax; 0 of a star. */

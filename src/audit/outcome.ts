@@ -19,15 +19,17 @@ const REACH_STEP = 20
 
 export function verdictOf(facts: {
   sights: readonly Sight[]
+  /** Of those, the ones that are read together. */
+  joint: readonly Sight[]
   dates: SweepDates
   ground: SweepGround
   limits: readonly Limit[]
   /** Tolerances at which the lead of the asserted date is looked at, arcminutes. */
   plausibleArcmin: readonly number[]
 }): Verdict {
-  const { sights, dates, ground, limits, plausibleArcmin } = facts
+  const { sights, joint, dates, ground, limits, plausibleArcmin } = facts
   const { asserted, window } = dates
-  const lines = distinctSights(sights)
+  const lines = distinctSights(joint)
   if (!isFit(bestFit(lines, asserted), lines.length)) {
     const reach = { from: window.from - YEARS_BEYOND_WINDOW, to: window.to + YEARS_BEYOND_WINDOW }
     const isNowhere = !isFit(bestFit(lines, reach, REACH_STEP), lines.length)

@@ -62,13 +62,16 @@ export function setInWords(
   const last = sets95.length - 1
   return listedShort(
     sets95.map(([from, to], i) => {
-      if (i === 0 && open_low) return `any up to ${formatYear(to, YEAR_STEP)}`
-      if (i === last && open_high) return `any from ${formatYear(from, YEAR_STEP)} on`
-      return formatYearRange(from, to, YEAR_STEP)
+      if (i === 0 && open_low) return `any date up to ${formatYear(to, YEAR_STEP)}`
+      if (i === last && open_high) return `any date from ${formatYear(from, YEAR_STEP)} on`
+      return formatYearRange(from, to, to - from < NARROW_YEARS ? 1 : YEAR_STEP)
     }),
     MOST_PARTS,
   )
 }
+
+/** Of a narrower set round years would cut off, or add, too much. */
+const NARROW_YEARS = 100
 
 /** `10′ to 1°`, and whose they are. */
 export function plausibleWords(plausible: {

@@ -99,7 +99,9 @@ function ruleReadings(target: Extract<SettledTarget, { body: 'star' }>): TargetR
   const rules = (['extinction', 'magnitude in degrees'] as const).map((rule): TargetReading => {
     const isOwn = target.sighted.by === 'rule' && target.sighted.rule === rule
     const value =
-      rule === 'extinction' ? 'first visible by extinction' : 'as many degrees up as it has magnitudes'
+      rule === 'extinction'
+        ? 'first visible by extinction'
+        : 'as many degrees up as it has magnitudes, at least 1°'
     return { choice, value, target: isOwn ? target : { ...target, sighted: { by: 'rule', rule } } }
   })
   if (target.sighted.by === 'rule')

@@ -7,6 +7,7 @@ import { widthAltitude } from './audit-sightline.ts'
 import type { SweepDates, Yardstick } from './audit-sweep.ts'
 import { datedLabel, middle } from './dated-label.ts'
 import { DEFAULTS } from './defaults.ts'
+import { jointLines } from './joint-lines.ts'
 import { markerOf } from './measures.ts'
 import { settleSightline } from './settle-sightline.ts'
 import { sightOf } from './sight-of.ts'
@@ -17,6 +18,8 @@ import { yardstickSemidiameterArcmin } from './sun-yardstick.ts'
 export interface SettledClaim {
   lines: readonly SightlineInputs[]
   sights: readonly Sight[]
+  /** Of those, the ones that are read together. */
+  joint: readonly Sight[]
   dates: SweepDates
   /** Middle of the asserted date. */
   year: number
@@ -32,15 +35,17 @@ export function settleClaim(claim: Claim): SettledClaim {
   const others = claim.otherDates.map(({ label, date }) => datedLabel(label, date))
   const year = middle(asserted)
   const plausible = plausibleOf(claim)
-  const lengths = new Set(lines.map(({ lengthM }) => lengthM))
+  const joint = jointLines(lines)
+  const lengths = new Set(joint.map(({ lengthM }) => lengthM))
   return {
     lines,
     sights: lines.map(sightOf),
+    joint: joint.map(sightOf),
     dates: { window: windowOf(claim), asserted, others },
     year,
     plausible,
     wantedArcmin: wantedTolerances(claim, plausible),
-    yardstick: yardstickOf(lines[0]!, year, lengths.size === 1 ? lines[0]!.lengthM : null),
+    yardstick: yardstickOf(joint[0]!, year, lengths.size === 1 ? joint[0]!.lengthM : null),
   }
 }
 

@@ -1,5 +1,5 @@
 import type { Claim, Direction, Horizon } from '../claim/claim.ts'
-import { formatArcmin, formatDegrees } from '../quantity/format-angle.ts'
+import { formatDegrees } from '../quantity/format-angle.ts'
 import { formatCm } from '../quantity/format-length.ts'
 import type { Measured } from '../quantity/measured.ts'
 import { isUnstated, type Unstated } from '../quantity/unstated.ts'
@@ -104,9 +104,4 @@ function ofProfile(horizon: Extract<Horizon, { by: 'profile' }>, azimuthDeg: num
     ...settled(altitude, 'profile', words),
     horizon: { from: 'profile', words, distanceM: null, nodes },
   }
-}
-
-/** `1°30′ ± 2′`. */
-export function horizonWords({ horizonDeg, horizonSdDeg }: HorizonInputs): string {
-  return `${formatDegrees(horizonDeg, 'minute')} ± ${formatArcmin(horizonSdDeg * 60)}`
 }

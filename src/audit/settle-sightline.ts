@@ -25,8 +25,10 @@ export function settleSightline(claim: Claim, sightline: Sightline): SightlineIn
         measuredDeg: wrap360(direction.azimuthDeg.value),
         measuredSdDeg: statedOr(direction.azimuthDeg.sd, DEFAULTS.azimuthSdDeg),
         northSdDeg: 0,
+        northOf: null,
         axis: null,
         ends: null,
+        bearingDeg: null,
         survey: [],
         lengthM: null,
       }
@@ -41,7 +43,15 @@ export function settleSightline(claim: Claim, sightline: Sightline): SightlineIn
 
 type Line = Pick<
   SightlineInputs,
-  'measuredDeg' | 'measuredSdDeg' | 'northSdDeg' | 'axis' | 'ends' | 'survey' | 'lengthM'
+  | 'measuredDeg'
+  | 'measuredSdDeg'
+  | 'northSdDeg'
+  | 'northOf'
+  | 'axis'
+  | 'ends'
+  | 'bearingDeg'
+  | 'survey'
+  | 'lengthM'
 >
 
 /** What all lines of a claim have alike. */
@@ -77,8 +87,10 @@ function onMeridian(
     measuredDeg: value,
     measuredSdDeg,
     northSdDeg: 0,
+    northOf: null,
     axis: null,
     ends: null,
+    bearingDeg: null,
     survey: [],
     lengthM: null,
     horizonDeg: value,
@@ -113,8 +125,10 @@ function betweenPoints(claim: Claim, direction: Extract<Direction, { by: 'points
     measuredDeg: wrap360(line.azimuthDeg + turnByParts(ends, line.lengthM)),
     measuredSdDeg: line.sdDeg,
     northSdDeg: line.northSdDeg,
-    axis: [direction.from, direction.to].sort().join('\n'),
+    northOf: line.northOf,
+    axis: axisOf(direction.from, direction.to),
     ends,
+    bearingDeg: line.bearingDeg,
     survey: line.steps,
     lengthM: line.lengthM,
   }
@@ -132,8 +146,8 @@ function betweenSolstices(
   const angle = span.by === 'angle' ? statedAngle(span.angleDeg) : surveyedSpan(claim, span)
   const side = (solstice: 'june' | 'december') => {
     const own = { body: 'sun' as const, event: { name: `${solstice} solstice` as const }, at, disc }
-    const azimuthDeg = span.by === 'points' ? azimuthOf(claim, span.from, span[solstice]) : null
-    return sideOfSpan(claim, name, horizons[solstice], azimuthDeg, own)
+    const leg = span.by === 'points' ? legOf(claim, span.from, span[solstice]) : NO_LEG
+    return sideOfSpan(claim, name, horizons[solstice], leg, own)
   }
   const pair = { june: side('june'), december: side('december') }
   const horizonDeg = (pair.june.horizonDeg + pair.december.horizonDeg) / 2
@@ -145,13 +159,15 @@ function betweenSolstices(
     measuredDeg: angle.angleDeg,
     measuredSdDeg: angle.sdDeg,
     northSdDeg: 0,
+    northOf: null,
     axis: span.by === 'points' ? [span.from, span.june, span.december].join('\n') : null,
     ends: null,
+    bearingDeg: null,
     survey: [],
     lengthM: null,
     horizonDeg,
     horizonSdDeg: Math.hypot(pair.june.horizonSdDeg, pair.december.horizonSdDeg) / 2,
-    horizon: pair.june.horizon,
+    horizon: { from: 'altitude', words: 'one for each of its lines', distanceM: null, nodes: null },
   }
 }
 
@@ -159,24 +175,38 @@ function statedAngle({ value, sd }: { value: number; sd: number | Unstated }) {
   return { angleDeg: value, sdDeg: statedOr(sd, DEFAULTS.azimuthSdDeg) }
 }
 
-/** A skyline profile is read by direction, which only points give. */
-function azimuthOf(claim: Claim, from: string, to: string): number {
-  return surveyedLine(claim, from, to).azimuthDeg
+/** One line of an angle. A skyline profile is read by its direction, which only points give. */
+interface Leg {
+  axis: string | null
+  azimuthDeg: number | null
+}
+
+const NO_LEG: Leg = { axis: null, azimuthDeg: null }
+
+function legOf(claim: Claim, from: string, to: string): Leg {
+  return { axis: axisOf(from, to), azimuthDeg: surveyedLine(claim, from, to).azimuthDeg }
+}
+
+/** Names two points, whichever way round. */
+function axisOf(from: string, to: string): string {
+  return [from, to].sort().join('\n')
 }
 
 function sideOfSpan(
   claim: Claim,
   name: string,
   horizon: Horizon | Unstated,
-  azimuthDeg: number | null,
+  { axis, azimuthDeg }: Leg,
   target: SettledTarget,
 ): SightlineInputs {
   const line = {
     measuredDeg: azimuthDeg ?? 0,
     measuredSdDeg: 0,
     northSdDeg: 0,
-    axis: null,
+    northOf: null,
+    axis,
     ends: null,
+    bearingDeg: null,
     survey: [],
     lengthM: null,
   }

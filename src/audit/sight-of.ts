@@ -12,6 +12,7 @@ export function sightOf(inputs: SightlineInputs): Sight {
     axis: inputs.axis,
     measuredSdDeg: inputs.measuredSdDeg,
     northSdDeg: inputs.northSdDeg,
+    northOf: inputs.northOf,
     toleranceScale: inputs.measures === 'angle' ? Math.SQRT2 : 1,
     branches: targetModel(inputs).branches,
   }

@@ -16,10 +16,14 @@ export interface SightlineInputs {
   measuredDeg: number
   measuredSdDeg: number
   northSdDeg: number
+  /** Which north that is; null where the direction is true by itself. */
+  northOf: Sight['northOf']
   /** Names its points, whichever way round; null where it is no line between points. */
   axis: string | null
   /** What is sighted at its two ends; null likewise, and for an angle. */
   ends: Ends | null
+  /** Of the line of the middles by the survey's own north, degrees; null where that is true, and for a bare direction. */
+  bearingDeg: number | null
   /** How its direction follows from the survey, in sentences. */
   survey: readonly string[]
   /** Horizontal length, metres; null where the line is no line between points. */

@@ -1,6 +1,6 @@
 import type { Claim, EllipsoidName, Sightline } from '../claim/claim.ts'
 import { nearestOffset } from '../inference/comparison.ts'
-import { DEG, wrap360 } from '../quantity/degrees.ts'
+import { DEG, wrap180, wrap360 } from '../quantity/degrees.ts'
 import { formatArcmin } from '../quantity/format-angle.ts'
 import { formatYearRange } from '../quantity/format-year.ts'
 import { listed, listedShort } from '../quantity/listed.ts'
@@ -11,6 +11,8 @@ import { ORBIT_SPAN } from '../sky/orbit.ts'
 import type { DatedLabel, Implied, Sweep } from './audit.ts'
 import { middle } from './dated-label.ts'
 import { DEFAULTS } from './defaults.ts'
+import { isUnsteady } from './is-unsteady.ts'
+import { jointLines } from './joint-lines.ts'
 import { refractionAtHorizon } from './refraction-at.ts'
 import type { SettledClaim } from './settle-claim.ts'
 import { sightOf } from './sight-of.ts'
@@ -30,23 +32,37 @@ export function listWarnings(
     ...readingWarnings,
     ...(isOfSun(lines) ? beyondOrbit(dates.asserted) : []),
     ...beyondFormula(claim, dates.asserted),
+    ...bearingTaken(claim, lines[0]!),
     ...claim.sightlines.flatMap((sightline, i) => mixedDatums(claim, sightline, lines[i]!)),
     ...lines.flatMap(refractionParts),
     ...new Set(lines.flatMap((line) => targetModel(line).warnings)),
     ...lines.flatMap((line) => [
       ...impossibleHorizon(claim, line),
+      ...hopeless(line),
       ...nearMeridian(line, dates),
       ...beyondProfile(line, dates),
       ...reversed(line, dates),
     ]),
     ...(isOfSun(lines) ? datesBeyondOrbit(implied) : []),
     ...unreached(sweep),
+    ...leftOut(lines),
     ...(lines.length > 1 ? [SEVERAL] : []),
   ]
 }
 
 const SEVERAL =
   'Several lines are read together: they share the errors of north and of the obliquity, and lines between the same two points their build error; otherwise each is taken to have been built and surveyed with errors of its own, also where two lines share one end.'
+
+/** An angle of lines that are read by themselves too. */
+function leftOut(lines: readonly SightlineInputs[]): string[] {
+  const joint = jointLines(lines)
+  return lines
+    .filter((line) => !joint.includes(line))
+    .map(
+      ({ name }) =>
+        `Line ${name} is an angle of which a line stands in the claim already: it is told of by itself, and left out where lines are read together, so that nothing counts twice.`,
+    )
+}
 
 function beyondOrbit({ printed, from, to }: DatedLabel) {
   if (ORBIT_SPAN.from <= from && to <= ORBIT_SPAN.to) return []
@@ -63,6 +79,18 @@ function beyondFormula({ formula }: Claim, { printed, from, to }: DatedLabel) {
   if (range.from <= from && to <= range.to) return []
   return [
     `The claim’s formula, ${label}, is used for ${printed}, outside ${formatYearRange(range.from, range.to)} (${range.basis}).`,
+  ]
+}
+
+/** A printed azimuth that is no azimuth but the bearing by the plan's or the grid's own north. */
+function bearingTaken({ claimed }: Claim, { bearingDeg, measuredDeg }: SightlineInputs): string[] {
+  const { azimuthDeg: printed } = claimed
+  if (printed === null || bearingDeg === null) return []
+  const from = (deg: number) => Math.abs(wrap180(printed.value - deg))
+  if (from(bearingDeg) > 2 * printed.half || from(measuredDeg) <= 2 * printed.half) return []
+  const turn = formatArcmin(Math.abs(wrap180(measuredDeg - bearingDeg)) * 60)
+  return [
+    `The azimuth that the source prints, ${printed.text}, is the line’s bearing by the survey’s own north, ${turn} off true north: it seems not to have been turned.`,
   ]
 }
 
@@ -109,31 +137,46 @@ function impossibleHorizon({ structure }: Claim, { name, measures, horizonDeg }:
 /** Room for land below sea level. */
 const LOWEST_LAND_M = 450
 
+/** A direction known to no better than this tells nothing, and the formulas for small errors no longer hold. */
+const HOPELESS_DEG = 15
+
+function hopeless({ name, measuredSdDeg, northSdDeg }: SightlineInputs): string[] {
+  const sd = Math.hypot(measuredSdDeg, northSdDeg)
+  if (sd <= HOPELESS_DEG) return []
+  const size = sd > 180 ? 'any angle at all' : `± ${Math.round(sd)}°`
+  return [
+    `Line ${name}: by the uncertainties stated its direction is known to ${size}; it tells nothing. Is a unit wrong?`,
+  ]
+}
+
 /** Where direction turns too fast with altitude for a straight sum of errors. */
 function nearMeridian(line: SightlineInputs, { asserted }: SettledClaim['dates']) {
-  const { pair } = line
-  if (pair !== null && [pair.june, pair.december].some((side) => isCurved(side, middle(asserted)))) {
+  if (!isUnsteady(line, middle(asserted))) return []
+  if (line.pair !== null) {
     return [
       `Line ${line.name}: one of its two solstices is met close to the meridian or over a broken skyline, where direction does not answer errors in proportion. The weights of an angle take it as if it did; they are not to be trusted here.`,
     ]
   }
-  if (!isCurved(line, middle(asserted))) return []
   if (line.horizon.nodes !== null) {
     return [
       `Line ${line.name} meets its target where the skyline is broken: a small error of altitude or a few centuries take the gleam from one summit or notch to the next. The weights are integrated over the errors there; single dates and the budget are not to be trusted.`,
     ]
   }
   return [
-    `Line ${line.name} meets its target close to the meridian, where a small error of altitude turns the direction far: its dates are ill-conditioned. The weights are integrated over the altitude there; single dates and the budget are not to be trusted.`,
+    `Line ${line.name} meets its target close to the meridian, where a small error of altitude turns the direction far: its dates hang on that error. The weights are integrated over the altitude there; single dates and the budget are not to be trusted.`,
   ]
 }
 
-function isCurved(line: SightlineInputs, year: number): boolean {
-  return targetModel(line).branches.some((branch) => (branch.curve?.(year) ?? []).length > 0)
-}
-
 /** Where the skyline to the target's side is not known any more. */
-function beyondProfile(line: SightlineInputs, { asserted, others }: SettledClaim['dates']): string[] {
+function beyondProfile(line: SightlineInputs, dates: SettledClaim['dates']): string[] {
+  const { pair } = line
+  if (pair !== null) {
+    return [
+      ...beyondProfile({ ...pair.june, name: `${line.name} (June)` }, dates),
+      ...beyondProfile({ ...pair.december, name: `${line.name} (December)` }, dates),
+    ]
+  }
+  const { asserted, others } = dates
   const { nodes } = line.horizon
   if (nodes === null) return []
   const [first, width] = [

@@ -25,12 +25,13 @@ function factsOf(text: string): SummaryFacts {
   const limits = auditLimits(ground, dates, yardstick.marker)
   const sightlines = lines.map((line) => auditSightline(line, asserted, null, null))
   const plausibleArcmin = [plausible.low_arcmin, plausible.high_arcmin]
-  const { outcome, misfits } = verdictOf({ sights, dates, ground, limits, plausibleArcmin })
+  const { outcome, misfits } = verdictOf({ sights, joint: sights, dates, ground, limits, plausibleArcmin })
   return {
     ...{ outcome, asserted, other_dates: others, plausible, window, sightlines, sweep, limits, misfits },
-    implied: lines.map((line) => auditImplied(line, 'vondrak2011', window, 2026)),
+    implied: lines.map((line) => auditImplied(line, 'vondrak2011', window, 2026, 2026)),
     atOffset: misfits.length === 0 ? null : sweepStep(ground, dates, yardstick, 90),
     taken: lines.map((line, i) => takenAs(claim.sightlines[i]!, line, asserted)),
+    isUnsteady: false,
     northTaken: text.includes('points:'),
   }
 }

@@ -321,7 +321,7 @@ function lookedAt(text: string) {
   return {
     line,
     sightline: auditSightline(line, dates.asserted, null, null),
-    years: auditImplied(line, 'vondrak2011', dates.window, 2026).dates.map(({ year }) => year),
+    years: auditImplied(line, 'vondrak2011', dates.window, 2026, 2026).dates.map(({ year }) => year),
   }
 }
 
@@ -431,7 +431,9 @@ describe('a star by the rule of as many degrees as magnitudes', () => {
     const { claim } = readClaim(claimOf(row, azimuth, year), { findStar })
     const { lines, dates } = settleClaim(claim!)
     const readings = auditAlternatives(lines[0]!, dates.window, year)
-    const byRule = readings.find(({ value }) => value === 'as many degrees up as it has magnitudes')!
+    const byRule = readings.find(
+      ({ value }) => value === 'as many degrees up as it has magnitudes, at least 1°',
+    )!
     expect(byRule.is_claims).toBe(false)
     // 0.4″ at some 20″ a year.
     expectWithin(byRule.nearest_year!, year, 0.1, 'years')
@@ -524,7 +526,7 @@ describe('a target outside the sky', () => {
     })
     expect(audit.sightlines[0]).toMatchObject({ direction_at_asserted_deg: null, drift: null })
     // Where there is no target, nothing is said of how it meets the line.
-    expect(audit.warnings.join()).not.toMatch(/ill-conditioned/)
+    expect(audit.warnings.join()).not.toMatch(/close to the meridian/)
   })
 
   test('below the horizon on the meridian the nearest approach is in the year that it was highest', () => {
@@ -616,6 +618,7 @@ describe('Kochab and Mizar over the pole', () => {
       { ...settleClaim(claimFor('0°')).lines[0]! },
       'vondrak2011',
       { from: -2999, to: -1999 },
+      2026,
       2026,
     )
     const years = north.dates.filter((date) => date.in_window).map(({ year }) => year)

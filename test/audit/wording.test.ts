@@ -24,8 +24,8 @@ describe('a set of dates', () => {
     setInWords({ sets95, open_low, open_high }, WINDOW)
 
   test('says where the window cuts it', () => {
-    expect(set([[-2999, -499]], true)).toBe('any up to 500 BCE')
-    expect(set([[500, 1000]], false, true)).toBe('any from 500 CE on')
+    expect(set([[-2999, -499]], true)).toBe('any date up to 500 BCE')
+    expect(set([[500, 1000]], false, true)).toBe('any date from 500 CE on')
     expect(set([[-2999, 1000]], true, true)).toBe('any date of the window, 3000 BCE to 1000 CE')
     expect(set([[-1999, -999]])).toBe('2000 to 1000 BCE')
     expect(set([])).toBe('none')

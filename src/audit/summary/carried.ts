@@ -5,7 +5,7 @@ import { leadsUpTo, rivalLimits } from '../outcome.ts'
 import { plausibleWords, setInWords } from '../phrases.ts'
 import { grammarOf } from './grammar.ts'
 import { againstWords, stepAt, threeMeasures } from './parts.ts'
-import type { SummaryFacts } from './summary-facts.ts'
+import { NOT_DECIDED, type SummaryFacts } from './summary-facts.ts'
 
 /** The asserted date leads over the whole plausible range. */
 export function carried(facts: SummaryFacts): string {
@@ -21,7 +21,10 @@ export function carried(facts: SummaryFacts): string {
     )} by 3 to 1 or more.`,
     ...until(facts),
     `At ${formatArcmin(plausible.high_arcmin)} the dates allowed (95 %) are ${setInWords(at, window)}.`,
-    'So what is stated of the builders’ exactness carries the claim this far; the audit takes that statement as given and does not test it.',
+    plausible.stated
+      ? 'So what is stated of the builders’ exactness carries the claim this far; the audit does not test that statement.'
+      : 'So the claim stands as far as builders kept within these tolerances, which nobody has stated of them.',
+    NOT_DECIDED,
     ...(isNarrow ? [] : ['It does not narrow the date to the years asserted.']),
   ].join(' ')
 }

@@ -15,7 +15,7 @@ function lead(facts: SummaryFacts): string {
   const other = againstWords(facts, tightest)
   const limit = tightest.ratio_3_arcmin
   if (limit === null) {
-    return `At no build tolerance, not even none, ${does} ${lines} favour ${asserted.printed} over ${other} by 3 to 1.`
+    return `At no build tolerance, not even built exactly, ${does} ${lines} favour ${asserted.printed} over ${other} by 3 to 1.`
   }
   const opening = `How exactly ${it} ${was} built decides the rest:`
   if (tightest.ratio_3_steady === false) {

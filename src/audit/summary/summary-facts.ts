@@ -14,6 +14,8 @@ export interface SummaryFacts
   atOffset: SweepStep | null
   /** What was filled in for each line and decides whether it fits. */
   taken: readonly (readonly TakenAs[])[]
+  /** Whether direction does not answer errors in proportion at the asserted date: close to the meridian, over crags. */
+  isUnsteady: boolean
   /** Whether a plan without a word on its north was taken as true. */
   northTaken: boolean
 }

@@ -12,6 +12,14 @@ import type { SummaryFacts } from './summary-facts.ts'
  * conclusion changes, and never which tolerance the builders had.
  */
 export function writeSummary(facts: SummaryFacts): string[] {
+  const paragraphs = paragraphsOf(facts)
+  return facts.isUnsteady ? fitting([[...paragraphs, UNSTEADY], paragraphs]) : paragraphs
+}
+
+const UNSTEADY =
+  'Here a small error of altitude turns the direction far: single dates are not to be trusted, as the warnings say.'
+
+function paragraphsOf(facts: SummaryFacts): string[] {
   switch (facts.outcome) {
     case 'premise':
       return marked(facts, premise(facts))

@@ -1,6 +1,6 @@
 import type { CalendarDate, Claim, North } from '../../claim/claim.ts'
 import { wrap180 } from '../../quantity/degrees.ts'
-import { formatArcmin, formatDegrees } from '../../quantity/format-angle.ts'
+import { formatDegrees } from '../../quantity/format-angle.ts'
 import { isUnstated } from '../../quantity/unstated.ts'
 import { gridConvergenceDeg } from '../../site/grid-convergence.ts'
 import { type MagneticDeclination, magneticDeclination } from '../../site/magnetic-declination.ts'
@@ -52,7 +52,7 @@ const FOUND: Readonly<Record<North['from'], string>> = {
 }
 
 /** Usual standard deviation of north found so, degrees, where the claim states none. */
-export function usualSdDeg({ from, baselineM, accuracyM }: North): number {
+function usualSdDeg({ from, baselineM, accuracyM }: North): number {
   if (from !== 'gps' || (baselineM === null && accuracyM === null)) return NORTH_SD_DEG[from]
   return gpsNorthSdDeg(accuracyM ?? DEFAULTS.gpsAccuracyM, baselineM ?? DEFAULTS.gpsBaselineM)
 }
@@ -114,9 +114,4 @@ function stated(deg: number, sd: number | 'omitted' | 'unknown'): Turn {
 export function eastOrWest(deg: number): string {
   const side = wrap180(deg) < 0 ? 'west' : 'east'
   return `${formatDegrees(Math.abs(deg))} ${side}`
-}
-
-/** `± 30′`, or nothing where north is without error. */
-export function northSdWords(sdDeg: number): string {
-  return sdDeg === 0 ? 'without error' : `± ${formatArcmin(sdDeg * 60)}`
 }

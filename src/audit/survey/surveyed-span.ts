@@ -1,9 +1,8 @@
 import type { Claim, Point } from '../../claim/claim.ts'
-import { DEG } from '../../quantity/degrees.ts'
-import { geodesicLine } from '../../site/geodesic-line.ts'
 import type { SurveyedPoint } from '../../site/line-direction.ts'
 import { spanAngle } from '../../site/span-angle.ts'
-import { placeOfPoint, pointNamed, pointSdM } from './place-of-point.ts'
+import { metresOnEarth } from './line-on-earth.ts'
+import { pointNamed, pointSdM } from './place-of-point.ts'
 
 /** The angle at one point between two others, degrees, with its standard deviation; no north has a part in it. */
 export function surveyedSpan(
@@ -24,10 +23,8 @@ function about(claim: Claim, vertex: Point, point: Point): SurveyedPoint {
     return { eastM: point.eastM - vertex.eastM, northM: point.northM - vertex.northM, sdM }
   }
   if (point === vertex) return { eastM: 0, northM: 0, sdM }
-  const [from, to] = [placeOfPoint(claim, vertex), placeOfPoint(claim, point)]
-  if (from === null || to === null) return onGrid(vertex, point, sdM)
-  const { azimuthDeg, lengthM } = geodesicLine(from, to)
-  return { eastM: lengthM * Math.sin(azimuthDeg * DEG), northM: lengthM * Math.cos(azimuthDeg * DEG), sdM }
+  const metres = metresOnEarth(claim, vertex, point)
+  return metres === null ? onGrid(vertex, point, sdM) : { ...metres, sdM }
 }
 
 /** On a grid of which only the convergence is known. */

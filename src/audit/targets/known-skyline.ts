@@ -117,7 +117,8 @@ function carriedOn(nodes: readonly SkylineNode[], by: number): SkylineNode[] {
   const [first, last] = [nodes[0]!, nodes.at(-1)!]
   const width = wrap360(last.azimuthDeg - first.azimuthDeg) || 360
   const room = Math.min(by, (WHOLE_TURN_DEG - width) / 2)
-  if (room <= STEP_DEG) return [...nodes]
+  // A profile of nearly the whole horizon goes round to its first node.
+  if (room <= STEP_DEG) return width === 360 ? [...nodes] : [...nodes, first]
   const away = (node: SkylineNode, turnDeg: number): SkylineNode => ({
     azimuthDeg: wrap360(node.azimuthDeg + turnDeg),
     altitudeDeg: node.altitudeDeg,
@@ -139,6 +140,9 @@ function heldAbove(nodes: readonly SkylineNode[], floor: { deg: number; sdDeg: n
     const [a, b] = [node.altitudeDeg - floor.deg, next.altitudeDeg - floor.deg]
     if (a * b >= 0) return [held(node)]
     const azimuthDeg = wrap360(node.azimuthDeg + (a / (a - b)) * wrap360(next.azimuthDeg - node.azimuthDeg))
+    // A node that stands on the floor but for rounding is the place where the skyline passes it.
+    if (azimuthDeg === wrap360(node.azimuthDeg) || azimuthDeg === wrap360(next.azimuthDeg))
+      return [held(node)]
     return [held(node), { azimuthDeg, altitudeDeg: floor.deg, sdDeg: floor.sdDeg }]
   })
 }

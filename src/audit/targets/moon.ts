@@ -54,9 +54,11 @@ export function moonTarget(
     seenAt: null,
     semidiameter,
     models: SUN_MODELS,
-    notes: () => [
-      `A standstill comes back every ${STANDSTILL_CYCLE_YEARS} years; for a year or so about it the Moon gets as far once in each month, and within that swings by 9′ to either side every 173 days. In most years no moonrise or moonset stands there.`,
-    ],
+    notes: () => [standstill.size === 'major' ? MAJOR_NOTE : MINOR_NOTE],
     warnings: [],
   }
 }
+
+const MAJOR_NOTE = `A standstill comes back every ${STANDSTILL_CYCLE_YEARS} years; for a year or so about it the Moon gets as far once in each month, and within that swings by 9′ to either side every 173 days. In most years no moonrise or moonset stands there.`
+
+const MINOR_NOTE = `A standstill comes back every ${STANDSTILL_CYCLE_YEARS} years; for a year or so about it the Moon turns there once in each month, and within that swings by 9′ to either side every 173 days. In all other years it passes there twice a month on its way further, so that a moonrise or moonset there is no sign of a standstill by itself.`

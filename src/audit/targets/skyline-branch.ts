@@ -2,6 +2,7 @@ import type { Uncertain } from '../../inference/horizon-branch.ts'
 import { rememberLast } from '../../inference/remember-last.ts'
 import type { Branch, CurvePiece, Prediction } from '../../inference/sight.ts'
 import { DEG, wrap180, wrap360 } from '../../quantity/degrees.ts'
+import { declinationPerAltitude } from '../../site/horizontal.ts'
 import { refractionScatterArcmin } from '../../site/refraction-scatter.ts'
 import { skylineAltitude } from '../../site/skyline.ts'
 import type { SkylineCrossing } from '../../site/skyline-crossing.ts'
@@ -70,7 +71,11 @@ function stateOf(
   const size = target.aboveCentreArcmin(year)
   const crossing = crossingAt(skyline, declination.deg, size)
   const altitudeErrors = errorsOfAltitude(inputs, skyline, target, year, crossing)
-  const perAltitude = crossing === null ? 1 : declinationPerAltitude(inputs, declination.deg, crossing)
+  // Where there is no crossing a degree of altitude counts as one of declination, which is its most.
+  const perAltitude =
+    crossing === null
+      ? 1
+      : declinationPerAltitude(declination.deg, crossing.centreAltitudeDeg, inputs.latitudeDeg)
   const sdDeg = Math.hypot(sdOf(declination.errors), perAltitude * sdOf(altitudeErrors))
   const step = Math.round(size / SIZE_STEP_ARCMIN) * SIZE_STEP_ARCMIN
   const table = skyline.crossings(step)
@@ -151,16 +156,6 @@ function errorsOfAltitude(
 
 /** Half the stretch of altitude over which the slope of refraction is taken, degrees. */
 const SLOPE_STEP_DEG = 0.05
-
-/** Declination for altitude at one azimuth, degrees per degree: the cosine of the angle at the body. */
-function declinationPerAltitude(
-  { latitudeDeg }: SightlineInputs,
-  declinationDeg: number,
-  { centreAltitudeDeg }: Crossing,
-): number {
-  const [phi, delta, h] = [latitudeDeg * DEG, declinationDeg * DEG, centreAltitudeDeg * DEG]
-  return (Math.sin(phi) - Math.sin(delta) * Math.sin(h)) / (Math.cos(delta) * Math.cos(h))
-}
 
 function sdOf(errors: Uncertain['errors']): number {
   return Math.hypot(...errors.map(({ sdDeg }) => sdDeg))

@@ -210,8 +210,9 @@ function dwellNotes(
   const crossing = horizonCrossing(hemisphere(event) * obliquity, altitude, inputs.latitudeDeg, at)
   if (crossing === null) return []
   const days = solsticeDwellDays(year, event, obliquity, 1 / 60 / Math.abs(crossing.perDeclination))
+  const count = formatNumber(days, days < 9.5 ? 1 : 2)
   return [
-    `Around the solstice the Sun’s place on the horizon stays within 1′ of its extreme for ${formatNumber(days, days < 9.5 ? 1 : 2)} days.`,
+    `Around the solstice the Sun’s place on the horizon stays within 1′ of its extreme for ${count === '1' ? 'a day' : `${count} days`}.`,
   ]
 }
 

@@ -150,9 +150,9 @@ describe('a plan that is tied to the Earth', () => {
   })
 
   // A turn of the plan by its 6′ turns the line by so much less; over 400 m at 9 km it is straight to a part in a thousand.
-  test('has of the error of north what a turn of the plan does to the line', () => {
+  test('has of the error of north what a turn of the plan does to the line, with its sign', () => {
     const line = settledLine(TIED('{from: sun, uncertainty: 6′}'))
-    const turned = Math.abs(byHand(0.1).azimuthDeg - byHand(-0.1).azimuthDeg) / 2
+    const turned = (byHand(0.1).azimuthDeg - byHand(-0.1).azimuthDeg) / 2
     expectWithin(line.northSdDeg / turned, 1, 2e-3, 'of the deviation')
   })
 
@@ -166,7 +166,7 @@ describe('a plan that is tied to the Earth', () => {
       geodesicDestination(TIE, (Math.atan2(120, 350) * 180) / Math.PI + turn, Math.hypot(120, 350))
     const want = (turn: number) => geodesicLine(PEAK, stone(turn)).azimuthDeg
     expectWithin((line.measuredDeg - want(0)) * 3600, 0, 1e-4, 'arcsec')
-    expectWithin(line.northSdDeg / (Math.abs(want(0.1) - want(-0.1)) / 2), 1, 2e-3, 'of the deviation')
+    expectWithin(line.northSdDeg / ((want(0.1) - want(-0.1)) / 2), 1, 2e-3, 'of the deviation')
   })
 
   test('draws the peak where it stands from the stone', () => {
