@@ -4,6 +4,7 @@ import { ELLIPSOID_NAMES } from './read/read-ellipsoid.ts'
 import { MODEL_NAMES } from './read/read-formula.ts'
 import { MOON_MOMENTS, STANDSTILLS } from './read/read-moon-target.ts'
 import { NORTH_WAYS } from './read/read-north.ts'
+import { PROJECTION } from './read/read-projection.ts'
 import { SIGHTED_WORDS } from './read/read-sighted.ts'
 import { SPAN_MOMENTS } from './read/read-span-target.ts'
 import { PAIR_EVENT } from './read/read-star-pair-target.ts'
@@ -121,19 +122,35 @@ const target: Schema = {
   ],
 }
 
-const point = mapping('A point: on the plan, in latitude and longitude, or on the grid.', {
-  east: quantity('Metres east of the plan’s origin.', '84.65 m'),
-  north: quantity('Metres north of the plan’s origin.', '53.09 m'),
-  up: quantity('Height above the plan’s origin.', '0.4 m'),
-  latitude: quantity('On WGS 84; beside east and north it ties the plan to the Earth.', '41°20′03.6″ N'),
-  longitude: quantity('On WGS 84, beside latitude.', '23°15′12.4″ E'),
-  easting: quantity('On the projected grid.', '273741.297 m'),
-  northing: quantity('On the projected grid.', '5796489.777 m'),
-  elevation: quantity('Height above sea level of a point that is not on the plan.', '1420 m'),
-  uncertainty: quantity('One standard deviation in each of two directions.', '5 cm', 'unknown'),
-  width: quantity('Width across the line of what stands there.', '60 cm'),
-  form: word('Whether what has a width is a post or a gap between two.', POINT_FORMS),
+/** Of the ways to write a mapping, each by the keys it cannot do without, exactly one. */
+const oneOf = (...ways: readonly (readonly string[])[]): Schema => ({
+  oneOf: ways.map((required) => ({ required })),
 })
+
+/** The same, of ways that may stand beside each other. */
+const anyOf = (...ways: readonly (readonly string[])[]): Schema => ({
+  anyOf: ways.map((required) => ({ required })),
+})
+
+const point: Schema = {
+  ...mapping('A point: on the plan, in latitude and longitude, or on the grid.', {
+    east: quantity('Metres east of the plan’s origin.', '84.65 m'),
+    north: quantity('Metres north of the plan’s origin.', '53.09 m'),
+    up: quantity('Height above the plan’s origin.', '0.4 m'),
+    latitude: quantity('On WGS 84; beside east and north it ties the plan to the Earth.', '41°20′03.6″ N'),
+    longitude: quantity('On WGS 84, beside latitude.', '23°15′12.4″ E'),
+    easting: quantity('On the projected grid.', '273741.297 m'),
+    northing: quantity('On the projected grid.', '5796489.777 m'),
+    elevation: quantity('Height above sea level of a point that is not on the plan.', '1420 m'),
+    uncertainty: quantity('One standard deviation in each of two directions.', '5 cm', 'unknown'),
+    width: quantity('Width across the line of what stands there.', '60 cm'),
+    form: word('Whether what has a width is a post or a gap between two.', POINT_FORMS),
+  }),
+  ...anyOf(['east', 'north'], ['latitude', 'longitude'], ['easting', 'northing']),
+}
+
+/** A setting, or a point of its name. */
+const orPoint = (setting: Schema): Schema => ({ description: setting.description, anyOf: [setting, point] })
 
 const points: Schema = {
   description: 'The points of the survey, by name; or a table of them beside the claim file.',
@@ -142,8 +159,8 @@ const points: Schema = {
     {
       ...names('The points by name.', point),
       properties: {
-        file: text('A table beside the claim file, with more points.'),
-        uncertainty: quantity('Of all points that state none.', '5 cm', 'unknown'),
+        file: orPoint(text('A table beside the claim file, with more points.')),
+        uncertainty: orPoint(quantity('Of all points that state none.', '5 cm', 'unknown')),
       },
     },
   ],
@@ -173,28 +190,36 @@ const north: Schema = {
   ],
 }
 
-const grid = mapping('The projected grid: a zone, a projection, or its convergence alone.', {
-  zone: quantity('A zone of UTM, N or S of the equator.', 'UTM 55 S'),
-  central_meridian: quantity('Of a transverse Mercator projection.', '2° W'),
-  latitude_of_origin: quantity('Where northings count from.', '49° N'),
-  scale: { type: ['number', 'string'], description: 'On the central meridian.', examples: [0.9996012717] },
-  false_easting: quantity('Easting of the central meridian.', '400 km'),
-  false_northing: quantity('Northing of the latitude of origin.', '-100 km'),
-  ellipsoid: word('The figure of the Earth.', ELLIPSOID_NAMES),
-  convergence: quantity('By how much grid north lies off true north.', '1°35′ W ± 1′'),
-})
+const grid: Schema = {
+  ...mapping('The projected grid: a zone, a projection, or its convergence alone.', {
+    zone: quantity('A zone of UTM, N or S of the equator.', 'UTM 55 S'),
+    central_meridian: quantity('Of a transverse Mercator projection.', '2° W'),
+    latitude_of_origin: quantity('Where northings count from.', '49° N'),
+    scale: { type: ['number', 'string'], description: 'On the central meridian.', examples: [0.9996012717] },
+    false_easting: quantity('Easting of the central meridian.', '400 km'),
+    false_northing: quantity('Northing of the latitude of origin.', '-100 km'),
+    ellipsoid: word('The figure of the Earth.', ELLIPSOID_NAMES),
+    convergence: quantity('By how much grid north lies off true north.', '1°35′ W ± 1′'),
+  }),
+  ...oneOf(['zone'], PROJECTION, ['convergence']),
+}
 
 const horizon = (description: string): Schema => ({
   description,
   anyOf: [
     quantity('Its apparent altitude.', '1°30′ ± 2′', 'unknown'),
-    mapping('What its altitude follows from.', {
-      distance: quantity('How far it is.', '8 km ± 100 m'),
-      rise: quantity('How much it stands above the eye.', '120 m ± 5 m'),
-      point: text('A point with a height that is the horizon.'),
-      sea: quantity('The open sea, by the height of the eye above it.', '25 m'),
-      profile: text('A table of azimuth and altitude beside the claim file.'),
-    }),
+    {
+      ...mapping('What its altitude follows from.', {
+        distance: quantity('How far it is.', '8 km ± 100 m'),
+        rise: quantity('How much it stands above the eye.', '120 m ± 5 m'),
+        point: text('A point with a height that is the horizon.'),
+        sea: quantity('The open sea, by the height of the eye above it.', '25 m'),
+        profile: text(
+          'A table of azimuth and altitude beside the claim file; not for a span given by its angle.',
+        ),
+      }),
+      ...oneOf(['distance', 'rise'], ['point'], ['sea'], ['profile']),
+    },
   ],
 })
 
@@ -203,10 +228,16 @@ const span = mapping('The span between both solstices: an angle, or three points
   from: text('The point one stands at.'),
   june: text('The point one looks at for the june solstice.'),
   december: text('The point one looks at for the december solstice.'),
-  horizons: mapping('The horizon at either end; or unknown.', {
-    june: horizon('Towards the june solstice.'),
-    december: horizon('Towards the december solstice.'),
-  }),
+  horizons: {
+    description: 'The horizon at either end; or unknown.',
+    anyOf: [
+      { const: 'unknown' },
+      mapping('The horizon at either end.', {
+        june: horizon('Towards the june solstice.'),
+        december: horizon('Towards the december solstice.'),
+      }),
+    ],
+  },
 })
 
 const sighted: Schema = {

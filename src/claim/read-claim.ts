@@ -2,6 +2,7 @@ import { isMap, type Node } from 'yaml'
 import type { Problem } from '../quantity/problem.ts'
 import type { Claim } from './claim.ts'
 import { KEYS } from './keys.ts'
+import { checkFarGrid } from './read/check-far-grid.ts'
 import { checkPoints } from './read/check-points.ts'
 import { echoNode } from './read/echo.ts'
 import { type Context, type Field, isEmpty, peek, reportError } from './read/field.ts'
@@ -20,7 +21,7 @@ import { readSightlines } from './read/read-sightlines.ts'
 import { readStructure } from './read/read-structure.ts'
 import { readTarget } from './read/read-target.ts'
 import { readNotes, readText } from './read/read-text.ts'
-import { warnFarGrid } from './read/warn-far-grid.ts'
+import { restsOnGrid } from './read/rests-on-grid.ts'
 import { warnUnusedGrid, warnUnusedNorth } from './read/warn-unused.ts'
 import type { ReadingHelp } from './reading-help.ts'
 
@@ -35,7 +36,6 @@ type FileFields = Fields<keyof typeof KEYS.file>
  */
 export function readClaim(text: string, help: ReadingHelp): { claim: Claim | null; problems: Problem[] } {
   const yaml = parseYaml(text)
-  const problems = [...yaml.problems]
   const content: Problem[] = []
   const context: Context = {
     text,
@@ -48,13 +48,16 @@ export function readClaim(text: string, help: ReadingHelp): { claim: Claim | nul
     lineOf: yaml.lineOf,
     report: (problem) => content.push(problem),
   }
-  const claim = readRoot(yaml.root, help, context, problems.length > 0)
+  const claim = readRoot(yaml.root, help, context, yaml.problems.length > 0)
   // Behind a break of syntax keys may have been taken for others, and some for missing.
   const isSound = (problem: Problem) => problem.code !== 'missing-key' && placeOf(problem) < yaml.soundUntil
   const told = content.filter(
     (problem) => OF_KEYS.has(problem.code) || !yaml.mendedLines.has(yaml.lineOf(placeOf(problem))),
   )
-  problems.push(...(yaml.soundUntil === Number.POSITIVE_INFINITY ? told : told.filter(isSound)))
+  const problems = [
+    ...yaml.problems,
+    ...(yaml.soundUntil === Number.POSITIVE_INFINITY ? told : told.filter(isSound)),
+  ]
   const isUsable = problems.every(({ severity }) => severity === 'warning')
   const inside = problems.map((problem) => clipped(problem, problem.beside?.text ?? text)).sort(inOrder)
   return { claim: isUsable ? claim : null, problems: limitProblems(inside) }
@@ -143,13 +146,20 @@ function readSurvey(
   const points = readPoints(fields.get('points'), fields.has('points'), context)
   const hasGrid = fields.has('grid')
   checkPoints(points, { grid, hasGrid, structure })
-  warnFarGrid(fields.get('grid'), grid, structure, context)
-  const shared = readTarget(fields.get('target'), context)
-  const around = { points, grid, hasGrid, shared, hasShared: fields.has('target') }
-  const sightlines = readSightlines(fields.get('sightlines'), around, context)
   const place = fields.get('structure')
   const hasLongitude = place === undefined || structure === null || peek(place, 'longitude') !== null
-  const north = readNorth(fields.get('north'), { hasGrid, hasLongitude, magneticDates }, context)
+  const north = readNorth(fields.get('north'), { grid, hasGrid, hasLongitude, magneticDates }, context)
+  const isNeeded = restsOnGrid(north) || [...points.byName.values()].some(({ kind }) => kind === 'grid')
+  const isInReach = checkFarGrid(fields.get('grid'), grid, { structure, isNeeded }, context)
+  const shared = readTarget(fields.get('target'), context)
+  const around = {
+    points,
+    grid: isInReach ? grid : null,
+    hasGrid,
+    shared,
+    hasShared: fields.has('target'),
+  }
+  const sightlines = readSightlines(fields.get('sightlines'), around, context)
   const lines = fields.get('sightlines')?.node
   // A line that could not be read may be the one that uses them.
   if (isMap(lines) && lines.items.length === sightlines.length) {

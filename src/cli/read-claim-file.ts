@@ -1,16 +1,23 @@
 import { createHash } from 'node:crypto'
-import { readFileSync, statSync } from 'node:fs'
+import { readFileSync, type Stats, statSync } from 'node:fs'
 import { readFile } from 'node:fs/promises'
 import { dirname, join } from 'node:path'
 import { MAGNETIC_DATES } from '../audit/magnetic-dates.ts'
 import { findStar } from '../audit/star-names.ts'
 import type { Claim } from '../claim/claim.ts'
 import { formatProblem, positionOf } from '../claim/format-problem.ts'
+import { LONGEST_TABLE } from '../claim/longest-table.ts'
 import { readClaim } from '../claim/read-claim.ts'
 import type { BesideReader } from '../claim/reading-help.ts'
 import type { Problem } from '../quantity/problem.ts'
 import { type Console, EXIT } from './console.ts'
-import { fileTrouble, meaningOf } from './file-trouble.ts'
+import { fileTrouble, meaningOf, troubleLine } from './file-trouble.ts'
+
+/** No longer text is read: a character has up to three bytes of UTF-8, or four and counts as two; a byte order mark has three. */
+const MOST_BYTES = 3 * (LONGEST_TABLE + 1)
+
+/** A claim file has a hundred thousand characters at most, which is told at its place where it is not much longer. */
+const MOST_CLAIM_BYTES = 20_000_000
 
 export interface ClaimFile {
   claim: Claim
@@ -22,6 +29,11 @@ export interface ClaimFile {
 export async function readClaimFile(path: string, console: Console): Promise<ClaimFile | { status: number }> {
   let bytes: Buffer
   try {
+    const trouble = troubleOf(statSync(path), MOST_CLAIM_BYTES, 'too long for a claim file')
+    if (trouble !== null) {
+      console.stderr.write(troubleLine('read', path, trouble))
+      return { status: EXIT.fileTrouble }
+    }
     bytes = await readFile(path)
   } catch (error) {
     console.stderr.write(fileTrouble(error, 'read', path))
@@ -44,15 +56,21 @@ function readerBeside(claimPath: string): BesideReader {
   return (path) => {
     const place = join(dirname(claimPath), path)
     try {
-      const found = statSync(place)
-      // A pipe or a device might be read without end; of a folder the system says so itself.
-      if (!found.isFile() && !found.isDirectory()) return { trouble: 'it is not a plain file' }
+      const tooLong = `and a table has at most ${LONGEST_TABLE} characters`
+      const trouble = troubleOf(statSync(place), MOST_BYTES, tooLong)
+      if (trouble !== null) return { trouble }
       const bytes = readFileSync(place)
       return { text: textOf(bytes), sha256: sha256Of(bytes) }
     } catch (error) {
       return { trouble: meaningOf(error) }
     }
   }
+}
+
+/** Why a file is not read at all, or null: a pipe or a device might be read without end; of a folder the system says so. */
+function troubleOf(found: Stats, mostBytes: number, tooLong: string): string | null {
+  if (!found.isFile()) return found.isDirectory() ? null : 'it is not a plain file'
+  return found.size > mostBytes ? `it is ${found.size} bytes long, ${tooLong}` : null
 }
 
 function textOf(bytes: Buffer): string {

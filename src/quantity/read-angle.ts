@@ -90,13 +90,14 @@ function signOf(match: RegExpExecArray, text: string, kind: AngleKind): Reading<
   if (letter === undefined) return { ok: true, value: sign === undefined || sign === '+' ? 1 : -1 }
   if ((lead !== undefined && trail !== undefined) || kind.letters?.includes(letter) !== true)
     return wrongHemisphere(letter, text, place, kind)
+  const letters = kind.letters.join(' or ')
   if (sign !== undefined)
     return misread(
       'sign-and-letter',
       `${quoted(text.trim())} has both a sign and a letter`,
       trimmedStretch(text),
       {
-        expected: `either a sign or ${kind.letters.join(' or ')}`,
+        expected: kind.needsLetter === true ? `${letters} without a sign` : `either a sign or ${letters}`,
       },
     )
   return { ok: true, value: letter === kind.letters[0] ? 1 : -1 }

@@ -24,21 +24,35 @@ export function readUnit(text: string, kind: UnitKind): Reading<number> {
       expected,
       suggestion: withUsualUnit(sign, digits, kind),
     })
-  const toBase = kind.units.get(unit.toLowerCase().replace(/\s*\/\s*/, '/'))
-  if (toBase === undefined)
-    return misread('not-readable', `${shown} is not ${kind.name}`, whole, { expected })
-  const value = toBase((sign === '' || sign === '+' ? 1 : -1) * Number(digits))
-  if (value >= kind.low && value <= kind.high) return { ok: true, value: value === 0 ? 0 : value }
+  const value = inBase(sign, digits, unit.replace(/\s*\/\s*/, '/'), kind)
+  if (Number.isNaN(value)) return misread('not-readable', `${shown} is not ${kind.name}`, whole, { expected })
+  if (isWithin(value, kind)) return { ok: true, value: value === 0 ? 0 : value }
   return misread('out-of-range', `${shown} cannot be ${kind.name}`, whole, {
     expected: `${kind.name} ${kind.limits}`,
   })
 }
 
-function withUsualUnit(sign: string, digits: string, kind: UnitKind): string {
+/** The number in the likeliest unit in which it is within the limits; null where there is none. */
+function withUsualUnit(sign: string, digits: string, kind: UnitKind): string | null {
   const minus = sign === '' || sign === '+' ? '' : '−'
-  const isFraction = kind.usualUnit === '%' && Number(digits) < 1 && Number(digits) > 0
-  const number = isFraction ? String(Number((Number(digits) * 100).toPrecision(12))) : digits
-  return `${minus}${number} ${kind.usualUnit}`
+  const isFraction = Number(digits) < 1 && Number(digits) > 0
+  const isPart = isFraction && kind.usualUnit === '%'
+  const number = isPart ? String(Number((Number(digits) * 100).toPrecision(12))) : digits
+  const first = isFraction ? (kind.unitBelowOne ?? kind.usualUnit) : kind.usualUnit
+  const unit = [first, ...(kind.otherUnits ?? [])].find((each) =>
+    isWithin(inBase(minus, number, each, kind), kind),
+  )
+  return unit === undefined ? null : `${minus}${number} ${unit}`
+}
+
+/** NaN where the kind has no such unit. */
+function inBase(sign: string, digits: string, unit: string, { units }: UnitKind): number {
+  const size = Number(digits)
+  return units.get(unit.toLowerCase())?.(sign === '' || sign === '+' ? size : -size) ?? Number.NaN
+}
+
+function isWithin(value: number, { low, high }: UnitKind): boolean {
+  return value >= low && value <= high
 }
 
 function commaInside(text: string, kind: UnitKind): Reading<never> {

@@ -5,6 +5,10 @@ export interface UnitKind {
   example: string
   /** The unit to suggest where none is written. */
   usualUnit: string
+  /** The unit to suggest for a bare number below one, where that is another. */
+  unitBelowOne?: string
+  /** Those to suggest where the number is out of the limits in the usual one. */
+  otherUnits?: readonly string[]
   /** Each unit as written, in lower case, and how a number in it becomes one in the base unit; `''`: a bare number. */
   units: ReadonlyMap<string, (number: number) => number>
   low: number
@@ -73,6 +77,7 @@ export const PRESSURE: UnitKind = {
   name: 'an air pressure',
   example: '1013 hPa',
   usualUnit: 'hPa',
+  otherUnits: ['mmHg', 'kPa', 'Pa'],
   units: factors({ hpa: 1, mbar: 1, mb: 1, kpa: 10, pa: 0.01, mmhg: 1.33322387415 }),
   low: 300,
   high: 1100,

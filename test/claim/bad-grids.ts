@@ -1,6 +1,9 @@
 import type { BadInput } from './bad-input.ts'
 import { BESIDE, SURVEY, surveyWith } from './survey.ts'
 
+/** Nothing stands on its grid. */
+const WITHOUT_CAIRN = SURVEY.replace(/ {2}(?:cairn|notch): .*\n/g, '')
+
 /** Ways of getting a projected grid wrong. */
 export const BAD_GRIDS: readonly BadInput[] = [
   {
@@ -243,8 +246,42 @@ export const BAD_GRIDS: readonly BadInput[] = [
     path: 'grid',
   },
   {
-    what: 'a grid of another continent',
+    what: 'a grid of a land far off',
+    text: surveyWith('{zone: UTM 34 N}', '{zone: UTM 40 N}'),
+    files: BESIDE,
+    code: 'far-from-structure',
+    severity: 'warning',
+    at: '4:14',
+    marked: 'UTM 40 N',
+    message: '`UTM 40 N` has its meridian 34° from the structure',
+    path: 'grid',
+  },
+  {
+    what: 'a grid of another continent, with a point on it',
     text: surveyWith('{zone: UTM 34 N}', '{zone: UTM 14 N}'),
+    files: BESIDE,
+    code: 'far-from-structure',
+    at: '4:14',
+    marked: 'UTM 14 N',
+    message: '`UTM 14 N` has its meridian 122° from the structure, farther than its projection reaches',
+    path: 'grid',
+  },
+  {
+    what: 'a grid of another continent, with a north that rests on it',
+    text: WITHOUT_CAIRN.replace('{zone: UTM 34 N}', '{zone: UTM 14 N}').replace(
+      '{from: sun}',
+      '{from: grid}',
+    ),
+    files: BESIDE,
+    code: 'far-from-structure',
+    at: '4:14',
+    marked: 'UTM 14 N',
+    message: '`UTM 14 N` has its meridian 122° from the structure, farther than its projection reaches',
+    path: 'grid',
+  },
+  {
+    what: 'a grid of another continent, on which nothing rests',
+    text: WITHOUT_CAIRN.replace('{zone: UTM 34 N}', '{zone: UTM 14 N}'),
     files: BESIDE,
     code: 'far-from-structure',
     severity: 'warning',
@@ -252,6 +289,57 @@ export const BAD_GRIDS: readonly BadInput[] = [
     marked: 'UTM 14 N',
     message: '`UTM 14 N` has its meridian 122° from the structure',
     path: 'grid',
+    also: ['unused-key'],
+  },
+  {
+    what: 'a grid of another continent, with a north whose convergence is stated',
+    text: WITHOUT_CAIRN.replace('{zone: UTM 34 N}', '{zone: UTM 14 N}').replace(
+      '{from: sun}',
+      '{from: grid, convergence: 1°36′ W}',
+    ),
+    files: BESIDE,
+    code: 'far-from-structure',
+    severity: 'warning',
+    at: '4:14',
+    marked: 'UTM 14 N',
+    message: '`UTM 14 N` has its meridian 122° from the structure',
+    path: 'grid',
+    also: ['unused-key'],
+  },
+  {
+    what: 'a grid within 90° whose projection does not reach the structure',
+    text: surveyWith('{zone: UTM 34 N}', '{zone: UTM 44 N}'),
+    files: BESIDE,
+    code: 'far-from-structure',
+    at: '4:14',
+    marked: 'UTM 44 N',
+    message: '`UTM 44 N` has its meridian 58° from the structure, farther than its projection reaches',
+    path: 'grid',
+  },
+  {
+    what: 'a line from the grid to a place that its projection does not reach',
+    text: surveyWith('{zone: UTM 34 N}', '{zone: UTM 55 N}').replace(', longitude: 23°05′ E}', '}'),
+    files: BESIDE,
+    code: 'cannot-join',
+    at: '13:28',
+    marked: 'peak',
+    message:
+      '`cairn` is on the grid and `peak` is in latitude and longitude: the projection of the grid does not reach so far',
+    path: 'sightlines.notch.to',
+    also: ['cannot-join'],
+  },
+  {
+    what: 'a line from a plan to a grid that does not reach its tie',
+    text: surveyWith('{zone: UTM 34 N}', '{zone: UTM 55 N}')
+      .replace(', longitude: 23°05′ E}', '}')
+      .replace('from: cairn, to: peak, horizon: {point: peak}', 'from: pillar, to: cairn'),
+    files: BESIDE,
+    code: 'cannot-join',
+    at: '13:29',
+    marked: 'cairn',
+    message:
+      '`pillar` is on the plan and `cairn` is on the grid: the projection of the grid does not reach so far',
+    path: 'sightlines.notch.to',
   },
   {
     what: 'points on a grid that the file does not tell',
@@ -265,5 +353,29 @@ export const BAD_GRIDS: readonly BadInput[] = [
     marked: 'easting',
     message: 'the file has no `grid`, on which `trig` and 1 more stand',
     path: 'grid',
+  },
+  {
+    what: 'an ellipsoid alone',
+    text: surveyWith('{zone: UTM 34 N}', '{ellipsoid: GRS80}'),
+    files: BESIDE,
+    code: 'missing-key',
+    at: '4:1',
+    marked: 'grid',
+    message: '`grid` has no `zone`',
+    path: 'grid.zone',
+  },
+  {
+    what: 'a false easting with a comma between thousands',
+    text: surveyWith(
+      '{zone: UTM 34 N}',
+      '{central_meridian: 21° E, latitude_of_origin: 0°, scale: 0.9996, false_easting: 500,000 m, false_northing: 0 m, ellipsoid: WGS84}',
+    ),
+    files: BESIDE,
+    code: 'comma-in-braces',
+    at: '4:87',
+    marked: '500,000 m',
+    message: 'the comma in `500,000 m` ends the value inside { }',
+    path: 'grid.false_easting',
+    suggestion: '500000 m',
   },
 ]

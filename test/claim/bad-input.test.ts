@@ -118,6 +118,37 @@ test('a table with hundreds of problems lists the first twenty and counts the ot
   expect(problems[21]).toMatchObject({ code: 'unknown-word', path: 'target.at' })
 })
 
+test('a table without a sound row comes to an end, however long it is', () => {
+  const rows = 'a,1\n'.repeat(400_000)
+  const { claim, problems } = read(SURVEY_AND_TABLE, { ...BESIDE, 'survey.csv': `name,east,north\n${rows}` })
+  expect(claim).toBeNull()
+  expect(problems).toHaveLength(21)
+  // 20,001 broken rows and that there are too many, of which the first twenty are told.
+  expect(problems[20]?.message).toBe('`survey.csv` has 19982 more problems from here on')
+})
+
+test('so many problems are no trouble that they would not fit on the stack as arguments', () => {
+  const rows = Array.from({ length: 20_000 }, (_, row) => `p${row},a,b,c,d,e,f,g\n`).join('')
+  const table = `name,latitude,longitude,elevation,uncertainty,width,form,up\n${rows}`
+  const { problems } = read(SURVEY_AND_TABLE, { ...BESIDE, 'survey.csv': table })
+  // Seven bad cells in each row, and the column that has no place, of which the first twenty are told.
+  expect(problems[20]?.message).toBe('`survey.csv` has 139981 more problems from here on')
+})
+
+test('a line of a million characters with quotes is taken apart in seconds', () => {
+  const line = '"é",'.repeat(250_000)
+  const start = performance.now()
+  const { problems } = read(SURVEY_AND_TABLE, { ...BESIDE, 'survey.csv': `name,east,north\n${line}\n` })
+  expect(problems).toMatchObject([{ code: 'wrong-number-of-cells', length: 1_000_000 }])
+  // Seconds; where each cell is counted from the beginning of its line it takes minutes.
+  expect((performance.now() - start) / 1000).toBeLessThan(20)
+})
+
+test('a declination with a sign and a letter is told of a letter alone, since a sign alone is refused', () => {
+  const text = SURVEY.replace('{from: sun}', '{from: compass, declination: -3° W}')
+  expect(read(text, BESIDE).problems[0]?.expected).toBe('E or W without a sign')
+})
+
 test('problems of a table stand where the claim file names it', () => {
   const text = SURVEY_AND_TABLE.replace('{from: sun}', '{from: son}').replace('width: 60 cm', 'width: 60')
   const { problems } = read(text, { ...BESIDE, 'survey.csv': 'name,east,north,hue\na,1,x,2\n' })

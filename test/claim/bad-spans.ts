@@ -146,6 +146,17 @@ export const BAD_SPANS: readonly BadInput[] = [
     path: 'sightlines.both.span.horizons.june.point',
   },
   {
+    what: 'a horizon that is a profile of an angle',
+    text: surveyWith('{angle: 61° ± 5′}', '{angle: 61°, horizons: {december: {profile: skyline.csv}}}'),
+    files: BESIDE,
+    code: 'out-of-place',
+    at: '16:51',
+    marked: 'profile',
+    message:
+      '`profile` has no place here: `both` is an angle alone, without the direction by which a profile is read',
+    path: 'sightlines.both.span.horizons.december.profile',
+  },
+  {
     what: 'one horizon for a span',
     text: surveyWith('{angle: 61° ± 5′}', '{angle: 61°, horizons: 1°30′}'),
     files: BESIDE,
@@ -340,5 +351,75 @@ export const BAD_SPANS: readonly BadInput[] = [
     marked: 'Nibelheim',
     message: '`Nibelheim` is neither the Sun nor the Moon nor a star known here',
     path: 'sightlines.both.target.body',
+  },
+  {
+    what: 'two ends of a span in one direction',
+    text: surveyWith('points:\n', 'points:\n  far: {east: 169.3 m, north: 106.18 m}\n').replace(
+      '{angle: 61° ± 5′}',
+      '{from: hearth, june: pillar, december: far}',
+    ),
+    files: BESIDE,
+    code: 'in-one-line',
+    at: '17:55',
+    marked: 'far',
+    message: '`pillar` and `far` lie in one direction from `hearth`',
+    path: 'sightlines.both.span.december',
+  },
+  {
+    what: 'two ends of a span in opposite directions',
+    text: surveyWith('points:\n', 'points:\n  far: {east: -84.65 m, north: -53.09 m}\n').replace(
+      '{angle: 61° ± 5′}',
+      '{from: hearth, june: pillar, december: far}',
+    ),
+    files: BESIDE,
+    code: 'in-one-line',
+    severity: 'warning',
+    at: '17:55',
+    marked: 'far',
+    message: '`pillar` and `far` lie in opposite directions from `hearth`',
+    path: 'sightlines.both.span.december',
+  },
+  {
+    // From the hearth the pillar is at 58°, north of east, and the gate at 124°, south of it.
+    what: 'the ends of a span at rising exchanged',
+    text: surveyWith('{angle: 61° ± 5′}', '{from: hearth, june: gate, december: pillar}'),
+    files: BESIDE,
+    code: 'ends-exchanged',
+    severity: 'warning',
+    at: '16:37',
+    marked: 'gate',
+    message: 'seen from `hearth`, `gate` lies right of `pillar`',
+    path: 'sightlines.both.span.june',
+  },
+  {
+    // At 302° the far pillar is north of west, and the far gate, at 236°, south of it.
+    what: 'the ends of a span at setting exchanged',
+    text: surveyWith(
+      'points:\n',
+      'points:\n  nw: {east: -84.65 m, north: 53.09 m}\n  sw: {east: -12 m, north: -8 m}\n',
+    )
+      .replace('{angle: 61° ± 5′}', '{from: hearth, june: sw, december: nw}')
+      .replace('june to december solstice, at: rising', 'june to december solstice, at: setting'),
+    files: BESIDE,
+    code: 'ends-exchanged',
+    severity: 'warning',
+    at: '18:37',
+    marked: 'sw',
+    message: 'seen from `hearth`, `sw` lies left of `nw`',
+    path: 'sightlines.both.span.june',
+  },
+  {
+    what: 'a span whose december point is nearer than it is known',
+    text: surveyWith('points:\n', 'points:\n  near: {east: 1 m, north: -1 m, uncertainty: 3 m}\n').replace(
+      '{angle: 61° ± 5′}',
+      '{from: hearth, june: pillar, december: near}',
+    ),
+    files: BESIDE,
+    code: 'nearer-than-known',
+    severity: 'warning',
+    at: '17:55',
+    marked: 'near',
+    message: '`hearth` and `near` are 1.4 m apart, and uncertain by 3 m',
+    path: 'sightlines.both.span.december',
   },
 ]

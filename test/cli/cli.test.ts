@@ -1,4 +1,5 @@
-import { chmod, mkdir, readFile, symlink, writeFile } from 'node:fs/promises'
+import { execFileSync } from 'node:child_process'
+import { appendFile, chmod, mkdir, readFile, symlink, truncate, writeFile } from 'node:fs/promises'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { describe, expect, test } from 'vitest'
@@ -124,6 +125,36 @@ describe('audit', () => {
     const { status, stderr } = await run('audit', join(await newFolder(), 'none.yaml'))
     expect(status).toBe(3)
     expect(stderr).toMatch(/cannot read .*none\.yaml: there is no such file/)
+  })
+
+  test('a pipe, a device and what is far too long are not read, and status 3', async () => {
+    const folder = await newFolder()
+    const pipe = join(folder, 'pipe.yaml')
+    execFileSync('mkfifo', [pipe])
+    const long = await claimIn(folder, '', 'long.yaml')
+    await truncate(long, 20_000_001)
+    const { status, stderr } = await run('check', pipe, '/dev/zero', long)
+    expect(status).toBe(3)
+    expect(stderr.split('\n')).toEqual([
+      `datestone: cannot read ${pipe}: it is not a plain file`,
+      'datestone: cannot read /dev/zero: it is not a plain file',
+      `datestone: cannot read ${long}: it is 20000001 bytes long, too long for a claim file`,
+      '',
+    ])
+  })
+
+  test('a link round in a circle, a name too long and one with a NUL are told in plain words', async () => {
+    const folder = await newFolder()
+    const round = join(folder, 'round.yaml')
+    await symlink(round, round)
+    const { status, stderr } = await run('check', round, join(folder, 'x'.repeat(300)), 'a\0b.yaml')
+    expect(status).toBe(3)
+    expect(stderr.replaceAll(/cannot read .*?: (?=[a-z])/g, '').split('\n')).toEqual([
+      'datestone: its links lead round in a circle',
+      'datestone: its name is too long',
+      'datestone: no file can have such a name',
+      '',
+    ])
   })
 
   test('a place that cannot be written is status 3, and leaves nothing behind', async () => {
@@ -290,6 +321,28 @@ describe('files beside a claim file', () => {
     expect((await run('check', await claimIn(folder, NAMING))).stderr).toContain(
       '`survey.csv` cannot be read: it is a folder',
     )
+  })
+
+  test('that are far too long are told so by their size', async () => {
+    const path = await folderWith(SOUND)
+    const survey = path.replace('court.yaml', 'survey.csv')
+    await truncate(survey, 6_000_004)
+    expect((await run('check', path)).stderr).toContain(
+      '`survey.csv` cannot be read: it is 6000004 bytes long, and a table has at most 2000000 characters',
+    )
+    // Larger than any memory; it takes up no room on the disk.
+    await truncate(survey, 2 ** 40)
+    expect((await run('check', path)).stderr).toContain(
+      '`survey.csv` cannot be read: it is 1099511627776 bytes',
+    )
+  })
+
+  test('may have as many characters as are read, each of three bytes', async () => {
+    const head = 'name,east,north\na,0,0\nb,60,50\n# '
+    const path = await folderWith({ ...SOUND, 'survey.csv': head + '†'.repeat(2_000_000 - head.length) })
+    expect(await run('check', path)).toMatchObject({ status: 0, stderr: '' })
+    await appendFile(path.replace('court.yaml', 'survey.csv'), 'x')
+    expect((await run('check', path)).stderr).toContain('`survey.csv` is 2000001 characters long')
   })
 })
 

@@ -51,6 +51,9 @@ describe('reads a number with its unit', () => {
   })
 })
 
+/** A length that is mostly told in centimetres, and below one in metres. */
+const POINT_LIKE: UnitKind = { ...LENGTH, usualUnit: 'cm', unitBelowOne: 'm' }
+
 describe('refuses', () => {
   test.each<[string, UnitKind, string, string, string | null]>([
     ['12', LENGTH, 'unit-missing', '12', '12 m'],
@@ -58,6 +61,11 @@ describe('refuses', () => {
     ['40', HUMIDITY, 'unit-missing', '40', '40 %'],
     ['0.4', HUMIDITY, 'unit-missing', '0.4', '40 %'],
     ['0.07', HUMIDITY, 'unit-missing', '0.07', '7 %'],
+    ['1013', PRESSURE, 'unit-missing', '1013', '1013 hPa'],
+    ['101325', PRESSURE, 'unit-missing', '101325', '101325 Pa'],
+    ['9500', ELEVATION, 'unit-missing', '9500', null],
+    ['0.05', POINT_LIKE, 'unit-missing', '0.05', '0.05 m'],
+    ['5', POINT_LIKE, 'unit-missing', '5', '5 cm'],
     ['84,65 m', LENGTH, 'decimal-comma', '84,65 m', '84.65 m'],
     ['1,234 m', LENGTH, 'decimal-comma', '1,234 m', '1.234 m or 1234 m'],
     ['1,234,567 m', LENGTH, 'decimal-comma', '1,234,567 m', '1234567 m'],

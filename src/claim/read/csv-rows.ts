@@ -18,28 +18,31 @@ export interface CsvRow {
   cells: ReadonlyMap<string, Cell>
 }
 
-/** The rows under a heading; those that cannot be taken apart are told and left out, and `isWhole` is false. */
+/**
+ * The rows under a heading; those that cannot be taken apart are told and left out, and `isWhole` is false. They count
+ * towards the most that are read, so that a table without a sound row comes to an end as well.
+ */
 export function csvRows(
-  lines: readonly CsvLine[],
+  lines: Iterable<CsvLine>,
   names: readonly CsvHeading[],
   separator: Separator,
   field: Field,
   context: Context,
 ): { rows: readonly CsvRow[]; isWhole: boolean } {
   const rows: CsvRow[] = []
-  let isWhole = true
+  let broken = 0
   for (const line of lines) {
     const row = rowOf(line, names, separator, field, context)
-    if (row === null) isWhole = false
+    if (row === null) broken += 1
     else if (row.cells.size > 0) rows.push(row)
-    if (rows.length <= MOST_ROWS || !('at' in line)) continue
+    if (rows.length + broken <= MOST_ROWS) continue
     reportError(context, field, 'file-too-large', `the table has more than ${MOST_ROWS} rows`, {
       expected: `a table of at most ${MOST_ROWS} rows`,
-      at: line.at,
+      at: 'at' in line ? line.at : line.brokenAt,
     })
     return { rows, isWhole: false }
   }
-  return { rows, isWhole }
+  return { rows, isWhole: broken === 0 }
 }
 
 /** A row without cells is one that holds nothing; null where it cannot be taken apart. */

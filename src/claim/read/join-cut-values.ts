@@ -6,6 +6,9 @@ import { type Context, type Field, reportError, valueStretch } from './field.ts'
 /** Keys whose values are lists: there a comma parts two values, and what is missing are the brackets. */
 const LISTS: ReadonlySet<string> = new Set(['bodies', 'tolerances'])
 
+/** A year may keep its commas, in quotes; a length may not. */
+const LENGTH_IN_THOUSANDS = /^[-−+]?\d{1,3}(?:,\d{3})+(?:\.\d+)?\s*(?:[ckm]?m|met(?:re|er)s?|ft)$/i
+
 /**
  * In `{date: 11,881 BCE}` the comma ends the value, and `881 BCE` comes out as a key without one. Such values are
  * reported, added to `spoilt` and left out.
@@ -46,6 +49,7 @@ function reportCut(before: Field, after: Field, context: Context): void {
 }
 
 function asOneValue(whole: string): string {
+  if (LENGTH_IN_THOUSANDS.test(whole)) return whole.replaceAll(',', '')
   return isDecimalComma(whole) ? whole.replace(',', '.') : `"${whole}"`
 }
 

@@ -2,6 +2,7 @@ import { wrap180 } from '../../quantity/degrees.ts'
 import { quoted } from '../../quantity/quoted.ts'
 import type { Point } from '../claim.ts'
 import { type Context, type Field, reportError } from './field.ts'
+import { isBeyondGrid } from './is-beyond-grid.ts'
 import { PLACES, type PlaceKind } from './point-kinds.ts'
 import type { ReadPoint, ReadPoints } from './read-points.ts'
 import type { Surroundings } from './surroundings.ts'
@@ -19,7 +20,7 @@ export function checkJoin(
 ): boolean {
   const [a, b] = [around.points.byName.get(from), around.points.byName.get(to)]
   if (a === undefined || b === undefined || a.kind === null || b.kind === null) return true
-  const lacking = lackingLink(a.kind, b.kind, around)
+  const lacking = lackingLink(a.kind, b.kind, around) ?? lackingReach(a, b, around)
   if (lacking !== null) {
     const message = `${where(a)} and ${where(b)}${lacking.why}`
     reportError(context, field, 'cannot-join', message, { expected: lacking.expected })
@@ -53,6 +54,34 @@ function lackingLink(
   }
 }
 
+/** What a grid lacks to be joined to a place that its projection does not reach; a plan has the place of its tie. */
+function lackingReach(
+  a: ReadPoint,
+  b: ReadPoint,
+  { points, grid }: Surroundings,
+): { why: string; expected: string } | null {
+  const other = [a, b].find(({ kind }) => kind !== 'grid')
+  if (grid?.by !== 'projection' || other === undefined || ![a.kind, b.kind].includes('grid')) return null
+  const place = other.kind === 'plan' ? tieOf(points) : onEarth(other.point)
+  if (place === null || !isBeyondGrid(place, grid.projection)) return null
+  return {
+    why: ': the projection of the grid does not reach so far',
+    expected: 'the grid of the place; the zone, or E for W, may have slipped',
+  }
+}
+
+/** Where the plan is on the Earth. */
+function tieOf({ byName }: ReadPoints): { latitudeDeg: number; longitudeDeg: number } | null {
+  const ties = [...byName.values()].map(({ point }) => (point?.by === 'plan' ? point.tie : null))
+  return ties.find((tie) => tie !== null) ?? null
+}
+
+/** Where a point says that it is on the Earth. */
+function onEarth(point: Point | null): { latitudeDeg: number; longitudeDeg: number } | null {
+  if (point?.by === 'plan') return point.tie
+  return point?.by === 'geographic' ? point : null
+}
+
 /** Whether a point of the plan is a tie, or may have been meant for one. */
 function mayBeTied({ byName }: ReadPoints): boolean {
   const all = [...byName.values()]
@@ -69,9 +98,7 @@ function where({ field, kind }: ReadPoint): string {
 function isSamePlace(a: Point, b: Point): boolean {
   if (a.by === 'plan' && b.by === 'plan') return a.eastM === b.eastM && a.northM === b.northM
   if (a.by === 'grid' && b.by === 'grid') return a.eastingM === b.eastingM && a.northingM === b.northingM
-  const [here, there] = [a, b].map((point) =>
-    point.by === 'plan' ? point.tie : point.by === 'geographic' ? point : null,
-  )
+  const [here, there] = [a, b].map(onEarth)
   if (here == null || there == null || here.latitudeDeg !== there.latitudeDeg) return false
   const isPole = Math.abs(here.latitudeDeg) === 90
   return isPole || wrap180(here.longitudeDeg - there.longitudeDeg) === 0

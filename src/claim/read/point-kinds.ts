@@ -18,6 +18,20 @@ export const PLACES = {
 
 export type PlaceKind = keyof typeof PLACES
 
+/** A coordinate of the plan beside one of the grid, neither with its own: the first one tells which is meant. */
+const MIXED = [
+  { has: 'easting', stray: 'north', meant: 'northing', kind: 'grid' },
+  { has: 'east', stray: 'northing', meant: 'north', kind: 'plan' },
+] as const satisfies readonly { has: PointKey; stray: PointKey; meant: PointKey; kind: PlaceKind }[]
+
+export type MixedPlace = (typeof MIXED)[number]
+
+/** The halves of two places among these keys, or null where one place is whole or nothing is mixed. */
+export function mixedPlace(has: (key: PointKey) => boolean): MixedPlace | null {
+  const isWhole = [PLACES.plan, PLACES.grid].some(({ keys }) => keys.every(has))
+  return isWhole ? null : (MIXED.find((mixed) => has(mixed.has) && has(mixed.stray)) ?? null)
+}
+
 /** What the readers of a point's values have to know. */
 export interface PointKinds {
   east: UnitKind

@@ -1,10 +1,9 @@
 import { quoted } from '../../quantity/quoted.ts'
+import { LONGEST_TABLE } from '../longest-table.ts'
 import { checkCharacters } from './check-characters.ts'
 import { type Context, type Field, reportError, valueStretch } from './field.ts'
 import { withLineFeeds } from './line-ends.ts'
 import { readFileName } from './read-file-name.ts'
-
-const LONGEST = 2_000_000
 
 /** A file beside the claim file, with a context that tells its problems at their place in it. */
 export interface BesideFile {
@@ -25,9 +24,9 @@ export function readBesideFile(field: Field, context: Context): BesideFile | nul
     return null
   }
   context.beside.attachments.set(path, read.sha256)
-  if (read.text.length > LONGEST) {
+  if (read.text.length > LONGEST_TABLE) {
     reportError(context, field, 'file-too-large', `${quoted(path)} is ${read.text.length} characters long`, {
-      expected: `a table of at most ${LONGEST} characters`,
+      expected: `a table of at most ${LONGEST_TABLE} characters`,
     })
     return null
   }

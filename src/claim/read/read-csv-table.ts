@@ -14,6 +14,9 @@ import { nearestKey } from './nearest-key.ts'
 import { type BesideFile, readBesideFile } from './read-beside-file.ts'
 import { type Cell, separatorOf, splitCsv } from './split-csv.ts'
 
+/** Far more than any table has that is meant for this program. */
+const MOST_COLUMNS = 100
+
 /** A table beside the claim file. `isWhole` is false where a row could not be taken apart, which has been told. */
 export interface CsvTable extends BesideFile {
   /** Each column with its heading; null where a misspelt heading is most likely meant for it. */
@@ -31,7 +34,8 @@ export function readCsvTable(field: Field, columns: readonly string[], context: 
   const file = readBesideFile(field, context)
   if (file === null) return null
   const separator = separatorOf(file.text)
-  const [first, ...rest] = splitCsv(file.text, separator)
+  const lines = splitCsv(file.text, separator)
+  const first = lines.next().value
   if (first === undefined) {
     reportError(context, field, 'empty-file', `${quoted(file.path)} is empty`, {
       expected: `a table with the columns ${columns.slice(0, 3).join(', ')}`,
@@ -43,8 +47,15 @@ export function readCsvTable(field: Field, columns: readonly string[], context: 
     reportBroken(first, inFile, file.context)
     return null
   }
+  if (withoutEmptyEnd(first.cells).length > MOST_COLUMNS) {
+    reportError(file.context, inFile, 'file-too-large', `the table has more than ${MOST_COLUMNS} columns`, {
+      expected: `the columns ${columns.join(', ')}`,
+      at: first.at,
+    })
+    return null
+  }
   const names = headingOf(first, columns, inFile, file.context)
-  const { rows, isWhole } = csvRows(rest, names, separator, inFile, file.context)
+  const { rows, isWhole } = csvRows(lines, names, separator, inFile, file.context)
   const heading = new Map(names.flatMap(({ column, cell }) => (column === null ? [] : [[column, cell]])))
   return { ...file, heading, headingAt: first.at, rows, isWhole }
 }

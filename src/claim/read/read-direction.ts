@@ -1,6 +1,6 @@
 import { AZIMUTH } from '../../quantity/angle-kind.ts'
 import { quoted } from '../../quantity/quoted.ts'
-import type { Direction, Target } from '../claim.ts'
+import type { Direction, SolsticeSpanTarget, Target } from '../claim.ts'
 import { EXAMPLES, type KEYS, TARGET_EXAMPLES } from '../keys.ts'
 import { isOnMeridian } from '../on-meridian.ts'
 import { type Context, type Field, reportError } from './field.ts'
@@ -42,7 +42,7 @@ export function readDirection(
 ): Direction | null {
   const hasDirection = fields.has('azimuth') || fields.has('from') || fields.has('to')
   if (target?.body === 'sun at both solstices' || (target === null && fields.has('span')))
-    return readSpanLine(line, fields, around, context)
+    return readSpanLine(line, fields, target, around, context)
   if (target === null && fields.has('altitude') && !hasDirection) return readAltitude(fields, context)
   if (target !== null && isOnMeridian(target)) return readOnMeridian(line, fields, context)
   if (target !== null) {
@@ -56,6 +56,7 @@ export function readDirection(
 function readSpanLine(
   line: Field,
   fields: LineFields,
+  target: SolsticeSpanTarget | null,
   around: Surroundings,
   context: Context,
 ): Direction | null {
@@ -64,7 +65,7 @@ function readSpanLine(
   for (const each of needless) refuseNeedless(each, fields, 'for both solstices', { expected: ask }, context)
   if (needless.length === 0 && !fields.has('span')) reportMissingKey(line, 'span', A_SPAN, context)
   const span = fields.get('span')
-  return span === undefined ? null : readSpan(line, span, around, context)
+  return span === undefined ? null : readSpan(line, span, target, around, context)
 }
 
 function readOnMeridian(line: Field, fields: LineFields, context: Context): Direction | null {

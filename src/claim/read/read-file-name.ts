@@ -10,12 +10,15 @@ const ELSEWHERE: readonly (readonly [RegExp, string])[] = [
   [/^(?:[/\\~]|[a-z]:)/i, 'is not a path from the claim file'],
   [/(?:^|[/\\])\.\.(?:[/\\]|$)/, 'leads out of the folder of the claim file'],
   [/\\/, 'has a backslash between its folders'],
+  [/(?:^|\/)\.?$/, 'is a folder'],
 ]
 
 /** Reads the path of a file in the folder of the claim file or below it; null, with the problem reported, for others. */
 export function readFileName(field: Field, context: Context): string | null {
   const text = scalarText(field, context, EXPECTED)
   if (text === null) return null
+  // No file has such a name; that the character stands there has been told.
+  if (text.includes('\0')) return null
   const name = text.trim()
   if (name === '') {
     reportError(context, field, 'empty-value', `${quoted(field.name)} is empty`, { expected: EXPECTED })

@@ -5,7 +5,7 @@ import { type Context, type Field, reportError } from './field.ts'
 import { CONVERGENCE, DIRECTION_UNCERTAINTY } from './kinds.ts'
 import { measuredAngle } from './measured-angle.ts'
 import { readEllipsoid } from './read-ellipsoid.ts'
-import { type Fields, readMapping, reportOutOfPlace } from './read-mapping.ts'
+import { type Fields, readMapping, reportMissingKey, reportOutOfPlace } from './read-mapping.ts'
 import { PROJECTION, readProjection } from './read-projection.ts'
 import { readQuantity } from './read-quantity.ts'
 import { plainText } from './read-text.ts'
@@ -45,10 +45,11 @@ export function readGrid(field: Field | undefined, context: Context): Grid | nul
     reportOutOfPlace(entry, { message, expected: 'one way to tell the grid' }, context)
   }
   if (form === FORMS[2]) return readConvergence(fields, context)
-  return form === FORMS[0] ? readZone(fields, context) : readProjection(field, fields, context)
+  return form === FORMS[0] ? readZone(field, fields, context) : readProjection(field, fields, context)
 }
 
-function readZone(fields: GridFields, context: Context): Grid | null {
+function readZone(field: Field, fields: GridFields, context: Context): Grid | null {
+  if (!fields.has('zone')) reportMissingKey(field, 'zone', 'zone: UTM 55 S, or all of a projection', context)
   const zone = readQuantity(fields.get('zone'), readUtmZone, ZONE_EXPECTED, context)
   const stated = readEllipsoid(fields.get('ellipsoid'), context)
   if (zone === null || (stated === null && fields.has('ellipsoid'))) return null

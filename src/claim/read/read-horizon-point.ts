@@ -1,5 +1,7 @@
 import { quoted } from '../../quantity/quoted.ts'
 import type { Horizon } from '../claim.ts'
+import { checkSlope } from './check-slope.ts'
+import { distanceBetween } from './distance-between.ts'
 import { type Context, type Field, reportError } from './field.ts'
 import { checkJoin } from './join-points.ts'
 import { PLACES } from './point-kinds.ts'
@@ -54,7 +56,16 @@ function checkSeen(field: Field, from: string, name: string, around: Surrounding
     reportError(context, field, 'no-height', message, {
       expected: 'two points whose heights count from one zero',
     })
-  }
+  } else checkSteepness(field, eye, seen, context)
+}
+
+/** Between points of two kinds the distance is not reckoned here. */
+function checkSteepness(field: Field, eye: ReadPoint, seen: ReadPoint, context: Context): void {
+  if (eye.point === null || seen.point === null) return
+  const distanceM = distanceBetween(eye.point, seen.point)
+  if (distanceM === null || eye.point.upM === null || seen.point.upM === null) return
+  const what = `${quoted(seen.field.name)} seen from ${quoted(eye.field.name)}`
+  checkSlope(field, { distanceM, riseM: seen.point.upM - eye.point.upM, what }, context)
 }
 
 function hasHeight({ fields }: ReadPoint): boolean {

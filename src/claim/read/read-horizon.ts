@@ -1,10 +1,10 @@
 import { isMap } from 'yaml'
 import { HORIZON_ALTITUDE } from '../../quantity/angle-kind.ts'
-import { DEG } from '../../quantity/degrees.ts'
 import { quoted } from '../../quantity/quoted.ts'
 import type { Unstated } from '../../quantity/unstated.ts'
 import type { Horizon } from '../claim.ts'
 import { KEYS } from '../keys.ts'
+import { checkSlope } from './check-slope.ts'
 import { type Context, type Field, reportError } from './field.ts'
 import { ALTITUDE_UNCERTAINTY, EYE_HEIGHT, HORIZON_DISTANCE, LENGTH_UNCERTAINTY, RISE } from './kinds.ts'
 import { measuredAngle } from './measured-angle.ts'
@@ -25,12 +25,14 @@ type HorizonFields = Fields<keyof typeof KEYS.horizon>
 
 /**
  * The line that meets the horizon: `from` where it begins (null where that cannot be told), or none where it runs
- * between no points; its azimuth where that is measured.
+ * between no points; its azimuth where that is measured. One side of a span of which only the angle is known has no
+ * direction.
  */
 export interface LineOfSight {
   name: string
   from?: string | null
   azimuthDeg?: number
+  isOfAngle?: boolean
 }
 
 const EXPECTED =
@@ -90,12 +92,9 @@ function readDistance(field: Field, fields: HorizonFields, context: Context): Ho
   })
   const rise = fields.get('rise')
   if (distanceM == null || riseM == null || rise === undefined) return null
-  const slopeDeg = Math.atan2(riseM.value, distanceM.value) / DEG
-  if (slopeDeg >= HORIZON_ALTITUDE.lowDeg && slopeDeg <= HORIZON_ALTITUDE.highDeg)
-    return { by: 'distance', distanceM, riseM }
-  const message = `such a rise at such a distance makes a horizon of ${slopeDeg.toFixed(0).replace('-', '−')}°`
-  reportError(context, rise, 'out-of-range', message, { expected: `a horizon ${HORIZON_ALTITUDE.limits}` })
-  return null
+  const what = 'such a rise at such a distance'
+  const isSound = checkSlope(rise, { distanceM: distanceM.value, riseM: riseM.value, what }, context)
+  return isSound ? { by: 'distance', distanceM, riseM } : null
 }
 
 function readSea(field: Field, context: Context): Horizon | null {

@@ -1,10 +1,11 @@
+import { foldWord } from '../../quantity/near-miss.ts'
 import { quoted } from '../../quantity/quoted.ts'
 import { readAngle } from '../../quantity/read-angle.ts'
 import { readUncertainty } from '../../quantity/read-uncertainty.ts'
 import type { Unstated } from '../../quantity/unstated.ts'
-import type { North } from '../claim.ts'
+import type { Grid, North } from '../claim.ts'
 import { EXAMPLES, KEYS } from '../keys.ts'
-import { type Context, type Field, reportWarning } from './field.ts'
+import { type Context, type Field, reportError, reportWarning } from './field.ts'
 import { CONVERGENCE, DIRECTION_UNCERTAINTY } from './kinds.ts'
 import { measuredAngle } from './measured-angle.ts'
 import { type CompassHelp, readCompass } from './read-compass.ts'
@@ -51,21 +52,42 @@ const BELONGS: Readonly<Partial<Record<NorthKey, { way: North['from']; why: stri
 /** Reads how the plan's north was found, or `unknown`. */
 export function readNorth(
   field: Field | undefined,
-  { hasGrid, ...help }: CompassHelp & { hasGrid: boolean },
+  { grid, hasGrid, ...help }: CompassHelp & { grid: Grid | null; hasGrid: boolean },
   context: Context,
 ): North | Unstated {
   if (field === undefined) return 'omitted'
   if (isUnknown(plainText(field) ?? '')) return 'unknown'
+  const way = bareWay(field)
+  if (way !== null) return refuseBareWay(field, way, context)
   const fields = readMapping(field, KEYS.north, context)
   if (fields === null) return 'omitted'
   const from = readWord(fields.get('from'), WAYS, context)
   if (from !== null) refuseForeign(from, fields, context)
   const convergence = readConvergence(fields, context)
-  if (from === 'grid' && !fields.has('convergence') && !hasGrid) reportNoGrid(field, context)
+  if (from === 'grid' && !fields.has('convergence')) {
+    if (!hasGrid) reportNoGrid(field, context)
+    if (grid?.by === 'projection' && !help.hasLongitude) reportNoLongitude(fields, grid.name, context)
+  }
   const compass = readCompass(fields, from === 'compass' ? help : null, context)
   const receivers = readReceivers(field, fields, from === 'gps', context)
   const uncertaintyDeg = readOwnUncertainty(fields, context)
   return from === null ? 'omitted' : { from, uncertaintyDeg, ...compass, convergence, ...receivers }
+}
+
+/** The way that a word by itself means; null where it is none. */
+function bareWay(field: Field): North['from'] | null {
+  const text = foldWord(plainText(field) ?? '')
+  const hint = Object.entries(WAYS.hints).find(([other]) => foldWord(other) === text)?.[1]
+  return NORTH_WAYS.find((way) => way === text) ?? hint ?? null
+}
+
+function refuseBareWay(field: Field, way: North['from'], context: Context): 'omitted' {
+  const text = plainText(field)?.trim() ?? ''
+  reportError(context, field, 'not-a-mapping', `${quoted(text)} is not a mapping of keys to values`, {
+    expected: 'the key that it belongs to',
+    suggestion: `{from: ${way}}`,
+  })
+  return 'omitted'
 }
 
 function readOwnUncertainty(fields: NorthFields, context: Context): number | Unstated {
@@ -113,4 +135,13 @@ function reportNoGrid(field: Field, context: Context): void {
     `convergence: ${CONVERGENCE.example}, or ${EXAMPLES.grid} in the file`,
     context,
   )
+}
+
+/** A projection gives the convergence of a place. */
+function reportNoLongitude(fields: NorthFields, grid: string, context: Context): void {
+  const field = fields.get('from')
+  if (field === undefined) return
+  const message = `the convergence of ${grid} depends on the longitude, and \`structure\` has no \`longitude\``
+  const expected = `longitude: 23°05′ E under structure, or convergence: ${CONVERGENCE.example} here`
+  reportError(context, { ...field, path: 'structure.longitude' }, 'missing-key', message, { expected })
 }

@@ -2,7 +2,7 @@ import { quoted } from '../../quantity/quoted.ts'
 import type { Unstated } from '../../quantity/unstated.ts'
 import type { CsvRow } from './csv-rows.ts'
 import { type Context, type Field, reportError } from './field.ts'
-import { BARE, PLACES, type PlaceKind, type PointKey } from './point-kinds.ts'
+import { BARE, type MixedPlace, mixedPlace, PLACES, type PlaceKind, type PointKey } from './point-kinds.ts'
 import { type CsvTable, cellField, readCsvTable, reportMissingColumn } from './read-csv-table.ts'
 import { type Fields, reportOutOfPlace } from './read-mapping.ts'
 import { readPoint } from './read-point.ts'
@@ -41,11 +41,13 @@ export function readPointTable(
   const inTable: Field = { ...file, keyAt: table.headingAt, node: null }
   const kind = kindOfTable(table, inTable)
   if (kind === null) return false
-  if (table.rows.length === 0 && table.isWhole)
+  if (table.rows.length === 0 && table.isWhole) {
     reportError(table.context, inTable, 'too-few-rows', `${quoted(table.path)} has a heading and no rows`, {
       expected: 'a row for each point under it',
       at: table.headingAt,
     })
+    return false
+  }
   const lines = new Map<string, number>()
   const isEveryRowNamed = table.rows
     .map((row) => addRow(row, kind, table, { points, byName, lines, shared }, context))
@@ -60,6 +62,8 @@ function kindOfTable(table: CsvTable, field: Field): PlaceKind | null {
   const kinds = (['plan', 'grid', 'geographic'] as const).filter((kind) => PLACES[kind].keys.some(has))
   const [kind, ...others] = kinds
   if (!has('name')) reportMissingColumn(table, field, 'name', EXPECTED)
+  const mixed = mixedPlace(has)
+  if (mixed !== null) return refuseMixed(mixed, table, field)
   if (kind === undefined) {
     reportMissingColumn(table, field, 'east', EXPECTED)
     return null
@@ -89,6 +93,16 @@ function kindOfTable(table: CsvTable, field: Field): PlaceKind | null {
   )
   const isComplete = has('name') && PLACES[kind].keys.every((key) => heading.get(key) != null)
   return isComplete && heading.get('name') != null && others.length === 0 ? kind : null
+}
+
+/** The column that is meant takes the place of the stray one. */
+function refuseMixed({ has, stray, meant }: MixedPlace, { heading, context }: CsvTable, field: Field): null {
+  const cell = heading.get(stray)
+  if (cell == null) return null
+  const message = `${quoted(stray)} has no place here: it does not go with ${quoted(has)}`
+  const entry = cellField(cell, stray, field.path)
+  reportOutOfPlace(entry, { message, expected: meant, suggestion: meant }, context)
+  return null
 }
 
 interface Collected {

@@ -6,7 +6,14 @@ import type { Unstated } from '../../quantity/unstated.ts'
 import type { GeographicPoint, GridPoint, LocalPoint, Point } from '../claim.ts'
 import { EXAMPLES } from '../keys.ts'
 import { type Context, type Field, reportError } from './field.ts'
-import { PLACES, type PlaceKind, type PointKey, type PointKinds } from './point-kinds.ts'
+import {
+  type MixedPlace,
+  mixedPlace,
+  PLACES,
+  type PlaceKind,
+  type PointKey,
+  type PointKinds,
+} from './point-kinds.ts'
 import { readBreadth } from './read-breadth.ts'
 import { type Fields, reportMissingKey, reportOutOfPlace } from './read-mapping.ts'
 import { readQuantity } from './read-quantity.ts'
@@ -20,6 +27,8 @@ const EXAMPLE_OF_EACH =
 /** The kind of a point by the keys it has, with those reported that are missing or do not go together; null for none. */
 export function readPlaceKind(field: Field, fields: PointFields, context: Context): PlaceKind | null {
   const hasAny = (kind: PlaceKind) => PLACES[kind].keys.some((key) => fields.has(key))
+  const mixed = mixedPlace(fields.has)
+  if (mixed !== null) return refuseMixed(mixed, fields, context)
   const kind = (['plan', 'grid', 'geographic'] as const).find(hasAny)
   if (kind === undefined) {
     const message = `${quoted(field.name)} has no place`
@@ -110,6 +119,18 @@ function readLength(
   const kind = kinds[key]
   const read = (text: string) => readUnit(text, kind)
   return readQuantity(fields.get(key), read, `a length such as ${kind.example}`, context)
+}
+
+/** The key that is meant takes the place of the stray one. */
+function refuseMixed(
+  { has, stray, meant, kind }: MixedPlace,
+  fields: PointFields,
+  context: Context,
+): PlaceKind {
+  const entry = fields.get(stray)
+  const message = `${quoted(stray)} has no place here: it does not go with ${quoted(has)}`
+  if (entry !== undefined) reportOutOfPlace(entry, { message, expected: meant, suggestion: meant }, context)
+  return kind
 }
 
 function refuseBeside(other: PlaceKind, kind: PlaceKind, fields: PointFields, context: Context): void {

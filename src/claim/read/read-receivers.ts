@@ -1,3 +1,5 @@
+import { DEG } from '../../quantity/degrees.ts'
+import { formatCm } from '../../quantity/format-length.ts'
 import { misread, trimmedStretch } from '../../quantity/misread.ts'
 import { quoted } from '../../quantity/quoted.ts'
 import { readUncertainty } from '../../quantity/read-uncertainty.ts'
@@ -5,10 +7,11 @@ import { readUnit } from '../../quantity/read-unit.ts'
 import type { Reading } from '../../quantity/reading.ts'
 import type { North } from '../claim.ts'
 import { EXAMPLES, type KEYS } from '../keys.ts'
-import type { Context, Field } from './field.ts'
-import { BASELINE, POINT_UNCERTAINTY } from './kinds.ts'
+import { type Context, type Field, reportError } from './field.ts'
+import { BASELINE, DIRECTION_UNCERTAINTY, POINT_UNCERTAINTY } from './kinds.ts'
 import { type Fields, reportMissingKey } from './read-mapping.ts'
 import { readQuantity } from './read-quantity.ts'
+import { plainText } from './read-text.ts'
 
 /** Reads how far apart two GPS positions were, and how exact each; the one needs the other. */
 export function readReceivers(
@@ -27,7 +30,22 @@ export function readReceivers(
     ] as const)
       if (fields.has(key) && !fields.has(other))
         reportMissingKey(north, other, EXAMPLES[other] ?? null, context)
+  const accuracy = fields.get('accuracy')
+  const isUsed = isAsked && !fields.has('uncertainty')
+  if (isUsed && accuracy !== undefined && baselineM !== null && accuracyM !== null)
+    checkAccuracy(accuracy, accuracyM, baselineM, context)
   return { baselineM, accuracyM }
+}
+
+/** Two positions leave north open by √2 times the accuracy of each over their distance (JCGM 100:2008, section 5). */
+function checkAccuracy(field: Field, accuracyM: number, baselineM: number, context: Context): void {
+  const mostM = (DIRECTION_UNCERTAINTY.highDeg * DEG * baselineM) / Math.SQRT2
+  if (accuracyM <= mostM) return
+  const apart = formatCm(baselineM * 100)
+  const message = `${quoted(plainText(field) ?? '')} of positions ${apart} apart leaves north open by more than ${DIRECTION_UNCERTAINTY.highDeg}°`
+  reportError(context, field, 'out-of-range', message, {
+    expected: `at most ${formatCm(mostM * 100)} at this distance, or positions farther apart`,
+  })
 }
 
 function readAccuracy(text: string): Reading<number> {

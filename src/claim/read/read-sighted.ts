@@ -64,11 +64,24 @@ function readPart(
   if (field === undefined) return 'omitted'
   const word = readWord<Word>(field, WORDS, context)
   const end = name === null ? undefined : points.byName.get(name)
-  if (word !== null && end !== undefined && end.fields !== null && !end.fields.has('width')) {
-    const message = `${quoted(end.field.name)} has no width, so that nothing of it is left or right`
-    reportError(context, field, 'out-of-place', message, {
-      expected: 'width: 60 cm in the point, or the line without it',
-    })
-  }
-  return word === null ? 'omitted' : PARTS[word]
+  if (word === null) return 'omitted'
+  if (end === undefined || end.fields === null || end.fields.has('width')) return PARTS[word]
+  // Of what has no width there is nothing to know.
+  if (PARTS[word] !== 'unknown') reportWithoutWidth(field, end.field.name, PARTS[word], context)
+  return 'omitted'
+}
+
+function reportWithoutWidth(
+  field: Field,
+  name: string,
+  part: 'middle' | 'left' | 'right',
+  context: Context,
+): void {
+  const isMiddle = part === 'middle'
+  const why = isMiddle
+    ? ': it is sighted itself, and nothing need be said'
+    : ', so that nothing of it is left or right'
+  reportError(context, field, 'out-of-place', `${quoted(name)} has no width${why}`, {
+    expected: `${isMiddle ? 'the line without sighted' : 'the line without it'}, or width: 60 cm in the point`,
+  })
 }

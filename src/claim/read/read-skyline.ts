@@ -5,6 +5,7 @@ import { readAngle } from '../../quantity/read-angle.ts'
 import { readUncertainty } from '../../quantity/read-uncertainty.ts'
 import type { SkylineNode } from '../claim.ts'
 import type { CsvRow } from './csv-rows.ts'
+import { degreesText } from './degrees-text.ts'
 import { type Context, type Field, reportError } from './field.ts'
 import { ALTITUDE_UNCERTAINTY } from './kinds.ts'
 import { type CsvTable, cellField, readCsvTable, reportMissingColumn } from './read-csv-table.ts'
@@ -87,7 +88,7 @@ function checkOrder(table: CsvTable, nodes: readonly (SkylineNode | null)[], fie
       tell(
         row,
         'azimuth',
-        `does not lie to the right of ${before.azimuthDeg}°, within ${WIDEST_STEP_DEG}°`,
+        `does not lie to the right of ${degreesText(before.azimuthDeg)}, within ${WIDEST_STEP_DEG}°`,
         expected,
       )
       return false
@@ -103,7 +104,7 @@ function checkOrder(table: CsvTable, nodes: readonly (SkylineNode | null)[], fie
   tell(
     nodes.length - 1,
     'altitude',
-    `is not the altitude it began with, ${first.altitudeDeg}°, though it goes all the way round`,
+    `is not the altitude it began with, ${degreesText(first.altitudeDeg)}, though it goes all the way round`,
     'the same altitude at both ends',
   )
   return false

@@ -1,18 +1,20 @@
 import { isMap } from 'yaml'
 import { quoted } from '../../quantity/quoted.ts'
-import type { Direction, Span } from '../claim.ts'
+import type { Direction, SolsticeSpanTarget, Span } from '../claim.ts'
 import { EXAMPLES, KEYS } from '../keys.ts'
+import { checkSpanEnds } from './check-span-ends.ts'
 import { type Context, type Field, reportError } from './field.ts'
 import { checkJoin } from './join-points.ts'
 import { DIRECTION_UNCERTAINTY, SPAN } from './kinds.ts'
 import { measuredAngle } from './measured-angle.ts'
 import { PLACES } from './point-kinds.ts'
-import { readHorizon } from './read-horizon.ts'
+import { type LineOfSight, readHorizon } from './read-horizon.ts'
 import { type Fields, readMapping, reportMissingKey } from './read-mapping.ts'
 import { readPointName } from './read-point-name.ts'
 import { isUnknown, readQuantity } from './read-quantity.ts'
 import { plainText } from './read-text.ts'
 import type { Surroundings } from './surroundings.ts'
+import { warnNear } from './warn-near.ts'
 
 type SpanFields = Fields<keyof typeof KEYS.span>
 type SpanDirection = Extract<Direction, { by: 'span' }>
@@ -21,10 +23,14 @@ const ENDS = ['from', 'june', 'december'] as const
 const EXPECTED = `${SPAN.name} such as ${SPAN.example}`
 const readAngle = measuredAngle(SPAN, DIRECTION_UNCERTAINTY)
 
-/** Reads the span between two lines from one place: an angle, or three points, and the horizon at either end. */
+/**
+ * Reads the span between two lines from one place: an angle, or three points, and the horizon at either end. `target` is
+ * null where it could not be read.
+ */
 export function readSpan(
   line: Field,
   field: Field,
+  target: SolsticeSpanTarget | null,
   around: Surroundings,
   context: Context,
 ): SpanDirection | null {
@@ -39,9 +45,10 @@ export function readSpan(
       at: field.keyAt,
     })
   if (!hasPoints && !fields.has('angle')) reportMissingKey(field, 'angle', 'angle: 50°31′ ± 2′', context)
-  const span = hasPoints ? readPoints(field, fields, around, context) : readMeasured(fields, context)
+  const span = hasPoints ? readPoints(field, fields, target, around, context) : readMeasured(fields, context)
   const from = hasPoints ? { from: span?.by === 'points' ? span.from : null } : {}
-  const horizons = readHorizons(line, fields.get('horizons'), from, around, context)
+  const side = { name: line.name, ...from, isOfAngle: !hasPoints && fields.has('angle') }
+  const horizons = readHorizons(fields.get('horizons'), side, around, context)
   return span === null ? null : { by: 'span', span, horizons }
 }
 
@@ -50,7 +57,13 @@ function readMeasured(fields: SpanFields, context: Context): Span | null {
   return angleDeg === null ? null : { by: 'angle', angleDeg }
 }
 
-function readPoints(field: Field, fields: SpanFields, around: Surroundings, context: Context): Span | null {
+function readPoints(
+  field: Field,
+  fields: SpanFields,
+  target: SolsticeSpanTarget | null,
+  around: Surroundings,
+  context: Context,
+): Span | null {
   const [from, june, december] = ENDS.map((key) => {
     const entry = fields.get(key)
     if (entry !== undefined) return readPointName(entry, around.points, context)
@@ -60,7 +73,11 @@ function readPoints(field: Field, fields: SpanFields, around: Surroundings, cont
   })
   if (from == null || june == null || december == null) return null
   const isSound = checkEnds(fields, [from, june, december], around, context)
-  return isSound ? { by: 'points', from, june, december } : null
+  if (!isSound) return null
+  const ends = { from, june, december }
+  const [juneField, decemberField] = [fields.get('june') ?? field, fields.get('december') ?? field]
+  checkSpanEnds({ ...ends, juneField, decemberField }, target?.at ?? null, around.points, context)
+  return { by: 'points', ...ends }
 }
 
 /** Three different points, of one kind, at three places. */
@@ -88,14 +105,14 @@ function checkEnds(
       return false
     }
     for (const before of earlier) checkJoin(field, before, name, around, context)
+    if (key !== 'from') warnNear(field, names[0], name, around.points, context)
   }
   return true
 }
 
 function readHorizons(
-  line: Field,
   field: Field | undefined,
-  from: { from?: string | null },
+  line: LineOfSight,
   around: Surroundings,
   context: Context,
 ): SpanDirection['horizons'] {
@@ -104,8 +121,7 @@ function readHorizons(
   if (!isMap(field.node) && isUnknown(plainText(field) ?? '')) return { june: 'unknown', december: 'unknown' }
   const fields = readMapping(field, KEYS.spanHorizons, context)
   if (fields === null) return nothing
-  const at = (key: 'june' | 'december') =>
-    readHorizon(fields.get(key), { name: line.name, ...from }, around, context)
+  const at = (key: 'june' | 'december') => readHorizon(fields.get(key), line, around, context)
   return { june: at('june'), december: at('december') }
 }
 

@@ -16,39 +16,42 @@ const SEPARATORS: readonly Separator[] = [';', '\t', ',']
 
 /** Whatever separates the cells of a heading; a comma where nothing does. */
 export function separatorOf(text: string): Separator {
-  const heading = linesOf(text)[0]?.text.replace(/"(?:[^"]|"")*"/g, '') ?? ''
+  const heading =
+    linesOf(text)
+      .next()
+      .value?.text.replace(/"(?:[^"]|"")*"/g, '') ?? ''
   return SEPARATORS.find((separator) => heading.includes(separator)) ?? ','
 }
 
-const IN_QUOTES = /^\s*"(?:[^"]|"")*"\s*$/
+const IN_QUOTES = /^\s*"[^"]*(?:""[^"]*)*"\s*$/
 
 /**
- * The lines of a table with their cells; empty lines and those that begin with # are left out. A cell ends on its line:
- * so a quote that nothing closes is told where it stands and does not swallow what follows.
+ * The lines of a table with their cells, one after the other as they are asked for; empty lines and those that begin
+ * with # are left out. A cell ends on its line: so a quote that nothing closes is told where it stands and does not
+ * swallow what follows.
  */
-export function splitCsv(text: string, separator: Separator): readonly CsvLine[] {
-  return linesOf(text).map(({ text: line, offset, number }) => {
+export function* splitCsv(text: string, separator: Separator): Generator<CsvLine, undefined> {
+  for (const { text: line, offset, number } of linesOf(text)) {
     const cells = line.includes('"') ? quotedCells(line, separator) : plainCells(line, separator)
     if (cells === null) {
       const quote = brokenQuote(line, separator)
-      return { brokenAt: { offset: offset + quote, length: line.length - quote } }
+      yield { brokenAt: { offset: offset + quote, length: line.length - quote } }
+      continue
     }
     const moved = cells.map((cell) => ({ ...cell, at: { ...cell.at, offset: cell.at.offset + offset } }))
-    return { line: number, at: { offset, length: line.length }, cells: moved }
-  })
+    yield { line: number, at: { offset, length: line.length }, cells: moved }
+  }
 }
 
-function linesOf(text: string): { text: string; offset: number; number: number }[] {
-  const lines: { text: string; offset: number; number: number }[] = []
+function* linesOf(text: string): Generator<{ text: string; offset: number; number: number }, undefined> {
   let number = 0
   for (const match of text.matchAll(/([^\r\n]*)(?:\r\n|\r|\n|$)/g)) {
     number += 1
     const mark = match.index === 0 && text.startsWith('\ufeff') ? 1 : 0
     const line = (match[1] ?? '').slice(mark)
     if (/^\s*(?:#|$)/.test(line)) continue
-    lines.push({ text: line, offset: match.index + mark, number })
+    yield { text: line, offset: match.index + mark, number }
   }
-  return lines
 }
 
 function plainCells(line: string, separator: Separator): readonly Cell[] {
@@ -65,13 +68,14 @@ function quotedCells(line: string, separator: Separator): readonly Cell[] | null
   const bytes = Buffer.from(line)
   const cells: Cell[] = []
   let start = 0
+  let offset = 0
   let isSound = true
   const take = (value: string, { bytes: end, quoting }: { bytes: number; quoting: boolean }) => {
     const raw = bytes.subarray(start, end).toString()
-    const offset = bytes.subarray(0, start).toString().length
     if (quoting && !IN_QUOTES.test(raw)) isSound = false
     cells.push(cellAt(raw, value, offset, quoting))
     start = end + separator.length
+    offset += raw.length + separator.length
     return value
   }
   try {

@@ -2,6 +2,7 @@ import type { Claim, Horizon } from '../claim.ts'
 import { type Context, type Field, reportWarning } from './field.ts'
 import type { PlaceKind } from './point-kinds.ts'
 import type { ReadPoints } from './read-points.ts'
+import { restsOnGrid } from './rests-on-grid.ts'
 
 type Lines = Claim['sightlines']
 
@@ -30,7 +31,7 @@ export function warnUnusedGrid(
   context: Context,
 ): void {
   if (field === undefined || sightlines.length === 0 || touches(sightlines, 'grid', points)) return
-  if (typeof north !== 'string' && north.from === 'grid' && north.convergence === null) return
+  if (restsOnGrid(north)) return
   const message = '`grid` is not used: no sightline begins or ends at a point of the grid'
   reportWarning(context, field, 'unused-key', message, { expected: 'a file without it', at: field.keyAt })
 }
