@@ -135,13 +135,11 @@ test('so many problems are no trouble that they would not fit on the stack as ar
   expect(problems[20]?.message).toBe('`survey.csv` has 139981 more problems from here on')
 })
 
-test('a line of a million characters with quotes is taken apart in seconds', () => {
+// Where each cell is counted from the beginning of its line this takes minutes, and the test runs out of time.
+test('a line of a million characters with quotes is taken apart as a short one is', () => {
   const line = '"é",'.repeat(250_000)
-  const start = performance.now()
   const { problems } = read(SURVEY_AND_TABLE, { ...BESIDE, 'survey.csv': `name,east,north\n${line}\n` })
   expect(problems).toMatchObject([{ code: 'wrong-number-of-cells', length: 1_000_000 }])
-  // Seconds; where each cell is counted from the beginning of its line it takes minutes.
-  expect((performance.now() - start) / 1000).toBeLessThan(20)
 })
 
 test('a declination with a sign and a letter is told of a letter alone, since a sign alone is refused', () => {
