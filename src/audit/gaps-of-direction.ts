@@ -9,6 +9,7 @@ import { northGaps } from './gaps-of-north.ts'
 import type { SightlineInputs } from './sightline-inputs.ts'
 import { pointNamed, pointSdM } from './survey/place-of-point.ts'
 import { surveyedSpan } from './survey/surveyed-span.ts'
+import { tieOf } from './survey/tie-of.ts'
 import { turnedLine } from './turned-line.ts'
 
 /** What one sightline leaves open of its direction: its uncertainty, and north. */
@@ -49,24 +50,19 @@ export function directionGaps(
 
 /** A line from the plan to a place on the Earth rests on where the plan is. */
 function tieGaps(
-  { points }: Claim,
+  claim: Claim,
   { from, to }: Extract<Direction, { by: 'points' }>,
   { lengthM }: SightlineInputs,
 ): Gap[] {
-  const kinds = [from, to].map((name) => points.get(name)?.by)
-  const tie = [...points].find(([, point]) => point.by === 'plan' && point.tie !== null)
-  if (
-    tie === undefined ||
-    lengthM === null ||
-    !kinds.includes('plan') ||
-    kinds.every((kind) => kind === 'plan')
-  )
-    return []
+  const kinds = [from, to].map((name) => pointNamed(claim, name).by)
+  const tie = tieOf(claim)
+  const isMixed = kinds.includes('plan') && !kinds.every((kind) => kind === 'plan')
+  if (tie === null || lengthM === null || !isMixed) return []
   const sdM = DEFAULTS.pointSdM.geographic
   const turnDeg = sdM / lengthM / DEG
   return [
     {
-      what: `uncertainty of where ${tie[0]} is on the Earth`,
+      what: `uncertainty of where ${tie.name} is on the Earth`,
       said: 'omitted',
       used: `± ${formatCm(sdM * 100)}`,
       basis: BASIS_OF_POINT.geographic,

@@ -225,6 +225,17 @@ describe('the track', () => {
     )
   })
 
+  it('tells the day of a sighting by the place’s time and by universal time where the two part', () => {
+    const audit = completeAudit()
+    const [today] = audit.today
+    const at = (utc: string) => ({ ...audit, today: [{ ...today!, next: { ...today!.next!, utc } }] })
+    // 21 June dawns at 150° E while it is 20 June by universal time.
+    expect(part('today', at('2027-06-20T20:56Z'))).toContain(
+      'is on 21 June 2027 by the place’s own time, at 20:56 UTC on 20 June 2027.',
+    )
+    expect(part('today', at('2027-06-21T03:06Z'))).toContain('is on 21 June 2027, at 03:06 UTC.')
+  })
+
   it('says where the target stands today', () => {
     expect(part('today', severalLinesAudit())).toBe(
       'midsummer. Today (2026 CE) the target stands at azimuth 59°00′; the line points 1°05′ (2.1 times the Sun’s width, 1.9 m at the marker) to the left of it. The next chance to look for oneself is on 21 June 2027, at 03:06 UTC. From 20 June 2027 to 23 June 2027 the Sun stands within 1′ of its declination of that day, and any of these does as well. The place from which it stands over the foresight is 1.9 m ± 30 cm to the left of the backsight, as one looks along the line. Take a coat.\nmidwinter. Today (2026 CE) the target is not to be seen: there is no December solstice sunset at that altitude. There is no chance to look for oneself: none is reckoned here.',

@@ -7,6 +7,7 @@ import { DEFAULTS } from '../defaults.ts'
 import { statedOr } from '../stated-or.ts'
 import { northOfPlan } from './north-of-plan.ts'
 import { projectionOf } from './projection-of.ts'
+import { tieOf } from './tie-of.ts'
 
 /** The reader of the claim file has made sure that the point exists. */
 export function pointNamed({ points }: Claim, name: string): Point {
@@ -32,12 +33,10 @@ export function placeOfPoint(claim: Claim, point: Point): GeographicPoint | null
     case 'grid':
       return placeOnGrid(claim, point)
     case 'plan': {
-      const tie = [...claim.points.values()].find((held) => held.by === 'plan' && held.tie !== null)
-      if (tie?.by !== 'plan' || tie.tie === null) return null
-      return tiedPlace(turned(point, northOfPlan(claim).turnDeg), {
-        plan: turned(tie, northOfPlan(claim).turnDeg),
-        place: tie.tie,
-      })
+      const tie = tieOf(claim)
+      if (tie === null) return null
+      const { turnDeg } = northOfPlan(claim)
+      return tiedPlace(turned(point, turnDeg), { plan: turned(tie.point, turnDeg), place: tie.place })
     }
   }
 }

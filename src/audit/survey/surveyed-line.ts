@@ -13,6 +13,7 @@ import { lineOnEarth } from './line-on-earth.ts'
 import { eastOrWest, northOfPlan } from './north-of-plan.ts'
 import { placeOfPoint, pointNamed, pointSdM, turned } from './place-of-point.ts'
 import { projectionOf } from './projection-of.ts'
+import { tieOf } from './tie-of.ts'
 
 /** A line between two points of a survey. */
 export interface SurveyedLine {
@@ -112,8 +113,8 @@ function onEarth(claim: Claim, from: Point, to: Point): SurveyedLine {
  * far to the right for each radian. 0 for a point that is not on the plan.
  */
 function alongFromTieM(claim: Claim, point: Point, azimuthDeg: number): number {
-  const tie = [...claim.points.values()].find((held) => held.by === 'plan' && held.tie !== null)
-  if (point.by !== 'plan' || tie?.by !== 'plan') return 0
+  const tie = tieOf(claim)?.point
+  if (point.by !== 'plan' || tie === undefined) return 0
   const offset = { eastM: point.eastM - tie.eastM, northM: point.northM - tie.northM }
   const { eastM, northM } = turned(offset, northOfPlan(claim).turnDeg)
   return eastM * Math.sin(azimuthDeg * DEG) + northM * Math.cos(azimuthDeg * DEG)
