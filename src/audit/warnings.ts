@@ -6,6 +6,7 @@ import { formatYearRange } from '../quantity/format-year.ts'
 import { listed, listedShort } from '../quantity/listed.ts'
 import { isUnstated } from '../quantity/unstated.ts'
 import { bennettRefractionArcmin } from '../site/bennett.ts'
+import { skylineWidthDeg } from '../site/skyline.ts'
 import { OBLIQUITY_MODELS } from '../sky/obliquity-models.ts'
 import { ORBIT_SPAN } from '../sky/orbit.ts'
 import type { DatedLabel, Implied, Sweep } from './audit.ts'
@@ -179,10 +180,7 @@ function beyondProfile(line: SightlineInputs, dates: SettledClaim['dates']): str
   const { asserted, others } = dates
   const { nodes } = line.horizon
   if (nodes === null) return []
-  const [first, width] = [
-    nodes[0]!.azimuthDeg,
-    wrap360(nodes.at(-1)!.azimuthDeg - nodes[0]!.azimuthDeg) || 360,
-  ]
+  const [first, width] = [nodes[0]!.azimuthDeg, skylineWidthDeg(nodes)]
   const isOutside = (azimuthDeg: number) => wrap360(azimuthDeg - first) > width
   const sight = sightOf(line)
   const missed = [asserted, ...others].filter((date) => {

@@ -78,6 +78,11 @@ function firstFrom(nodes: readonly SkylineNode[], azimuthDeg: number): number {
   return from
 }
 
+/** How far a profile runs round the horizon, degrees; 360 where it ends where it began. */
+export function skylineWidthDeg(nodes: readonly Pick<SkylineNode, 'azimuthDeg'>[]): number {
+  return wrap360(nodes.at(-1)!.azimuthDeg - nodes[0]!.azimuthDeg) || 360
+}
+
 function checkNode({ azimuthDeg, altitudeDeg, sdDeg }: SkylineNode): void {
   if (!(azimuthDeg >= 0 && azimuthDeg <= 360))
     throw new RangeError(`an azimuth is from 0° to 360°, got ${azimuthDeg}`)

@@ -146,12 +146,15 @@ describe('a skyline that is looked at more than once', () => {
   })
 })
 
-test('two names for one place do not trouble the plan', () => {
+// On the meridian where the days meet, one place has two longitudes.
+test.each([
+  ['2.000000° W', '2.000000° W', '1.980000° W'],
+  ['180.000000° E', '180.000000° W', '179.980000° W'],
+])('two names for one place do not trouble the plan: %s and %s', (one, same, east) => {
   const audit = auditWith(
     claimText({
-      structure: PLACE,
-      points:
-        '{a: {latitude: 50.000000° N, longitude: 2.000000° W}, b: {latitude: 50.010000° N, longitude: 1.980000° W}, c: {latitude: 50.000000° N, longitude: 2.000000° W}, e: {latitude: 50.012000° N, longitude: 1.980000° W}}',
+      structure: `{name: Place, latitude: 50° N, longitude: ${one}, elevation: 100 m}`,
+      points: `{a: {latitude: 50.000000° N, longitude: ${one}}, b: {latitude: 50.010000° N, longitude: ${east}}, c: {latitude: 50.000000° N, longitude: ${same}}, e: {latitude: 50.012000° N, longitude: ${east}}}`,
       sightlines: `{one: {from: a, to: b, horizon: 30′ ± 1′}, two: {from: c, to: e, horizon: 30′ ± 1′}}`,
       target: '{body: sun, event: june solstice, at: rising, disc: upper limb}',
     }),

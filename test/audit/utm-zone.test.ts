@@ -5,7 +5,7 @@ import { readClaim } from '../../src/claim/read-claim.ts'
 import { GRS80 } from '../../src/site/ellipsoid.ts'
 import { gridConvergenceDeg } from '../../src/site/grid-convergence.ts'
 import { geographicOf, type TransverseMercatorGrid } from '../../src/site/transverse-mercator.ts'
-import { utmGrid } from '../../src/site/utm-zone.ts'
+import { utmGrid } from '../site/utm-grid.ts'
 import { claimText } from './audit-of.ts'
 
 /** A claim whose plan has the north of a grid, about a place of which nothing but its coordinates matters. */
@@ -27,7 +27,7 @@ function gridOfClaim(grid: string, place: string): TransverseMercatorGrid {
   return projectionOf(claim.grid.projection)
 }
 
-describe('a zone has the same figures for the reader of claims and for the computation', () => {
+describe('a zone has the same figures for the reader of claims and by the standard', () => {
   test.each([1, 33, 60])('zone %i', (zone) => {
     for (const side of ['N', 'S'] as const) {
       const place = `latitude: 41° ${side}, longitude: ${6 * zone - 183}°`
@@ -37,6 +37,18 @@ describe('a zone has the same figures for the reader of claims and for the compu
       )
     }
   })
+})
+
+// NGA.SIG.0012 (from memory): zone 1 reaches from 180° W to 174° W, zone 60 ends at 180° E.
+test.each([
+  [1, -177],
+  [30, -3],
+  [31, 3],
+  [60, 177],
+])('zone %i is centred on %i°', (zone, meridian) => {
+  const grid = gridOfClaim(`{zone: UTM ${zone} N}`, `latitude: 41° N, longitude: ${meridian}°`)
+  expect(grid.centralMeridianDeg).toBe(meridian)
+  expect(grid).toMatchObject({ scale: 0.9996, falseEastingM: 500_000, falseNorthingM: 0 })
 })
 
 // The reader reckons on the sphere how far the projection reaches, the computation refuses on the ellipsoid.

@@ -1,9 +1,9 @@
 import { describe, expect, test } from 'vitest'
 import { DEG } from '../../src/quantity/degrees.ts'
 import { gridConvergenceDeg } from '../../src/site/grid-convergence.ts'
-import { utmGrid } from '../../src/site/utm-zone.ts'
 import { expectWithin } from '../published/expect-within.ts'
 import { FLINDERS_PEAK, MGA_55, sexagesimal } from './published-places.ts'
+import { utmGrid } from './utm-grid.ts'
 
 const at = (latitudeDeg: number, longitudeDeg: number) => ({ latitudeDeg, longitudeDeg })
 

@@ -9,7 +9,6 @@ import {
   geographicOf,
   type TransverseMercatorGrid,
 } from '../../src/site/transverse-mercator.ts'
-import { utmGrid } from '../../src/site/utm-zone.ts'
 import { expectWithin } from '../published/expect-within.ts'
 import {
   BUNINYONG_ON_GRID,
@@ -18,6 +17,7 @@ import {
   MGA_55,
   sexagesimal,
 } from './published-places.ts'
+import { utmGrid } from './utm-grid.ts'
 
 /** A line of a known grid with both its ends taken to the ellipsoid, so that nothing is left out. */
 function lineOnEarth(from: GridPoint, to: GridPoint, grid: TransverseMercatorGrid) {

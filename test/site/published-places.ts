@@ -1,6 +1,6 @@
 import { GRS80 } from '../../src/site/ellipsoid.ts'
 import type { GeographicPoint } from '../../src/site/geographic-point.ts'
-import { utmGrid } from '../../src/site/utm-zone.ts'
+import { utmGrid } from './utm-grid.ts'
 
 /** Degrees, minutes and seconds of an angle as degrees, with its sign apart. */
 export function sexagesimal(sign: 1 | -1, degrees: number, minutes: number, seconds: number): number {

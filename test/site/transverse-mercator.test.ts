@@ -1,7 +1,6 @@
 import { describe, expect, test } from 'vitest'
 import { AIRY_1830, CLARKE_1866 } from '../../src/site/ellipsoid.ts'
 import { geographicOf, gridOf, type TransverseMercatorGrid } from '../../src/site/transverse-mercator.ts'
-import { utmGrid } from '../../src/site/utm-zone.ts'
 import { expectWithin } from '../published/expect-within.ts'
 import {
   BUNINYONG,
@@ -11,6 +10,7 @@ import {
   MGA_55,
   sexagesimal,
 } from './published-places.ts'
+import { utmGrid } from './utm-grid.ts'
 
 /** Ordnance Survey, A guide to coordinate systems in Great Britain, annex A. */
 const NATIONAL_GRID: TransverseMercatorGrid = {

@@ -1,5 +1,5 @@
 import type { Claim, Point } from '../../claim/claim.ts'
-import { DEG } from '../../quantity/degrees.ts'
+import { DEG, wrap180 } from '../../quantity/degrees.ts'
 import { type Ellipsoid, WGS84 } from '../../site/ellipsoid.ts'
 import { geodesicLine } from '../../site/geodesic-line.ts'
 import { placeOfPoint } from './place-of-point.ts'
@@ -22,7 +22,8 @@ export function lineOnEarth(claim: Claim, from: Point, to: Point): LineOnEarth |
   const [start, end] = [placeOfPoint(claim, from), placeOfPoint(claim, to)]
   if (start === null || end === null) return null
   const north = (start.latitudeDeg - end.latitudeDeg) * METRES_PER_DEGREE
-  const east = (start.longitudeDeg - end.longitudeDeg) * METRES_PER_DEGREE * Math.cos(start.latitudeDeg * DEG)
+  const east =
+    wrap180(start.longitudeDeg - end.longitudeDeg) * METRES_PER_DEGREE * Math.cos(start.latitudeDeg * DEG)
   if (Math.hypot(north, east) < SAME_PLACE_M) return { azimuthDeg: 0, lengthM: 0 }
   return geodesicLine(start, end, ellipsoidOf(claim, from, to))
 }

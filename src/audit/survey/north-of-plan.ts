@@ -15,7 +15,7 @@ export interface NorthOfPlan {
   turnDeg: number
   /** One standard deviation, shared by every line of the plan. */
   sdDeg: number
-  /** How it was found, such as `a compass`. */
+  /** How it was found, such as `by compass`. */
   found: string
   /** What was done with the bearings, in sentences. */
   steps: readonly string[]

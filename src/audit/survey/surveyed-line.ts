@@ -86,6 +86,7 @@ function onEarth(claim: Claim, from: Point, to: Point): SurveyedLine {
   // The reader of the claim file has made sure that both can be placed.
   if (start === null || end === null || line === null)
     throw new Error('a claim without errors joins no points of two kinds')
+  if (line.lengthM === 0) throw new Error('a claim without errors joins no two points at one place')
   const grid = claim.grid?.by === 'projection' ? claim.grid : null
   const stone = from.by === 'plan' ? from : to
   // A plan turned clockwise carries a stone ahead of its tie to the right, and a line that begins there to the left.

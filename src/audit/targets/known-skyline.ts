@@ -1,6 +1,6 @@
 import { wrap360 } from '../../quantity/degrees.ts'
 import { refractionByTable } from '../../site/refraction-by-table.ts'
-import { type Skyline, type SkylineNode, skylineOf } from '../../site/skyline.ts'
+import { type Skyline, type SkylineNode, skylineOf, skylineWidthDeg } from '../../site/skyline.ts'
 import { type SkylineCrossings, skylineCrossings } from '../../site/skyline-crossing.ts'
 import { between, type SkylinePath, skylinePath } from '../../site/skyline-path.ts'
 import { trueSkyline } from '../../site/true-skyline.ts'
@@ -115,7 +115,7 @@ function once<T>(make: () => T): () => T {
 /** A profile with a level piece beyond each end. */
 function carriedOn(nodes: readonly SkylineNode[], by: number): SkylineNode[] {
   const [first, last] = [nodes[0]!, nodes.at(-1)!]
-  const width = wrap360(last.azimuthDeg - first.azimuthDeg) || 360
+  const width = skylineWidthDeg(nodes)
   const room = Math.min(by, (WHOLE_TURN_DEG - width) / 2)
   // A profile of nearly the whole horizon goes round to its first node.
   if (room <= STEP_DEG) return width === 360 ? [...nodes] : [...nodes, first]

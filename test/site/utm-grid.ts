@@ -1,5 +1,5 @@
-import { type Ellipsoid, WGS84 } from './ellipsoid.ts'
-import type { TransverseMercatorGrid } from './transverse-mercator.ts'
+import { type Ellipsoid, WGS84 } from '../../src/site/ellipsoid.ts'
+import type { TransverseMercatorGrid } from '../../src/site/transverse-mercator.ts'
 
 /**
  * The grid of a zone of the Universal Transverse Mercator system, north (`N`) or south (`S`) of the equator, on
